@@ -1,0 +1,10 @@
+/** @type {import("next").NextConfig} */
+const config = {
+  // Bundled, Sequelize cannot find pg and every chunk would get a copy of the models' connection.
+  serverExternalPackages: ["sequelize", "pg-boss"],
+  // The test command builds beside a running installation, never over it.
+  distDir: process.env.NEXT_DIST_DIR ?? ".next",
+  poweredByHeader: false,
+};
+
+export default config;
