@@ -1,0 +1,135 @@
+import type { Unit } from "@/lib/gnss/units";
+
+/** As typed, by field id; a field of a repeated section has its line number in the id, `satellites.3.doppler`. */
+export type Answers = Readonly<Record<string, string>>;
+
+export type Choice = { value: string; label: string };
+
+export type FieldSpec = {
+  id: string;
+  label: string;
+  input: "number" | "choice" | "text";
+  unit?: Unit;
+  choices?: readonly Choice[];
+  help?: string;
+  quantity: string;
+};
+
+/** Field ids are `${section.id}.${field.id}`, or `${section.id}.${n}.${field.id}` with n from 1 when the section repeats. */
+export type FormSection = {
+  id: string;
+  title: string;
+  repeat?: { max: number; add: string };
+  fields: readonly FieldSpec[];
+};
+
+export type TolerancePublic = {
+  quantity: string;
+  label: string;
+  tolerance: string;
+  critical: boolean;
+  reason: string;
+};
+
+export type CautionTopic = "height" | "lightning" | "mains" | "rf" | "transmit" | "life";
+
+/** All that leaves the server before the hand-in. `data` is the kind's own, plain JSON. */
+export type PublicCase = {
+  kind: string;
+  version: number;
+  title: string;
+  brief: string[];
+  given: { label: string; value: string }[];
+  cautions: CautionTopic[];
+  sections: FormSection[];
+  tolerances: TolerancePublic[];
+  data: Record<string, unknown>;
+};
+
+export type CaseFile = { name: string; mediaType: string; bytes: Uint8Array };
+
+export type ToleranceValue = { value: number; unit: Unit };
+
+/** One check of a release. No quantity named means all of the kind's quantities, as the kind defines them. */
+export type CheckPlan<P = unknown> = {
+  id: string;
+  kind: string;
+  version: number;
+  title: string;
+  minutes: number;
+  needs: number | null;
+  parameters: P;
+  quantities: { of: string; tolerance: ToleranceValue | null; critical: boolean }[];
+};
+
+export type BuiltCase<T = unknown> = { truth: T; publicCase: PublicCase; files: CaseFile[]; draws: number };
+
+export type MarkedRow = {
+  quantity: string;
+  subject: string | null;
+  label: string;
+  handedIn: string;
+  understood: string | null;
+  computed: string;
+  difference: string | null;
+  tolerance: string;
+  offByTolerances: number | null;
+  within: boolean;
+  critical: boolean;
+  errorClass: string | null;
+  reason: string | null;
+};
+
+export type Marking = {
+  /** Kind and version of the marking, "false-lock@1". */
+  marking: string;
+  rows: MarkedRow[];
+  quantities: { of: string; label: string; critical: boolean; within: boolean }[];
+  needs: number;
+  withinCount: number;
+  met: boolean;
+  workings: { label: string; value: string }[];
+};
+
+export type Progress = (done: number, total: number, step: string) => void;
+
+/** A parameter a lead may write as an attribute of `<Check>`; every one has a default, so that none must be written. */
+export type ParameterSpec = { name: string; label: string; help: string } & (
+  | { input: "number"; unit: Unit; from: number; to: number; whole: boolean; default: number }
+  | { input: "range"; unit: Unit; from: number; to: number; whole: boolean; default: readonly [number, number] }
+  | { input: "choice"; choices: readonly Choice[]; default: string }
+);
+
+/** `tolerance` null: exact, or computed from the hand-in as `reason` says; `toleranceRange` is what a lead may set, in its unit. */
+export type QuantityDefinition = {
+  id: string;
+  label: string;
+  unit: Unit | null;
+  choices?: readonly Choice[];
+  tolerance: ToleranceValue | null;
+  toleranceRange: { from: number; to: number; unit: Unit } | null;
+  critical: boolean;
+  reason: string;
+};
+
+export interface CheckKind<P = unknown, T = unknown> {
+  readonly id: string;
+  readonly version: number;
+  /** Place in the catalogue of practical checks: A1, A2, B1, ... */
+  readonly letter: string;
+  readonly title: string;
+  readonly defaultMinutes: number;
+  readonly parameters: readonly ParameterSpec[];
+  readonly quantities: readonly QuantityDefinition[];
+  readonly cautions: readonly CautionTopic[];
+  build(seedHex: string, plan: CheckPlan<P>, progress?: Progress): BuiltCase<T>;
+  mark(seedHex: string, plan: CheckPlan<P>, answers: Answers, progress?: Progress): Marking;
+  /** The right method with a careful reading, from the public case and its files alone. */
+  solve(built: BuiltCase<T>, plan: CheckPlan<P>): Answers;
+  readonly wrongMethods: Readonly<Record<string, WrongMethod<P, T>>>;
+}
+
+export interface WrongMethod<P = unknown, T = unknown> {
+  readonly label: string;
+  solve(built: BuiltCase<T>, plan: CheckPlan<P>): Answers;
+}
