@@ -1,0 +1,250 @@
+import type { CautionTopic } from "@/lib/checks/kind";
+import type { Unit } from "@/lib/gnss/units";
+
+/** How the value of an attribute is read. A number may be bare, in the unit given, or in quotes with a unit of its own. */
+export type AttributeSpec = { name: string; help: string; sample: string; required?: true } & (
+  | { input: "number"; unit: Unit; from: number; to: number; whole?: true }
+  | { input: "name" | "text" | "flag" | "topics" }
+);
+
+export type TagSpec = {
+  name: string;
+  help: string;
+  attributes: readonly AttributeSpec[];
+  /** Attributes beyond the list belong to the kind named by `kind` and are read with it. */
+  kindAttributes?: true;
+  inside: "nothing" | "text";
+  /** Checks stand between the parts of the text, quantities inside a check, the rest wherever a paragraph may. */
+  place: "top" | "check" | "block";
+};
+
+export const CAUTION_TOPICS = [
+  "height",
+  "lightning",
+  "mains",
+  "rf",
+  "transmit",
+  "life",
+] as const satisfies readonly CautionTopic[];
+
+const prn = (name: string, help: string): AttributeSpec => ({
+  name,
+  help,
+  sample: "{5}",
+  input: "number",
+  unit: "1",
+  from: 1,
+  to: 32,
+  whole: true,
+});
+
+const coherent: AttributeSpec = {
+  name: "coherent",
+  help: "coherent integration time",
+  sample: '"1 ms"',
+  input: "number",
+  unit: "ms",
+  from: 1,
+  to: 20,
+};
+
+export const TAGS = {
+  TwoCodes: {
+    name: "TwoCodes",
+    help: "Two-code correlator: one C/A code slid over another",
+    inside: "nothing",
+    place: "block",
+    attributes: [
+      prn("a", "satellite whose code stands still"),
+      prn("b", "satellite whose code is slid"),
+      {
+        name: "doppler",
+        help: "Doppler difference",
+        sample: '"1 kHz"',
+        input: "number",
+        unit: "Hz",
+        from: -10_000,
+        to: 10_000,
+      },
+      {
+        name: "lag",
+        help: "lag of the cursor",
+        sample: '"0 chip"',
+        input: "number",
+        unit: "chip",
+        from: 0,
+        to: 1022.9,
+      },
+      coherent,
+    ],
+  },
+  SearchPlan: {
+    name: "SearchPlan",
+    help: "Search planner: detection, false alarms and time of a plan",
+    inside: "nothing",
+    place: "block",
+    attributes: [
+      {
+        name: "cn0",
+        help: "carrier to noise density",
+        sample: '"31 dB-Hz"',
+        input: "number",
+        unit: "dB-Hz",
+        from: 20,
+        to: 55,
+      },
+      coherent,
+      {
+        name: "sums",
+        help: "non-coherent sums",
+        sample: "{20}",
+        input: "number",
+        unit: "1",
+        from: 1,
+        to: 500,
+        whole: true,
+      },
+      { name: "bin", help: "Doppler bin", sample: '"100 Hz"', input: "number", unit: "Hz", from: 10, to: 1000 },
+      { name: "step", help: "code step", sample: '"0.5 chip"', input: "number", unit: "chip", from: 0.1, to: 1 },
+      {
+        name: "window",
+        help: "half width of the Doppler window",
+        sample: '"5 kHz"',
+        input: "number",
+        unit: "Hz",
+        from: 0,
+        to: 20_000,
+      },
+      {
+        name: "falseAlarm",
+        help: "false-alarm probability of one search",
+        sample: "{1e-3}",
+        input: "number",
+        unit: "1",
+        from: 1e-9,
+        to: 0.1,
+      },
+      {
+        name: "correlators",
+        help: "cells searched at a time",
+        sample: "{2046}",
+        input: "number",
+        unit: "1",
+        from: 1,
+        to: 1_000_000,
+        whole: true,
+      },
+    ],
+  },
+  Check: {
+    name: "Check",
+    help: "A practical check; the text inside is its brief",
+    inside: "text",
+    place: "top",
+    kindAttributes: true,
+    attributes: [
+      { name: "id", help: "name of the check in this module", sample: '"satellites"', input: "name", required: true },
+      { name: "kind", help: "kind of check", sample: '"satellites"', input: "name", required: true },
+      {
+        name: "minutes",
+        help: "time from opening the case to the hand-in",
+        sample: "{40}",
+        input: "number",
+        unit: "1",
+        from: 5,
+        to: 240,
+        whole: true,
+      },
+      {
+        name: "needs",
+        help: "quantities that must be within; all of them if left out",
+        sample: "{3}",
+        input: "number",
+        unit: "1",
+        from: 1,
+        to: 40,
+        whole: true,
+      },
+    ],
+  },
+  Quantity: {
+    name: "Quantity",
+    help: "One quantity of the check that is judged; without any, all of its kind are",
+    inside: "nothing",
+    place: "check",
+    attributes: [
+      { name: "of", help: "quantity of the kind", sample: '"doppler"', input: "name", required: true },
+      {
+        name: "tolerance",
+        help: "largest difference that is within, with its unit",
+        sample: '"0.5 chip"',
+        input: "text",
+      },
+      { name: "critical", help: "outside this quantity the check is not met", sample: "{true}", input: "flag" },
+    ],
+  },
+  Caution: {
+    name: "Caution",
+    help: "Standing cautions; the text inside is added to them",
+    inside: "text",
+    place: "block",
+    attributes: [
+      {
+        name: "about",
+        help: `one or more of ${CAUTION_TOPICS.join(", ")}`,
+        sample: '"height lightning"',
+        input: "topics",
+        required: true,
+      },
+    ],
+  },
+} as const satisfies Record<string, TagSpec>;
+
+export type TagName = keyof typeof TAGS;
+
+export function tagNamed(name: string): TagSpec | null {
+  return Object.hasOwn(TAGS, name) ? TAGS[name as TagName] : null;
+}
+
+/** Tags of the language that this release does not have yet. */
+export const LATER_TAGS: readonly string[] = [
+  "FalseLock",
+  "CaptureView",
+  "LoopJitter",
+  "ExpectedCn0",
+  "PromptCn0",
+  "ChainLevels",
+  "CableEcho",
+  "EffectiveCn0",
+  "StandOff",
+  "MixProducts",
+  "MultipathError",
+  "SkyMask",
+  "DelayBudget",
+  "PulseError",
+  "Given",
+  "Wrong",
+  "WitnessLine",
+  "Figure",
+];
+
+/** Kinds of the language that this release does not have yet; the others stand in the registry of kinds. */
+export const LATER_KINDS: readonly string[] = [
+  "side-peak",
+  "cn0",
+  "lost-decibels",
+  "chain",
+  "sky-view",
+  "witnessed",
+  "interferer",
+  "stand-off",
+  "locate",
+  "jammed-or-not",
+  "multipath-log",
+  "delay-entry",
+  "pulse-acceptance",
+  "log-timeline",
+  "own-capture",
+  "formula",
+  "written",
+];
