@@ -1,5 +1,6 @@
 import { DataTypes, Model, type CreationOptional, type InferAttributes, type InferCreationAttributes } from "sequelize";
-import type { FrontMatter, ModuleTree } from "@/lib/mdx/module";
+import type { FrontMatter } from "@/lib/mdx/frontMatter";
+import type { ModuleTree } from "@/lib/mdx/moduleTree";
 import type { CheckPlan } from "@/lib/checks/kind";
 import { db } from "@/lib/db";
 

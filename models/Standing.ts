@@ -1,8 +1,6 @@
 import { DataTypes, Model, type CreationOptional, type InferAttributes, type InferCreationAttributes } from "sequelize";
 import { db } from "@/lib/db";
-
-/** Stored standing; expired and not yet valid follow from the certificate's days. */
-export type StandingWord = "valid" | "suspended" | "withdrawn" | "superseded";
+import type { StandingWord } from "@/lib/policies/standing";
 
 export class Standing extends Model<InferAttributes<Standing>, InferCreationAttributes<Standing>> {
   declare id: CreationOptional<string>;

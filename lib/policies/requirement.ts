@@ -1,5 +1,5 @@
 /** What a release asks for: all of these checks, and at least so many of those. */
-export type Requirement = { all: readonly string[]; some?: { of: readonly string[]; count: number } };
+export type Requirement = { all: readonly string[]; some?: { of: readonly string[]; count: number } | null };
 
 export function requirementMet(require: Requirement, metCheckIds: ReadonlySet<string>): boolean {
   const all = require.all.every((id) => metCheckIds.has(id));
