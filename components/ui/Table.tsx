@@ -1,0 +1,139 @@
+import Link from "next/link";
+import type { ReactNode } from "react";
+import { classNames } from "./classNames";
+
+type TableProps = {
+  caption: string;
+  showCaption?: boolean;
+  children: ReactNode;
+  fixedFirst?: boolean;
+  className?: string;
+};
+
+/** Words left, figures right, unit in the head or the cell but never in both. Scrolls in its own region when it must. */
+export function Table({ caption, showCaption, fixedFirst, children, className }: TableProps) {
+  return (
+    <div
+      className={classNames("table-region", className)}
+      data-first={fixedFirst ? "fixed" : undefined}
+      tabIndex={fixedFirst ? 0 : undefined}
+      role={fixedFirst ? "region" : undefined}
+      aria-label={fixedFirst ? caption : undefined}
+    >
+      <table className="table">
+        <caption className={showCaption ? "pb-2 text-left text-label" : "sr-only"}>{caption}</caption>
+        {children}
+      </table>
+    </div>
+  );
+}
+
+/** Head cell. With `sort` it is a link to the same page in another order. */
+export function Th({
+  figure,
+  sort,
+  children,
+  className,
+}: {
+  figure?: boolean;
+  sort?: Sort;
+  children?: ReactNode;
+  className?: string;
+}) {
+  const order = sort?.order === "up" ? "ascending" : sort?.order === "down" ? "descending" : "none";
+  return (
+    <th scope="col" className={classNames(figure && "figure", className)} aria-sort={sort ? order : undefined}>
+      {sort ? (
+        <Link
+          href={sort.href}
+          className="inline-flex min-h-[28px] items-center gap-1.5 underline-offset-4 hover:underline"
+        >
+          {sort.order && <span aria-hidden>{sort.order === "up" ? "▲" : "▼"}</span>}
+          {children}
+        </Link>
+      ) : (
+        children
+      )}
+    </th>
+  );
+}
+
+export type Sort = { href: string; order: "up" | "down" | null };
+
+/** Row; a wash marks the whole row, and a row with a reason under it is joined to it. */
+export function Tr({
+  wash,
+  joined,
+  children,
+}: {
+  wash?: "plus" | "minus" | "caution" | null;
+  joined?: boolean;
+  children: ReactNode;
+}) {
+  return (
+    <tr data-wash={wash ?? undefined} data-joined={joined || undefined}>
+      {children}
+    </tr>
+  );
+}
+
+/** First cell of a row, which names it. */
+export function RowHead({ children, className }: { children: ReactNode; className?: string }) {
+  return (
+    <th scope="row" className={className}>
+      {children}
+    </th>
+  );
+}
+
+export function Td({
+  figure,
+  colSpan,
+  children,
+  className,
+}: {
+  figure?: boolean;
+  colSpan?: number;
+  children?: ReactNode;
+  className?: string;
+}) {
+  return (
+    <td colSpan={colSpan} className={classNames(figure && "figure", className)}>
+      {children}
+    </td>
+  );
+}
+
+/** The reason of the row above, in the same wash. `skip` leaves that many cells free at the left. */
+export function ReasonRow({
+  columns,
+  skip = 0,
+  wash,
+  children,
+}: {
+  columns: number;
+  skip?: number;
+  wash?: "plus" | "minus" | "caution";
+  children: ReactNode;
+}) {
+  return (
+    <tr className="reason" data-wash={wash}>
+      {skip > 0 && <td colSpan={skip} />}
+      <td colSpan={columns - skip} className={wash === "minus" ? "text-minus-deep" : "text-ink-2"}>
+        <strong className="mr-2 font-semibold">Reason</strong>
+        {children}
+      </td>
+    </tr>
+  );
+}
+
+/** A group begins with an ink line and a plate name. */
+export function GroupRow({ columns, children }: { columns: number; children: ReactNode }) {
+  return (
+    <tr className="group">
+      <th scope="rowgroup" colSpan={columns} className="plate text-h3">
+        {children}
+      </th>
+    </tr>
+  );
+}
