@@ -42,9 +42,11 @@ GRANT UPDATE (outcome) ON stripe_events TO lagmark_web;
 -- Paid is paid: neither an order nor a fee goes back to open, whoever asks.
 CREATE FUNCTION refuse_unpaying() RETURNS trigger LANGUAGE plpgsql AS $$
 BEGIN
-  IF TG_TABLE_NAME = 'orders' AND OLD.paid_at IS NOT NULL AND NEW.paid_at IS DISTINCT FROM OLD.paid_at
-    THEN RAISE EXCEPTION 'order % is paid', OLD.id; END IF;
-  IF TG_TABLE_NAME = 'fees' AND OLD.settled_at IS NOT NULL
+  -- A column is named only where the row has it: PL/pgSQL looks up all names of an expression.
+  IF TG_TABLE_NAME = 'orders' THEN
+    IF OLD.paid_at IS NOT NULL AND NEW.paid_at IS DISTINCT FROM OLD.paid_at
+      THEN RAISE EXCEPTION 'order % is paid', OLD.id; END IF;
+  ELSIF OLD.settled_at IS NOT NULL
     THEN RAISE EXCEPTION 'fee % is settled', OLD.id; END IF;
   RETURN NEW;
 END $$;
