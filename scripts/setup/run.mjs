@@ -13,7 +13,9 @@ const KEPT_CHARACTERS = 200_000;
 export function run(command, args, { env = process.env, cwd, log, input } = {}) {
   return new Promise((resolve, reject) => {
     const child = spawn(command, args, { env, cwd, stdio: [input === undefined ? "ignore" : "pipe", "pipe", "pipe"] });
-    const forget = onStop(() => child.kill());
+    const closed = new Promise((done) => child.once("close", done));
+    // Waits: what is undone after this would otherwise race with the last writes of the command.
+    const forget = onStop(() => child.kill() && closed);
     if (log) fs.mkdirSync(path.dirname(log), { recursive: true });
     const file = log ? fs.openSync(log, "w", 0o600) : null;
     let output = "";
