@@ -24,7 +24,7 @@ export const select = <Row extends object>(
 
 // Each process is given the address of its own role only; the worker's is the one that may read seeds.
 function readAddress(config: object): void {
-  const address = process.env.WORKER_DATABASE_URL ?? process.env.DATABASE_URL;
+  const address = process.env.WORKER_DATABASE_URL || process.env.DATABASE_URL;
   if (!address) throw new Error("DATABASE_URL (or WORKER_DATABASE_URL in a worker) is not set");
   const url = new URL(address);
   Object.assign(config, {

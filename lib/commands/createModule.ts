@@ -16,8 +16,8 @@ export const createModule = (actor: Actor, { code, title }: { code: string; titl
       const rule = `Your firm has a module ${code} already.`;
       throw new InvalidError(rule, { code: [rule] });
     }
-    const module = await Module.create({ ...where, createdBy: actor.personId }, { transaction });
+    const created = await Module.create({ ...where, createdBy: actor.personId }, { transaction });
     const source = startingSource(code, title);
-    await Draft.create({ moduleId: module.id, title, source, savedBy: actor.personId }, { transaction });
-    return { id: module.id };
+    await Draft.create({ moduleId: created.id, title, source, savedBy: actor.personId }, { transaction });
+    return { id: created.id };
   });

@@ -11,8 +11,9 @@ import type { Actor } from "@/lib/policies/actor";
 import { authorize } from "@/lib/policies/authorize";
 import { can } from "@/lib/policies/can";
 import { decidability, type DecidableCase } from "@/lib/policies/decidability";
-import { barsToDeciding, type SeparationFacts } from "@/lib/policies/separation";
-import { Assignment, Decision, Employer, Person, Release, type Sitting } from "@/models";
+import { barsToDeciding } from "@/lib/policies/separation";
+import { separationFacts } from "@/lib/queries/separationFacts";
+import { Decision, Employer, Person, Release, type Sitting } from "@/models";
 import type { Evidence, Outcome } from "@/models/Decision";
 import { lockOwnSitting } from "./lockOwn";
 import { transact } from "./transact";
@@ -60,24 +61,6 @@ export const decide = (actor: Actor, { sittingId, outcome, reason, declaration }
     return { id: decision.id };
   });
 
-export async function separationFacts(
-  actor: Pick<Actor, "personId">,
-  sitting: Sitting,
-  today: string,
-  transaction?: Transaction,
-): Promise<SeparationFacts> {
-  const { releaseId, technicianId } = sitting;
-  const assignment = await Assignment.findByPk(sitting.assignmentId, { transaction, rejectOnEmpty: true });
-  return {
-    deciderId: actor.personId,
-    technicianId,
-    assignedById: assignment.assignedBy,
-    releaseHands: await select(HANDS, { releaseId }, transaction),
-    trainings: await select(TRAININGS, { technicianId }, transaction),
-    today,
-  };
-}
-
 async function tellTechnician(
   sitting: Sitting,
   employer: Employer,
@@ -96,8 +79,6 @@ async function tellTechnician(
   );
 }
 
-const HANDS = `SELECT person_id AS "personId", part FROM release_writers WHERE release_id = :releaseId`;
-const TRAININGS = `SELECT trainer_id AS "trainerId", ended_on::text AS "endedOn" FROM trainings WHERE technician_id = :technicianId`;
 const CASES = `SELECT check_id AS "checkId", state, met FROM case_states WHERE sitting_id = :sittingId`;
 const EVIDENCE = `
   SELECT s.check_id AS "checkId", s.id AS "caseId", m.id AS "markingRecordId", m.met, row_sha256(to_jsonb(m)) AS sha256

@@ -15,11 +15,11 @@ export function requireId(id: string, what: string): void {
 export async function lockOwnModule(actor: Actor, id: string, transaction: Transaction) {
   requireId(id, "module");
   const where = { id, employerId: actor.employerId };
-  const module = await Module.findOne({ where, transaction });
-  if (!module) throw new NotFoundError("module");
+  const found = await Module.findOne({ where, transaction });
+  if (!found) throw new NotFoundError("module");
   const draft = await Draft.findByPk(id, { transaction, lock: transaction.LOCK.UPDATE });
   if (!draft) throw new NotFoundError("module");
-  return { module, draft };
+  return { module: found, draft };
 }
 
 export async function findOwnRelease(actor: Actor, id: string, transaction: Transaction): Promise<Release> {
