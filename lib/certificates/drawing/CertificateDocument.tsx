@@ -1,0 +1,63 @@
+import { Document, Page, View } from "@react-pdf/renderer";
+import type { CertificateRecord } from "../record";
+import { TEXT_FACES } from "../pdfFonts";
+import { Cautions } from "./Cautions";
+import { Competence } from "./Competence";
+import { Facts } from "./Facts";
+import { Foot, FOOT_HEIGHT } from "./Foot";
+import { Head } from "./Head";
+import { Holder } from "./Holder";
+import { INK, PAGE, type Density } from "./page";
+import { Particulars } from "./Particulars";
+import { Quantities } from "./Quantities";
+import { SignaturePanel } from "./SignaturePanel";
+import { StripAndCode } from "./StripAndCode";
+
+export type CertificateFace = { record: CertificateRecord; fingerprint: string; verifyAddress: string };
+
+/** The certificate as one A4 page; set too loosely it flows on to a second, which the caller looks for. */
+export function CertificateDocument({ face, density }: { face: CertificateFace; density: Density }) {
+  const { record, fingerprint } = face;
+  const parts = [
+    <Head key="head" record={record} />,
+    <Holder key="holder" name={record.holder.name} density={density} />,
+    <Competence key="competence" record={record} density={density} />,
+    <Facts key="facts" record={record} density={density} />,
+    <Particulars key="particulars" record={record} density={density} />,
+    <Quantities key="quantities" quantities={record.quantities} density={density} />,
+    <StripAndCode key="strip" face={face} density={density} />,
+    <Cautions key="cautions" cautions={record.cautions} density={density} />,
+    <SignaturePanel key="panel" face={face} density={density} />,
+  ];
+  // Dates come from the record: the same record gives the same bytes.
+  const at = new Date(record.decided.at);
+  return (
+    <Document
+      language="en"
+      pdfVersion="1.7"
+      creationDate={at}
+      modificationDate={at}
+      producer="Lagmark"
+      creator="Lagmark"
+    >
+      <Page size="A4" style={page}>
+        {parts.map((part) => (
+          <View key={part.key} wrap={false} style={{ flexShrink: 0, marginBottom: density.gap }}>
+            {part}
+          </View>
+        ))}
+        <Foot fingerprint={fingerprint} />
+      </Page>
+    </Document>
+  );
+}
+
+const page = {
+  paddingTop: PAGE.head,
+  paddingHorizontal: PAGE.side,
+  paddingBottom: PAGE.foot + FOOT_HEIGHT,
+  justifyContent: "space-between",
+  fontFamily: TEXT_FACES,
+  fontSize: 10,
+  color: INK.ink,
+} as const;
