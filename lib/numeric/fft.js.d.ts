@@ -3,7 +3,7 @@ declare module "fft.js" {
   export default class FFT {
     constructor(size: number);
     readonly size: number;
-    /** Twiddle factors exp(-2 pi i n / (2 size)), n from 0 to size - 1. */
+    /** Twiddle factors exp(-2 pi i n / size), n from 0 to size - 1. */
     table: ArrayLike<number>;
     createComplexArray(): number[];
     transform(out: Float64Array | number[], data: ArrayLike<number>): void;

@@ -24,8 +24,8 @@ export function createFft(size: number): Fft {
   const fft = new FFT(size);
   const table = new Float64Array(2 * size);
   for (let n = 0; n < size; n++) {
-    table[2 * n] = cosTurns(n / (2 * size));
-    table[2 * n + 1] = -sinTurns(n / (2 * size));
+    table[2 * n] = cosTurns(n / size);
+    table[2 * n + 1] = -sinTurns(n / size);
   }
   fft.table = table;
   made.set(size, fft);
