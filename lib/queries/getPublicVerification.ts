@@ -20,9 +20,23 @@ type Row = {
 };
 
 /** What anybody with the full number may know: no values, no gauges, no reasons of a decision. */
-export type PublicVerification = {
-  number: string;
-  record: CertificateRecord;
+export type PublicVerification = Pick<
+  CertificateRecord,
+  | "number"
+  | "scheme"
+  | "scope"
+  | "limits"
+  | "supervision"
+  | "identity"
+  | "release"
+  | "quantities"
+  | "cautions"
+  | "demonstration"
+> & {
+  holder: string;
+  issuer: { name: string; standing: string; accreditation: string | null };
+  /** A decider's part and place, not the name. */
+  decided: { outsideLine: boolean; at: string };
   fingerprint: string;
   pdfSha256: string;
   effectiveOn: string;
@@ -41,9 +55,21 @@ export async function getPublicVerification(number: string, now = new Date()): P
   const [row] = await select<Row>(SQL, { number });
   if (!row) return null;
   const today = dayIn(row.timeZone, now);
+  const { record } = row;
   return {
     number: row.number,
-    record: row.record,
+    holder: record.holder.name,
+    issuer: { name: record.issuer.name, standing: record.issuer.standing, accreditation: record.issuer.accreditation },
+    scheme: record.scheme,
+    scope: record.scope,
+    limits: record.limits,
+    supervision: record.supervision,
+    identity: record.identity,
+    release: record.release,
+    decided: { outsideLine: record.decided.outsideLine, at: record.decided.at },
+    quantities: record.quantities,
+    cautions: record.cautions,
+    demonstration: record.demonstration,
     fingerprint: row.fingerprint,
     pdfSha256: row.pdfSha256,
     effectiveOn: row.effectiveOn,
