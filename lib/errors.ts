@@ -46,3 +46,14 @@ export class SignInAfreshError extends ForbiddenError {
     super("Sign in afresh to sign this: enter your password again.");
   }
 }
+
+/** Asked too often; the same request is welcome after the wait. */
+export class ThrottledError extends AppError {
+  override name = "ThrottledError";
+  override readonly status = 429;
+  constructor(readonly waitSeconds: number) {
+    super(
+      `Too many tries. Wait ${waitSeconds < 60 ? `${waitSeconds} s` : `${Math.ceil(waitSeconds / 60)} min`}, then try again.`,
+    );
+  }
+}
