@@ -1,10 +1,12 @@
+import type { Expression, Program } from "acorn";
+
 /**
  * Stands where the parser expects a JavaScript parser. Nothing in a module is JavaScript: all the parser has to know is where
  * a brace closes, and a fault inside must not hide the faults after it. The values are read later, see literal.ts.
  */
 export const braces = {
   parse: (source: string) => program(source),
-  parseExpressionAt(source: string) {
+  parseExpressionAt(source: string): Expression {
     // The parser wraps `{...spread}` so that it is an object.
     const inner = source.startsWith("({") && source.endsWith("})") ? source.slice(2, -2) : source;
     if (!closed(inner)) {
@@ -15,13 +17,12 @@ export const braces = {
   },
 };
 
-const program = (source: string) => ({
+const program = (source: string): Program => ({
   type: "Program",
   start: 0,
   end: source.length,
   body: [],
   sourceType: "module",
-  comments: [],
 });
 
 /** Whether the next closing brace ends the value: quoted text and comments are passed over. */

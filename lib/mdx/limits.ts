@@ -8,7 +8,6 @@ export const LIMITS = {
   addressCharacters: 500,
   frontMatterCharacters: 8000,
   checks: 12,
-  problems: 200,
   /** Characters of the tree as JSON: reference links and formulas make more of it than was written. */
   treeCharacters: 4_000_000,
   /** Longest reading before its thread is ended; a lawful module of full size takes about a second. */

@@ -38,3 +38,6 @@ export const warningAt = (at: Place | Range, rule: string, message: string): Pro
 
 export const inOrder = (problems: readonly Problem[]): Problem[] =>
   [...problems].sort((a, b) => a.line - b.line || a.column - b.column);
+
+/** A hostile text must not become a list that no browser can show. */
+export const LISTED_PROBLEMS = 200;

@@ -1,0 +1,80 @@
+import type { CheckKind, CheckPlan } from "@/lib/checks/kind";
+import { LIMITS } from "@/lib/mdx/limits";
+import { planParameters } from "@/lib/mdx/planParameters";
+import { planQuantities } from "@/lib/mdx/planQuantities";
+import { problemAt, type Problem } from "@/lib/mdx/problem";
+import { LATER_KINDS, TAGS } from "@/lib/mdx/tags";
+import { plainAttribute, rangeOfAttribute, type WrittenCheck } from "@/lib/mdx/writtenTag";
+
+export type PlanReading = { plans: CheckPlan[]; problems: Problem[] };
+
+/** The checks of a module as a release stores them: every parameter and quantity filled in, with the version of its kind. */
+export function planChecks(written: readonly WrittenCheck[], kinds: readonly CheckKind[]): PlanReading {
+  const problems: Problem[] = [];
+  const plans: CheckPlan[] = [];
+  const ids = new Set<string>();
+  for (const check of written) {
+    const id = plainAttribute(check, "Check", "id");
+    if (typeof id === "string" && ids.has(id)) {
+      problems.push(
+        problemAt(rangeOfAttribute(check, "id"), "check", `Two checks are named "${id}". Give this one another id.`),
+      );
+    }
+    if (typeof id === "string") ids.add(id);
+    const read = planCheck(check, kinds);
+    problems.push(...read.problems);
+    plans.push(...read.plans);
+  }
+  const surplus = written[LIMITS.checks];
+  if (surplus)
+    problems.push(
+      problemAt(
+        surplus.range,
+        "check",
+        `A module has at most ${LIMITS.checks} checks. Move the rest to another module.`,
+      ),
+    );
+  return { plans, problems };
+}
+
+function planCheck(check: WrittenCheck, kinds: readonly CheckKind[]): PlanReading {
+  const kindId = plainAttribute(check, "Check", "kind");
+  if (typeof kindId !== "string") return { plans: [], problems: [] };
+  const kind = kinds.find((one) => one.id === kindId);
+  if (!kind)
+    return { plans: [], problems: [problemAt(rangeOfAttribute(check, "kind"), "check", kindFault(kindId, kinds))] };
+
+  const own = new Set<string>(TAGS.Check.attributes.map(({ name }) => name));
+  const parameters = planParameters(
+    kind,
+    check.attributes.filter(({ name }) => !own.has(name)),
+  );
+  const quantities = planQuantities(kind, check);
+  const problems = [...parameters.problems, ...quantities.problems];
+  const needs = plainAttribute(check, "Check", "needs");
+  const count = quantities.quantities.length;
+  if (typeof needs === "number" && needs > count) {
+    const message = `This check has ${count} ${count === 1 ? "quantity" : "quantities"}, so needs={${needs}} could never be met. Write ${count} or fewer.`;
+    problems.push(problemAt(rangeOfAttribute(check, "needs"), "check", message));
+  }
+  const id = plainAttribute(check, "Check", "id");
+  const minutes = plainAttribute(check, "Check", "minutes");
+  if (typeof id !== "string") return { plans: [], problems };
+  const plan: CheckPlan = {
+    id,
+    kind: kind.id,
+    version: kind.version,
+    title: kind.title,
+    minutes: typeof minutes === "number" ? minutes : kind.defaultMinutes,
+    needs: typeof needs === "number" ? needs : null,
+    parameters: parameters.values,
+    quantities: quantities.quantities,
+  };
+  return { plans: [plan], problems };
+}
+
+function kindFault(id: string, kinds: readonly CheckKind[]): string {
+  const known = `Kinds are ${kinds.map((kind) => kind.id).join(", ")}.`;
+  if (LATER_KINDS.includes(id)) return `Checks of kind "${id}" are not available in this release. ${known}`;
+  return `"${id}" is not a kind of check. ${known}`;
+}
