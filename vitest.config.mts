@@ -15,14 +15,30 @@ export default defineConfig({
   test: {
     projects: [
       // No database, no network.
-      project("unit", ["numeric", "gnss", "formats", "checks", "policies", "mdx", "certificates", "schemas", "lib", "components"]),
+      project("unit", [
+        "numeric",
+        "gnss",
+        "formats",
+        "checks",
+        "policies",
+        "mdx",
+        "certificates",
+        "schemas",
+        "lib",
+        "scripts",
+        "components",
+      ]),
       { resolve: { alias }, test: { name: "rules", include: ["tests/*.test.ts"] } },
       // Real PostgreSQL: OWNER_DATABASE_URL, DATABASE_URL and WORKER_DATABASE_URL come from scripts/test.mjs.
-      project("database", ["migrations", "models", "commands", "queries", "jobs", "payments", "auth", "routes", "worker"], {
-        fileParallelism: false,
-        setupFiles: ["tests/support/database.ts"],
-        testTimeout: 30_000,
-      }),
+      project(
+        "database",
+        ["migrations", "models", "commands", "queries", "jobs", "payments", "auth", "routes", "worker"],
+        {
+          fileParallelism: false,
+          setupFiles: ["tests/support/database.ts"],
+          testTimeout: 30_000,
+        },
+      ),
       // A built application, driven by Chromium: BASE_URL comes from scripts/test.mjs.
       project("browser", ["entrances", "e2e"], { fileParallelism: false, testTimeout: 240_000, hookTimeout: 120_000 }),
     ],

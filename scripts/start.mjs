@@ -45,7 +45,7 @@ async function start() {
   say("Preparing the database ...");
   await prepareDatabase(root, env);
 
-  const processes = new Processes(root, logs, note, developing);
+  const processes = new Processes(root, logs, note, { echo: developing });
   if (demonstrating) {
     await demonstration.makeIssuerKey(root, settings);
     const mark = path.join(home, "pg", "demo-seeded");

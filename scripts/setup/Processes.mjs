@@ -16,14 +16,19 @@ export class Processes {
   #logs;
   #note;
   #echo;
+  #onEnd;
 
-  /** @param note is told each process number; @param echo true repeats every log line on the terminal */
-  constructor(root, logs, note, echo = false) {
-    [this.#root, this.#logs, this.#note, this.#echo] = [root, logs, note, echo];
+  /**
+   * @param note is told each process number
+   * @param echo true repeats every log line on the terminal
+   * @param onEnd is called with the reason when a process ends that should not
+   */
+  constructor(root, logs, note, { echo = false, onEnd = stopEverything } = {}) {
+    [this.#root, this.#logs, this.#note, this.#echo, this.#onEnd] = [root, logs, note, echo, onEnd];
     fs.mkdirSync(logs, { recursive: true, mode: 0o700 });
   }
 
-  /** @param again true: when it ends by itself it is started again; else its end stops everything */
+  /** @param again true: when it ends by itself it is started again */
   start(name, args, env, { again = false } = {}) {
     const log = path.join(this.#logs, `${name}.log`);
     const running = { child: null, crashes: 0 };
@@ -39,10 +44,7 @@ export class Processes {
         fs.closeSync(file);
         if (isStopping()) return;
         const how = `${name} ended (${signal ?? `exit ${code}`}); its log: ${path.relative(this.#root, log)}`;
-        if (!again) {
-          say(`${how}\n${lastLines(fs.readFileSync(log, "utf8"), 30)}`);
-          return void stop(1);
-        }
+        if (!again) return this.#onEnd(`${how}\n${lastLines(fs.readFileSync(log, "utf8"), 30)}`);
         running.crashes = Date.now() - started > 60_000 ? 1 : running.crashes + 1;
         const pauseS = Math.min(2 ** (running.crashes - 1), LONGEST_PAUSE_S);
         say(`${how}. Starting it again in ${pauseS} s.`);
@@ -53,6 +55,11 @@ export class Processes {
     launch();
     onStop(() => end(running.child));
   }
+}
+
+function stopEverything(reason) {
+  say(reason);
+  void stop(1);
 }
 
 async function end(child) {

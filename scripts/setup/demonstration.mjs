@@ -63,7 +63,9 @@ export async function makeIssuerKey(root, settings) {
   if (fs.existsSync(settings.ISSUER_KEY_FILE)) return;
   say("Making a local issuer key ...");
   const folder = path.dirname(settings.ISSUER_KEY_FILE);
-  await mustRun("The issuer key", "node", [...TYPESCRIPT, "scripts/make-issuer-key.ts", folder], { cwd: root });
+  await mustRun("The issuer key", "node", [...TYPESCRIPT, "scripts/make-issuer-key.ts", folder, "--demonstration"], {
+    cwd: root,
+  });
 }
 
 /** Fills an empty database with the demo firm, once in the life of the database. */

@@ -22,6 +22,9 @@ export function keptPorts(folder) {
   const file = path.join(folder, "ports.json");
   return {
     read: () => (fs.existsSync(file) ? JSON.parse(fs.readFileSync(file, "utf8")) : {}),
-    write: (ports) => fs.writeFileSync(file, JSON.stringify(ports)),
+    write: (ports) => {
+      fs.mkdirSync(folder, { recursive: true });
+      fs.writeFileSync(file, JSON.stringify(ports));
+    },
   };
 }

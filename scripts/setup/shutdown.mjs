@@ -12,9 +12,12 @@ export function onStop(task) {
 
 export const isStopping = () => stopping !== null;
 
-/** Undoes everything, latest first, and ends the process. Repeated calls wait for the first. */
-export function stop(code) {
-  stopping ??= undoAll().then(() => process.exit(code));
+/** Undoes everything, latest first, says the last words and ends the process. Repeated calls wait for the first. */
+export function stop(code, lastWords) {
+  stopping ??= undoAll().then(() => {
+    if (lastWords) say(lastWords);
+    process.exit(code);
+  });
   return stopping;
 }
 
