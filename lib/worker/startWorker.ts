@@ -1,0 +1,81 @@
+import "server-only";
+import { availableParallelism } from "node:os";
+import PgBoss from "pg-boss";
+import { reportFaults } from "@/lib/commands/reportFaults";
+import { sealTrail, SEAL_BATCH } from "@/lib/commands/sealTrail";
+import { db } from "@/lib/db";
+import type { workerEnv } from "@/lib/env";
+import { JOBS_SCHEMA } from "@/lib/jobs/jobs";
+import { log } from "@/lib/log";
+import { storage } from "@/lib/storage/storage";
+import { mailDelivery } from "./deliverMail";
+import { EngineThreads } from "./EngineThreads";
+import { Lane } from "./Lane";
+import { readIssuer } from "./readIssuer";
+import { repeat } from "./repeat";
+import { workerTasks } from "./tasks";
+
+/** Two compute side by side at most: the machine also serves pages, and more workers can run elsewhere. */
+const ENGINE_THREADS = Math.min(2, availableParallelism());
+const SEAL_EVERY_MS = 2000;
+const FAULTS_EVERY_MS = 5000;
+/** Less than the ten seconds after which whoever stops a process kills it (common practice, no source). */
+const GRACE_MS = 6000;
+
+/** One worker process; any number of them may run, on any number of machines. */
+export async function startWorker(env: ReturnType<typeof workerEnv>): Promise<{ stop(): Promise<void> }> {
+  const issuer = readIssuer(env);
+  const threads = new EngineThreads();
+  threads.warm(ENGINE_THREADS);
+  const mail = mailDelivery(env);
+  const queue = await openQueue(env.WORKER_DATABASE_URL);
+  const tasks = workerTasks({
+    ...{ ...issuer, threads, storage: storage(), seedKey: env.SEED_KEY, deliver: mail.deliver },
+    ...{ publicOrigin: env.PUBLIC_ORIGIN, demonstration: env.DEMONSTRATION === "1" },
+  });
+  const lanes = [
+    new Lane(queue, tasks, ["mark-case", "build-case"], ENGINE_THREADS),
+    new Lane(queue, tasks, ["close-case"], 2),
+    new Lane(queue, tasks, ["issue-certificate"], 1),
+    new Lane(queue, tasks, ["send-mail"], 4),
+  ];
+  for (const lane of lanes) lane.start();
+  const repeated = [
+    repeat("seal the trail", SEAL_EVERY_MS, () => sealAll(issuer.issuerKey.keyPem)),
+    repeat("report faults", FAULTS_EVERY_MS, reportFaults),
+  ];
+  log.info({ threads: ENGINE_THREADS }, "worker ready");
+  return {
+    async stop() {
+      await Promise.all([...lanes.map((lane) => lane.stop(GRACE_MS)), ...repeated.map((one) => one.stop())]);
+      mail.close();
+      await threads.stop();
+      await queue.stop({ graceful: false });
+      await db.close();
+      log.info("worker stopped");
+    },
+  };
+}
+
+async function openQueue(connectionString: string): Promise<PgBoss> {
+  const queue = new PgBoss({
+    connectionString,
+    schema: JOBS_SCHEMA,
+    application_name: "lagmark worker",
+    max: 4,
+    // The owner makes the queue's tables; the worker's role could not.
+    migrate: false,
+    schedule: false,
+    // How soon a killed worker's job is seen to be over its time.
+    maintenanceIntervalSeconds: 5,
+    archiveCompletedAfterSeconds: 3600,
+    archiveFailedAfterSeconds: 14 * 86_400,
+    deleteAfterDays: 30,
+  });
+  queue.on("error", (error) => log.error({ error }, "queue"));
+  return queue.start();
+}
+
+async function sealAll(issuerKeyPem: string): Promise<void> {
+  while ((await sealTrail(issuerKeyPem)) === SEAL_BATCH);
+}
