@@ -22,7 +22,7 @@ export const select = <Row extends object>(
   transaction?: Transaction,
 ): Promise<Row[]> => db.query<Row>(sql, { replacements, transaction, type: QueryTypes.SELECT });
 
-// Each process is given the address of its own role only; the worker's is the one that may read seeds.
+// Each process is given the address of its own role only, the others empty; the worker's is the one that may read seeds.
 function readAddress(config: object): void {
   const address = process.env.WORKER_DATABASE_URL || process.env.DATABASE_URL;
   if (!address) throw new Error("DATABASE_URL (or WORKER_DATABASE_URL in a worker) is not set");
