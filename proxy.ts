@@ -8,6 +8,8 @@ export function proxy(request: NextRequest) {
   // Next reads the policy of the request to put the nonce on its own scripts.
   headers.set("x-nonce", nonce);
   headers.set("content-security-policy", policy);
+  // Pages cannot see their own address; the sign-in page is told where to come back to.
+  headers.set("x-page", request.nextUrl.pathname + request.nextUrl.search);
   const response = NextResponse.next({ request: { headers } });
   response.headers.set("content-security-policy", policy);
   response.headers.set("referrer-policy", "same-origin");

@@ -1,0 +1,14 @@
+import "server-only";
+import { webEnv } from "@/lib/env";
+
+/** Twelve hours: a working day. The row in `sessions` ends with it. */
+export const SESSION_SECONDS = 12 * 3600;
+
+export const isSecure = (): boolean => webEnv().PUBLIC_ORIGIN.startsWith("https:");
+
+/** Never readable by a script; sent along when a link from a mail is followed, not with another site's posts. */
+export const sessionCookie = () => ({
+  // Browsers accept the prefix only with Secure, Path=/ and no domain, so that no other host can plant the cookie.
+  name: isSecure() ? "__Host-lagmark-session" : "lagmark-session",
+  options: { httpOnly: true, sameSite: "lax", path: "/", secure: isSecure() } as const,
+});
