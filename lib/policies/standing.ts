@@ -25,3 +25,15 @@ export function shownStanding(
   if (stored === "suspended") return "Suspended";
   return today < effectiveOn ? "Not yet valid" : "Valid";
 }
+
+/** Grounds a decider may name; the public page shows the ground and never the reason. */
+export const GROUNDS = [
+  "Evidence not the holder's own",
+  "A check of the release was found wrong",
+  "Work outside the scope",
+  "Misleading use of the certificate",
+  "Competence in doubt",
+  "At the holder's request",
+  "Issued in error",
+  "Doubt removed",
+] as const;

@@ -3,6 +3,7 @@ import type { CertificateRecord } from "@/lib/certificates/record";
 import { dayIn } from "@/lib/calendar";
 import { select } from "@/lib/db";
 import type { Actor } from "@/lib/policies/actor";
+import { authorize } from "@/lib/policies/authorize";
 import { can } from "@/lib/policies/can";
 import { shownStanding, type ShownStanding, type StandingWord } from "@/lib/policies/standing";
 import { iso } from "./findOwn";
@@ -22,7 +23,7 @@ type Row = {
 };
 type StandingRow = { standing: StandingWord; ground: string; reason: string; setBy: string; setAt: Date };
 
-export type CertificateView = Omit<Row, "employerId" | "holderId" | "issuedAt" | "timeZone"> & {
+export type CertificateView = Omit<Row, "holderId" | "issuedAt" | "timeZone"> & {
   issuedAt: string;
   shown: ShownStanding;
   stored: StandingWord;
@@ -36,7 +37,7 @@ export async function getCertificate(actor: Actor, number: string, now = new Dat
   const [row] = await select<Row>(SQL, { number });
   if (!row || !can.readCertificate(actor, row)) return null;
   const history = await select<StandingRow>(HISTORY, { number });
-  const { employerId, holderId, timeZone, ...view } = row;
+  const { holderId, timeZone, ...view } = row;
   const stored = history.at(-1)!.standing;
   return {
     ...view,
@@ -45,8 +46,15 @@ export async function getCertificate(actor: Actor, number: string, now = new Dat
     stored,
     history: history.map((one) => ({ ...one, setAt: iso(one.setAt) })),
     isMine: holderId === actor.personId,
-    maySetStanding: can.setStanding(actor, { employerId }),
+    maySetStanding: can.setStanding(actor, row),
   };
+}
+
+/** The same for the people who keep the issuer's register. */
+export async function getRegisterEntry(actor: Actor, number: string): Promise<CertificateView | null> {
+  authorize(can.readQueue(actor, actor), "read the register");
+  const certificate = await getCertificate(actor, number);
+  return certificate?.employerId === actor.employerId ? certificate : null;
 }
 
 type PdfRow = { pdf: Buffer; employerId: string; holderId: string };

@@ -3,6 +3,8 @@ import { dayIn } from "@/lib/calendar";
 import { select } from "@/lib/db";
 import { ForbiddenError } from "@/lib/errors";
 import type { Actor } from "@/lib/policies/actor";
+import { authorize } from "@/lib/policies/authorize";
+import { can } from "@/lib/policies/can";
 import { shownStanding, type ShownStanding, type StandingWord } from "@/lib/policies/standing";
 
 type Row = {
@@ -24,9 +26,15 @@ export const listOwnCertificates = (actor: Pick<Actor, "personId">, now = new Da
   list("c.holder_id = :id", actor.personId, now);
 
 /** All that the employer has issued. */
-export function listCertificates(actor: Actor, now = new Date()): Promise<CertificateRow[]> {
+export async function listCertificates(actor: Actor, now = new Date()): Promise<CertificateRow[]> {
   if (!actor.roles.some((role) => role !== "technician"))
     throw new ForbiddenError("You may not read the firm's certificates.");
+  return list("c.employer_id = :id", actor.employerId, now);
+}
+
+/** The same for the people who keep the register. */
+export async function listRegister(actor: Actor, now = new Date()): Promise<CertificateRow[]> {
+  authorize(can.readQueue(actor, actor), "read the register");
   return list("c.employer_id = :id", actor.employerId, now);
 }
 

@@ -29,7 +29,7 @@ export const listOwnSittings = (actor: Actor): Promise<SittingRow[]> =>
   list(`a.technician_id = :personId AND a.employer_id = :employerId`, actor);
 
 /** All of the employer's, for the people who run them. */
-export function listSittings(actor: Actor): Promise<SittingRow[]> {
+export async function listSittings(actor: Actor): Promise<SittingRow[]> {
   if (!actor.roles.some((role) => role !== "technician"))
     throw new ForbiddenError("You may not read the firm's sittings.");
   return list(`a.employer_id = :employerId`, actor);

@@ -1,0 +1,71 @@
+import type { Metadata } from "next";
+import { Empty } from "@/components/ui/Empty";
+import { Glyph } from "@/components/ui/Glyph";
+import { LinkKey } from "@/components/ui/LinkKey";
+import { formatInstant } from "@/components/ui/formatDay";
+import { RowHead, Table, Td, Th, Tr } from "@/components/ui/Table";
+import { orNotFound } from "@/lib/auth/orNotFound";
+import { requireActor } from "@/lib/auth/requireActor";
+import { listQueue } from "@/lib/queries/listQueue";
+
+export const metadata: Metadata = { title: "Queue" };
+
+export default async function QueuePage({ params }: { params: Promise<{ employer: string }> }) {
+  const { employer } = await params;
+  const rows = await orNotFound(listQueue(await requireActor(employer)));
+  return (
+    <div className="page py-8 desk:py-10">
+      <h1 className="text-h1">Queue</h1>
+      <p className="mt-2 max-w-measure text-lead text-ink-2">
+        Sittings that wait for a decision, the longest wait first.
+      </p>
+      <div className="mt-6">
+        {rows.length === 0 ? (
+          <Empty title="No sitting waits">
+            A sitting comes here when every check of it has its marking record, or its last day has passed.
+          </Empty>
+        ) : (
+          <Table caption="Sittings for decision">
+            <thead>
+              <tr>
+                <Th>Sitting</Th>
+                <Th>Technician</Th>
+                <Th>Module</Th>
+                <Th figure>Checks met</Th>
+                <Th>Last marked</Th>
+                <Th>State</Th>
+                <Th />
+              </tr>
+            </thead>
+            <tbody>
+              {rows.map((row) => (
+                <Tr key={row.sittingId}>
+                  <RowHead>S-{row.number}</RowHead>
+                  <Td>{row.technician}</Td>
+                  <Td>
+                    {row.code} {row.title}
+                  </Td>
+                  <Td figure>
+                    {row.met} of {row.checks}
+                  </Td>
+                  <Td>{row.readyAt ? formatInstant(row.readyAt) : "–"}</Td>
+                  <Td>
+                    <span className="inline-flex items-center gap-2">
+                      <Glyph name="awaiting" /> For decision
+                      {row.questions > 0 && (row.questions === 1 ? ", 1 question" : `, ${row.questions} questions`)}
+                    </span>
+                  </Td>
+                  <Td>
+                    <LinkKey href={`/${employer}/queue/${row.sittingId}`} size="small">
+                      Open the evidence
+                    </LinkKey>
+                  </Td>
+                </Tr>
+              ))}
+            </tbody>
+          </Table>
+        )}
+      </div>
+    </div>
+  );
+}

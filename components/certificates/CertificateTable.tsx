@@ -1,0 +1,52 @@
+import { formatDay } from "@/components/ui/formatDay";
+import { LinkKey } from "@/components/ui/LinkKey";
+import { RowHead, Table, Td, Th, Tr } from "@/components/ui/Table";
+import type { CertificateRow } from "@/lib/queries/listCertificates";
+import { StandingGlyph } from "./StandingGlyph";
+
+type CertificateTableProps = {
+  rows: readonly CertificateRow[];
+  /** Address of one certificate is this and its number. */
+  base: string;
+  /** Left out of a person's own list, where it would be the same in every row. */
+  showHolder?: boolean;
+};
+
+export function CertificateTable({ rows, base, showHolder }: CertificateTableProps) {
+  return (
+    <Table caption="Certificates, newest first">
+      <thead>
+        <tr>
+          <Th>Number</Th>
+          {showHolder && <Th>Holder</Th>}
+          <Th>Competence</Th>
+          <Th>Issuer</Th>
+          <Th>Last day</Th>
+          <Th>Standing</Th>
+          <Th />
+        </tr>
+      </thead>
+      <tbody>
+        {rows.map((row) => (
+          <Tr key={row.number}>
+            <RowHead className="whitespace-nowrap font-code">{row.number}</RowHead>
+            {showHolder && <Td>{row.holder}</Td>}
+            <Td>
+              {row.code} {row.title}, release {row.release}
+            </Td>
+            <Td>{row.issuer}</Td>
+            <Td className="whitespace-nowrap">{formatDay(row.lastDay)}</Td>
+            <Td>
+              <StandingGlyph standing={row.standing} daysLeft={row.daysLeft} />
+            </Td>
+            <Td>
+              <LinkKey href={`${base}/${row.number}`} size="small">
+                Open
+              </LinkKey>
+            </Td>
+          </Tr>
+        ))}
+      </tbody>
+    </Table>
+  );
+}

@@ -1,0 +1,40 @@
+import type { Actor, Role } from "./actor";
+
+/** A place in the navigation; `segment` is its folder under the employer, `href` an address of its own. */
+export type Station = { label: string } & ({ segment: string } | { href: string });
+
+const DESK = { label: "Desk", segment: "desk" };
+const CHECKS = { label: "Checks", segment: "checks" };
+const MODULES = { label: "Modules", segment: "modules" };
+const SITTINGS = { label: "Sittings", segment: "sittings" };
+const PEOPLE = { label: "People", segment: "people" };
+const QUEUE = { label: "Queue", segment: "queue" };
+const RECORDS = { label: "Records", segment: "records" };
+const REGISTER = { label: "Register", segment: "register" };
+const CERTIFICATES = { label: "Certificates", segment: "certificates" };
+const BENCH = { label: "Bench", href: "/bench" };
+
+const STATIONS: Readonly<Record<Role, readonly Station[]>> = {
+  technician: [DESK, CHECKS, BENCH, CERTIFICATES],
+  lead: [MODULES, SITTINGS, PEOPLE, CERTIFICATES, BENCH],
+  administrator: [MODULES, SITTINGS, PEOPLE, CERTIFICATES, BENCH],
+  assessor: [QUEUE, RECORDS, REGISTER, BENCH],
+  decider: [QUEUE, RECORDS, REGISTER, BENCH],
+};
+
+// Whoever holds several roles begins with the own work, then what waits for others, then the firm's.
+const ORDER: readonly Role[] = ["technician", "assessor", "decider", "lead", "administrator"];
+
+/** The stations of a person with these roles; those of several roles follow one another, each once. */
+export function stationsOf(roles: readonly Role[]): readonly Station[] {
+  return [...new Set(ORDER.filter((role) => roles.includes(role)).flatMap((role) => STATIONS[role]))];
+}
+
+export const stationAddress = (employerSlug: string, station: Station): string =>
+  "href" in station ? station.href : `/${employerSlug}/${station.segment}`;
+
+/** Where a person begins at an employer. */
+export function homeOf({ employerSlug, roles }: Pick<Actor, "employerSlug" | "roles">): string {
+  const [first] = stationsOf(roles);
+  return first ? stationAddress(employerSlug, first) : "/account";
+}
