@@ -10,7 +10,7 @@ export function Cautions({
 }) {
   if (items.length === 0) return null;
   return (
-    <section aria-label={title} className="border-control border-l-8 border-caution-deep bg-sheet">
+    <section aria-label={title} className="border-line border-l-8 border-caution-deep bg-sheet">
       <ul>
         {items.map((item) => (
           <li

@@ -76,7 +76,11 @@ export function StatusHead({ standing, word, aside, as: Tag = "h1", size }: Stat
           </text>
         </svg>
       </Tag>
-      {aside && <span className="status-aside value">{aside}</span>}
+      {aside && (
+        <span className="status-aside value" style={{ top: `${lineTop / 104}em` }}>
+          <span>{aside}</span>
+        </span>
+      )}
     </div>
   );
 }

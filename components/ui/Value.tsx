@@ -10,17 +10,29 @@ type ValueProps = {
   decimals?: number;
   signed?: boolean;
   size?: keyof typeof sizes;
+  /** In a column of a table: the unit gets a place of fixed width, so that figures align whatever the unit. */
+  slot?: boolean;
   className?: string;
 };
 
 /** A figure with its unit: the figure in ink, the unit smaller and quieter. */
-export function Value({ value, unit, decimals = 0, signed = false, size = "inline", className }: ValueProps) {
+export function Value({ value, unit, decimals = 0, signed = false, size = "inline", slot, className }: ValueProps) {
   const empty = value === null || value === "";
   const text = empty ? "–" : typeof value === "number" ? formatNumber(value, decimals, signed) : value;
   return (
     <span className={classNames("value whitespace-nowrap", sizes[size], className)}>
       {text}
-      {unit && !empty && <span className="text-[0.78em] font-normal text-ink-2">{` ${unit}`}</span>}
+      {unit && !empty && " "}
+      {(slot || (unit && !empty)) && (
+        <span
+          className={classNames(
+            "text-[0.78em] font-normal text-ink-2",
+            slot && "ml-1 inline-block w-[2.6em] text-left",
+          )}
+        >
+          {empty ? "" : unit}
+        </span>
+      )}
     </span>
   );
 }
