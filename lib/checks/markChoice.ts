@@ -1,7 +1,8 @@
-import type { AskedQuantity } from "./askedQuantities";
 import { isBlank } from "./answerOf";
+import type { AskedQuantity } from "./askedQuantities";
 import type { MarkedRow } from "./kind";
 import type { Finding } from "./markNumber";
+import { markWord } from "./markWord";
 
 export type ChoiceLine = {
   quantity: AskedQuantity;
@@ -15,34 +16,24 @@ export type ChoiceLine = {
 };
 
 /** Marks one word of a list. What is not in the list is outside, whoever sent it. */
-export function markChoice(line: ChoiceLine): MarkedRow {
-  const chosen = line.quantity.choices.find((choice) => choice.value === line.typed.trim());
-  const within = chosen !== undefined && line.right.includes(chosen.value);
-  const finding = within ? null : findingOf(line, chosen?.value);
-  return {
-    quantity: line.quantity.id,
-    subject: line.subject ?? null,
-    label: line.label ?? line.quantity.label,
-    handedIn: chosen?.label ?? line.typed,
-    understood: chosen?.label ?? null,
-    computed: line.computed ?? labelOf(line, line.right[0]),
-    difference: null,
-    tolerance: "same",
-    offByTolerances: null,
-    within,
-    critical: line.quantity.critical,
-    errorClass: finding?.errorClass ?? null,
-    reason: finding?.reason ?? null,
+export function markChoice({ quantity, subject, label, typed, right, computed, explain }: ChoiceLine): MarkedRow {
+  const chosen = quantity.choices.find((choice) => choice.value === typed.trim());
+  const expected = computed ?? labelOf(quantity, right[0]);
+  const findingOf = (): Finding => {
+    if (isBlank(typed)) return { errorClass: null, reason: "Nothing was handed in." };
+    if (!chosen) return { errorClass: null, reason: `“${typed.trim()}” is not in the list.` };
+    return explain?.(chosen.value) ?? { errorClass: null, reason: `Computed: ${expected}.` };
   };
+  return markWord({
+    quantity,
+    subject,
+    label,
+    handedIn: chosen?.label ?? typed,
+    understood: chosen?.label,
+    computed: expected,
+    finding: chosen && right.includes(chosen.value) ? null : findingOf(),
+  });
 }
 
-function findingOf(line: ChoiceLine, value: string | undefined): Finding {
-  if (isBlank(line.typed)) return { errorClass: null, reason: "Nothing was handed in." };
-  if (value === undefined) return { errorClass: null, reason: `“${line.typed.trim()}” is not in the list.` };
-  return (
-    line.explain?.(value) ?? { errorClass: null, reason: `Computed: ${line.computed ?? labelOf(line, line.right[0])}.` }
-  );
-}
-
-const labelOf = (line: ChoiceLine, value: string) =>
-  line.quantity.choices.find((choice) => choice.value === value)?.label ?? value;
+const labelOf = (quantity: AskedQuantity, value: string) =>
+  quantity.choices.find((choice) => choice.value === value)?.label ?? value;

@@ -22,7 +22,7 @@ export type NumberLine = {
   /** For texts that hold more than a number with a unit of its dimension. */
   read?: (typed: string) => Reading;
   /** Refuses a value that the quantity cannot have. */
-  impossible?: (value: number) => string | null;
+  impossible?: (value: number) => Finding | null;
   /** Signed, handed in minus computed; circular quantities go the short way round. */
   difference?: (value: number, computed: number) => number;
   /** Names the error behind an outside value, where it is a known one. */
@@ -33,17 +33,12 @@ export type NumberLine = {
 export function markNumber(line: NumberLine): MarkedRow {
   const reading = line.read ? line.read(line.typed) : parseQuantity(line.typed, line.unit);
   if ("problem" in reading) return row(line, null, NaN, { errorClass: null, reason: reading.problem });
-  const difference = line.difference ? line.difference(reading.value, line.computed) : reading.value - line.computed;
-  const within = Math.abs(difference) <= line.tolerance;
-  if (within) return row(line, reading.value, difference, null);
-  const impossible = line.impossible?.(reading.value);
-  if (impossible) return row(line, reading.value, NaN, { errorClass: null, reason: impossible });
-  return row(
-    line,
-    reading.value,
-    difference,
-    line.explain?.(reading.value, difference) ?? plainFinding(line, difference),
-  );
+  const { value } = reading;
+  const impossible = line.impossible?.(value);
+  if (impossible) return row(line, value, NaN, impossible);
+  const difference = line.difference ? line.difference(value, line.computed) : value - line.computed;
+  if (Math.abs(difference) <= line.tolerance) return row(line, value, difference, null);
+  return row(line, value, difference, line.explain?.(value, difference) ?? plainFinding(line, difference));
 }
 
 function row(line: NumberLine, value: number | null, difference: number, finding: Finding | null): MarkedRow {
@@ -65,11 +60,13 @@ function row(line: NumberLine, value: number | null, difference: number, finding
   };
 }
 
-export const toleranceText = (tolerance: number, unit: Unit) => `±${formatUnderstood(tolerance, unit)}`;
+/** Three figures are enough to compare with. */
+export const toleranceText = (tolerance: number, unit: Unit) =>
+  `±${formatUnderstood(Number(tolerance.toPrecision(3)), unit)}`;
 
 function plainFinding(line: NumberLine, difference: number): Finding {
   const size = formatQuantity(Math.abs(difference), line.unit, line.decimals);
   const side = difference > 0 ? "above" : "below";
-  const allowed = formatUnderstood(line.tolerance, line.unit);
+  const allowed = formatUnderstood(Number(line.tolerance.toPrecision(3)), line.unit);
   return { errorClass: null, reason: `Your value is ${size} ${side} the computed one; ${allowed} is allowed.` };
 }

@@ -1,5 +1,4 @@
 import type { ParameterSpec } from "./kind";
-import { formatQuantity } from "./formatQuantity";
 import { formatUnderstood } from "./formatUnderstood";
 import { parseQuantity } from "./parseQuantity";
 

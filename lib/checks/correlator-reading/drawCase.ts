@@ -1,7 +1,8 @@
 import { CA_LENGTH_CHIPS } from "@/lib/gnss/constants";
+import { correlatorTrace } from "@/lib/gnss/correlatorTrace";
+import { decibels } from "@/lib/numeric/elementary";
 import { seededRandom, type Random } from "@/lib/numeric/random";
 import { circularDifference } from "../circularDifference";
-import { drawTrace } from "./drawTrace";
 import type { CorrelatorReadingParameters } from "./parameters";
 import { readTrace, type TraceReading } from "./readTrace";
 
@@ -20,6 +21,7 @@ export type DrawnCase = { truth: CorrelatorReadingTruth; draws: number };
 
 const COHERENT_MS = [1, 2, 4, 5, 10, 20] as const;
 const SIGMA_COUNTS = { from: 2, to: 20 } as const; // so that no level is the same from case to case
+const LAST_FIGURE = 1e4;
 const LARGEST_OWN_ERROR_CHIPS = 0.15; // of the highest cell: a right reading must stay within the tolerance of 0.2
 const CLEAR_OF_THRESHOLD = 1.08; // a careful noise mean must not turn the detection round
 
@@ -48,7 +50,10 @@ function drawTruth(
   const [lowest, highest] = parameters.cn0T;
   const cn0TDb = lowest + random.uniform() * (highest - lowest);
   const signal = hasSignal ? { delayChips, cn0TDb } : null;
-  const trace = drawTrace({ prn, sigma, signal }, random);
+  const cn0DbHz = hasSignal ? cn0TDb - decibels(coherentMs / 1000) : null;
+  const inSigma = correlatorTrace({ prn, delayChips, cn0DbHz, coherentMs, random });
+  // What is shown is what is marked, so the readings are taken after the rounding.
+  const trace = Array.from(inSigma, (value) => Math.round(value * sigma * LAST_FIGURE) / LAST_FIGURE);
   const reading = readTrace(trace, falseAlarmPerCell);
   const lagChips = signal ? delayChips : reading.highestLagChips;
   return { prn, coherentMs, falseAlarmPerCell, signal, lagChips, trace, reading };

@@ -1,4 +1,4 @@
-import type { QuantityDefinition } from "../kind";
+import type { CautionTopic, QuantityDefinition } from "../kind";
 
 export const DETECTION_CHOICES = [
   { value: "yes", label: "A signal is detected" },
@@ -71,3 +71,5 @@ export const correlatorReadingQuantities: readonly QuantityDefinition[] = [
     reason: "A formula, judged from your own noise mean.",
   },
 ];
+
+export const correlatorReadingCautions: readonly CautionTopic[] = ["life"];

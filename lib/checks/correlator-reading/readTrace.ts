@@ -1,7 +1,9 @@
 import { CA_LENGTH_CHIPS } from "@/lib/gnss/constants";
-import { PI, log } from "@/lib/numeric/elementary";
+import { TRACE_POINTS_PER_CHIP } from "@/lib/gnss/correlatorTrace";
+import { envelopeThresholdSigma } from "@/lib/gnss/detection";
+import { PI } from "@/lib/numeric/elementary";
 
-export const CELLS_PER_CHIP = 8;
+export const CELLS_PER_CHIP = TRACE_POINTS_PER_CHIP;
 export const STEP_CHIPS = 1 / CELLS_PER_CHIP;
 export const CELLS = CA_LENGTH_CHIPS * CELLS_PER_CHIP;
 
@@ -47,7 +49,7 @@ export function readTrace(trace: readonly number[], falseAlarmPerCell: number): 
  * sigma sqrt(-2 ln p). Kaplan & Hegarty, Understanding GPS, 2nd ed., 5.8.
  */
 export const rayleighThreshold = (noiseMean: number, falseAlarmPerCell: number): number =>
-  (noiseMean / Math.sqrt(PI / 2)) * Math.sqrt(-2 * log(falseAlarmPerCell));
+  (noiseMean / Math.sqrt(PI / 2)) * envelopeThresholdSigma(falseAlarmPerCell);
 
 function highestOf(trace: readonly number[], allowed: (cell: number) => boolean): number {
   let highest = -1;

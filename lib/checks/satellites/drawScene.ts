@@ -1,0 +1,72 @@
+import { CA_LENGTH_CHIPS } from "@/lib/gnss/constants";
+import { clockErrorHz } from "@/lib/gnss/doppler";
+import type { Scene, SceneSatellite } from "@/lib/gnss/scene";
+import { seededRandom, type Random } from "@/lib/numeric/random";
+import { drawRateHz } from "../captureRate";
+import { drawStart } from "../drawStart";
+import { ALL_PRNS } from "../searchCapture";
+import type { SatellitesParameters } from "./parameters";
+
+export type SatellitesTruth = {
+  scene: Scene;
+  clockPpm: number;
+  foundFromDbHz: number;
+  /** Half width that the case tells the candidate to search. */
+  windowHz: number;
+  startedAt: string;
+};
+
+export type DrawnScene = { truth: SatellitesTruth; draws: number };
+
+const DURATION_MS = 100;
+const BITS = 8; // more than 100 ms can hold
+const LEAST_TO_FIND = 3;
+
+/** Satellites of one capture; drawn again while too few of them have to be found. */
+export function drawScene(seedHex: string, parameters: SatellitesParameters): DrawnScene {
+  for (let draws = 1; draws <= 200; draws++) {
+    const random = seededRandom(seedHex, `satellites@1/draw-${draws}`);
+    const truth = drawTruth(parameters, random);
+    if (truth.scene.satellites.filter(mustBeFound(truth)).length >= LEAST_TO_FIND) return { truth, draws };
+  }
+  throw new Error("satellites: no scene with enough strong satellites in 200 draws");
+}
+
+export const mustBeFound =
+  ({ foundFromDbHz }: SatellitesTruth) =>
+  ({ cn0DbHz }: SceneSatellite): boolean =>
+    cn0DbHz >= foundFromDbHz;
+
+function drawTruth(parameters: SatellitesParameters, random: Random): SatellitesTruth {
+  const count = random.integer(...parameters.satellites);
+  const prns = random.shuffle(ALL_PRNS).slice(0, count);
+  const clockPpm = between(random, -parameters.clock, parameters.clock);
+  const rateHz = drawRateHz(parameters.rate, random);
+  const startedAt = drawStart(random);
+  const satellites = prns
+    .sort((a, b) => a - b)
+    .map((prn) =>
+      drawSatellite(random, {
+        prn,
+        cn0DbHz: between(random, ...parameters.cn0),
+        dopplerHz: between(random, -parameters.motion, parameters.motion) + clockErrorHz(clockPpm),
+      }),
+    );
+  const windowHz = Math.ceil((parameters.motion + clockErrorHz(parameters.clock)) / 1000) * 1000;
+  const scene: Scene = { rateHz, durationMs: DURATION_MS, ifHz: 0, satellites };
+  return { scene, clockPpm, foundFromDbHz: parameters.foundFrom, windowHz, startedAt };
+}
+
+/** What is free in a satellite's signal: code phase, carrier phase, data bits and their edge. */
+export const drawSatellite = (
+  random: Random,
+  given: Pick<SceneSatellite, "prn" | "cn0DbHz" | "dopplerHz">,
+): SceneSatellite => ({
+  ...given,
+  codePhaseChips: random.uniform() * CA_LENGTH_CHIPS,
+  carrierPhaseCycles: random.uniform(),
+  dataBits: Int8Array.from({ length: BITS }, () => random.pick([-1, 1])),
+  bitEdgeMs: random.integer(0, 19),
+});
+
+export const between = (random: Random, from: number, to: number): number => from + random.uniform() * (to - from);
