@@ -6,7 +6,7 @@ import { checkTrail } from "@/lib/trail/checkTrail";
 import { readSnapshot } from "./trail/readSnapshot";
 import { trailSettings } from "./trail/trailSettings";
 
-const JWS = /[\w-]+\.[\w-]+\.[\w-]+/g;
+const JWS = /eyJ[\w-]*\.[\w-]+\.[\w-]+/g;
 
 const { address, certificateFile } = trailSettings(process.env);
 const key = createPublicKey(readFileSync(certificateFile, "utf8"));
