@@ -1,0 +1,16 @@
+import { correlatorReading } from "./correlator-reading/correlatorReading";
+import type { CheckKind } from "./kind";
+import { satellites } from "./satellites/satellites";
+
+/** Every version of every kind that a release may name; a released version stays here for ever. Newest of a kind first. */
+export const KINDS: readonly CheckKind[] = [correlatorReading, satellites];
+
+/**
+ * A kind by its name, the newest version unless one is given.
+ * @throws RangeError for a kind or a version that no release can name
+ */
+export function kindOf(id: string, version?: number): CheckKind {
+  const found = KINDS.find((kind) => kind.id === id && (version === undefined || kind.version === version));
+  if (!found) throw new RangeError(`kindOf: no kind ${id}${version === undefined ? "" : ` of version ${version}`}`);
+  return found;
+}
