@@ -3,9 +3,7 @@ export const BOLTZMANN_J_K = 1.380649e-23; // exact, SI 2019
 export const L1_HZ = 1575.42e6; // IS-GPS-200, 3.3.1.1
 export const CA_CHIP_RATE_HZ = 1.023e6; // IS-GPS-200, 3.3.2.1
 export const CA_LENGTH_CHIPS = 1023; // IS-GPS-200, 3.2.1.3
-export const CA_PERIOD_MS = 1;
 export const DATA_BIT_MS = 20; // 50 bit/s, IS-GPS-200, 3.2.2
-export const L1_CYCLES_PER_CHIP = 1540; // 1575.42 MHz / 1.023 MHz, exact
 
 /** Length of C/A chips along the signal's path, 293.05 m each. */
 export const chipsToMetres = (chips: number): number => (chips * SPEED_OF_LIGHT_M_S) / CA_CHIP_RATE_HZ;

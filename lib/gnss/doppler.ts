@@ -1,11 +1,12 @@
-import { CA_CHIP_RATE_HZ, L1_CYCLES_PER_CHIP, L1_HZ, SPEED_OF_LIGHT_M_S } from "./constants";
+import { CA_CHIP_RATE_HZ, L1_HZ, SPEED_OF_LIGHT_M_S } from "./constants";
 
 /** Doppler in Hz of a carrier when the range grows at `rangeRateMS`; negative then. Textbook. */
 export const dopplerOfRangeRateHz = (rangeRateMS: number, carrierHz: number): number =>
   (-rangeRateMS / SPEED_OF_LIGHT_M_S) * carrierHz;
 
-/** Change of the C/A chip rate in chips per second that goes with a carrier Doppler at L1, a 1540th of it. */
-export const codeDopplerChipsPerS = (dopplerHz: number): number => dopplerHz / L1_CYCLES_PER_CHIP;
+/** Change of the C/A chip rate in chips per second that goes with a carrier's Doppler; at L1 a 1540th of it. */
+export const codeDopplerChipsPerS = (dopplerHz: number, carrierHz = L1_HZ): number =>
+  (dopplerHz * CA_CHIP_RATE_HZ) / carrierHz;
 
 /** Time in s in which an uncompensated code Doppler moves the code by half a chip; Infinity at 0 Hz. */
 export const halfChipSlipS = (dopplerHz: number): number => 0.5 / Math.abs(codeDopplerChipsPerS(dopplerHz));

@@ -36,8 +36,9 @@ export function chiSquareInverseSurvival(p: number, degrees: number): number {
  * @param lambda noncentrality, sum of the squared means, from 0
  */
 export function noncentralChiSquareSurvival(x: number, degrees: number, lambda: number): number {
-  if (!(lambda >= 0)) throw new RangeError(`noncentralChiSquareSurvival: lambda from 0, got ${lambda}`);
-  if (lambda === 0) return chiSquareSurvival(x, degrees);
+  if (!(lambda >= 0 && lambda < Infinity))
+    throw new RangeError(`noncentralChiSquareSurvival: lambda from 0, got ${lambda}`);
+  if (lambda < 1e-300) return chiSquareSurvival(x, degrees); // half of the smallest double is 0, whose logarithm fails
   if (x <= 0) return 1;
   const mean = lambda / 2;
   const half = x / 2;
@@ -50,7 +51,7 @@ export function noncentralChiSquareSurvival(x: number, degrees: number, lambda: 
   for (let n = first; ; n++) {
     const term = weight * survival;
     sum += term;
-    if (n > mean && (term <= sum * 1e-17 || weight === 0)) return Math.min(1, sum);
+    if (n > mean && !(term > sum * 1e-17)) return Math.min(1, sum);
     survival = Math.min(1, survival + step);
     a += 1;
     step *= half / a;
