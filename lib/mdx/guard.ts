@@ -1,16 +1,13 @@
-import type { Definition, Image, ImageReference, Link, Nodes, Root } from "mdast";
-import type { MdxFlowExpression, MdxTextExpression } from "mdast-util-mdx";
-import type { MdxJsxFlowElement, MdxJsxTextElement } from "mdast-util-mdx-jsx";
+import type { Nodes, Root } from "mdast";
 import { addressFault } from "@/lib/mdx/address";
 import { guardTag } from "@/lib/mdx/guardTag";
 import { LIMITS } from "@/lib/mdx/limits";
 import type { TreeProperty } from "@/lib/mdx/moduleTree";
+import type { Addressed, Braces, Formula, Picture, Tag } from "@/lib/mdx/nodes";
 import { problemAt, type Problem, type Range, type Repair } from "@/lib/mdx/problem";
 import { rangeOf } from "@/lib/mdx/readAttributes";
 import type { SourceText } from "@/lib/mdx/sourceText";
 import type { WrittenCheck } from "@/lib/mdx/writtenTag";
-
-export type Tag = MdxJsxFlowElement | MdxJsxTextElement;
 
 export type Guarded = {
   problems: Problem[];
@@ -19,11 +16,11 @@ export type Guarded = {
   kept: Map<Tag, Record<string, TreeProperty>>;
 };
 
-export type GuardContext = Guarded & { source: SourceText };
+export type GuardContext = Guarded & { source: SourceText; formulaCharacters: number };
 
 /** Looks at every node of a parsed module and collects all that the language does not have. Refused addresses are emptied. */
 export function guard(tree: Root, source: SourceText): Guarded {
-  const context: GuardContext = { problems: [], checks: [], kept: new Map(), source };
+  const context: GuardContext = { problems: [], checks: [], kept: new Map(), source, formulaCharacters: 0 };
   for (const child of tree.children) inspect(child, [], context);
   return { problems: context.problems, checks: context.checks, kept: context.kept };
 }
@@ -50,6 +47,13 @@ function inspect(node: Nodes, ancestors: readonly Nodes[], context: GuardContext
     case "html":
       refuse("html", "HTML is not read. Write Markdown or a tag of the module language.");
       return;
+    case "math":
+    case "inlineMath":
+      inspectFormula(node, context, refuse);
+      return;
+    case "code":
+      if (node.lang === "math") inspectFormula(node, context, refuse);
+      return;
     case "image":
     case "imageReference":
       inspectImage(node, refuse);
@@ -69,7 +73,7 @@ function inspect(node: Nodes, ancestors: readonly Nodes[], context: GuardContext
 
 const CONTAINERS = new Set(["blockquote", "listItem", "footnoteDefinition", "mdxJsxFlowElement", "mdxJsxTextElement"]);
 
-function inspectExpression(node: MdxFlowExpression | MdxTextExpression, range: Range, context: GuardContext): void {
+function inspectExpression(node: Braces, range: Range, context: GuardContext): void {
   if (isComment(node.value)) return;
   const text = node.value.trim();
   const quoted = /^(["'])([^"'\\\n]*)\1$/.exec(text)?.[2];
@@ -94,22 +98,42 @@ function isComment(value: string): boolean {
   return rest === "";
 }
 
-function inspectImage(node: Image | ImageReference, refuse: (rule: string, message: string) => void): void {
+function inspectImage(node: Picture, refuse: (rule: string, message: string) => void): void {
   const name = node.alt ? ` (“${node.alt.slice(0, 40)}”)` : "";
   refuse("picture", `Pictures${name} are not available in this release. Say it in words, a table or a formula.`);
 }
 
-function inspectAddress(node: Link | Definition, range: Range, context: GuardContext): void {
+function inspectAddress(node: Addressed, range: Range, context: GuardContext): void {
   const long = node.url.length > LIMITS.addressCharacters;
   const fault = long
     ? { message: `An address has at most ${LIMITS.addressCharacters} characters.`, better: null }
     : addressFault(node.url);
   if (!fault) return;
-  const written = context.source.slice(range);
-  const repair =
-    fault.better && written.includes(node.url)
-      ? { label: `Write ${fault.better}`, text: written.replace(node.url, () => fault.better ?? ""), ...range }
-      : undefined;
+  const text = fault.better && addressRepair(context.source.slice(range), node.url, fault.better);
+  const repair = text ? { label: `Write ${fault.better}`, text, ...range } : undefined;
   context.problems.push(problemAt(range, "address", fault.message, repair));
   node.url = "";
+}
+
+function addressRepair(written: string, address: string, better: string): string | null {
+  if (written.includes(address)) return written.replace(address, () => better);
+  // "www.example.org" alone in the text becomes a link by itself.
+  return address === `http://${written}` ? `[${written}](${better})` : null;
+}
+
+function inspectFormula(node: Formula, context: GuardContext, refuse: (rule: string, message: string) => void): void {
+  // The formula setter passes these over without a word, so the lead is told here.
+  const command = /\\(href|url|includegraphics|html(?:Class|Id|Style|Data))(?![a-zA-Z])/.exec(node.value)?.[0];
+  if (command)
+    refuse("formula", `${command} is not set in formulas. Write links outside them: [text](https://address).`);
+  context.formulaCharacters += node.value.length;
+  const { formulaCharacters: one, formulaCharactersInAll: all } = LIMITS;
+  if (node.value.length <= one && context.formulaCharacters <= all) return;
+  refuse(
+    "formula",
+    `A formula has at most ${one} characters, and all of them together ${all}. Write less of it as formula.`,
+  );
+  // Setting it would take the time that the bound is there to save.
+  node.value = "";
+  node.data = { hName: "span", hChildren: [] };
 }

@@ -1,8 +1,9 @@
 import type { Nodes } from "mdast";
 import { attributeValue } from "@/lib/mdx/attributeValue";
-import type { GuardContext, Tag } from "@/lib/mdx/guard";
+import type { GuardContext } from "@/lib/mdx/guard";
 import { htmlAdvice } from "@/lib/mdx/htmlAdvice";
 import type { TreeProperty } from "@/lib/mdx/moduleTree";
+import type { Tag } from "@/lib/mdx/nodes";
 import { problemAt, type Range } from "@/lib/mdx/problem";
 import { readAttributes, type WrittenAttribute } from "@/lib/mdx/readAttributes";
 import { LATER_TAGS, TAGS, tagNamed, type TagSpec } from "@/lib/mdx/tags";
@@ -53,7 +54,7 @@ function nameFault(name: string | null): [rule: string, message: string] {
 
 const KNOWN = `Tags are ${Object.keys(TAGS)
   .map((name) => `<${name}>`)
-  .join(", ")}.`;
+  .join(", ")}; HTML is not read.`;
 
 function placeFault(node: Tag, spec: TagSpec, ancestors: readonly Nodes[]): string | null {
   const name = `<${spec.name}>`;
@@ -91,10 +92,7 @@ function readProperties(
         problemAt(range, "attribute", `${name} would run a program, and nothing in a module runs. Delete it.`),
       );
     } else if (!spec.kindAttributes) {
-      const known = spec.attributes.map((one) => one.name).join(", ");
-      problems.push(
-        problemAt(range, "attribute", `<${spec.name}> has no attribute ${name.slice(0, 40)}. It has ${known}.`),
-      );
+      problems.push(problemAt(range, "attribute", unknownAttribute(spec, name)));
     }
   }
   for (const { name, required, sample } of spec.attributes) {

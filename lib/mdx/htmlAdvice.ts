@@ -1,9 +1,7 @@
-/** What to write instead of an HTML element; null for a name that HTML does not have. */
+/** What to write instead of an HTML element, for those that a lead may reach for; null for any other name. */
 export function htmlAdvice(name: string): string | null {
   const element = name.toLowerCase();
-  if (Object.hasOwn(ADVICE, element)) return ADVICE[element] ?? null;
-  // Elements of HTML, SVG and MathML are all small letters and figures; our own tags begin with a capital.
-  return /^[a-z][a-z0-9]*(-[a-z0-9]+)*$/.test(name) ? "Write Markdown or a tag of the module language." : null;
+  return Object.hasOwn(ADVICE, element) ? (ADVICE[element] ?? null) : null;
 }
 
 const RUNS = "Nothing in a module runs or loads anything. Delete it.";

@@ -1,5 +1,5 @@
 import type { Nodes, Paragraph, Root, RootContent } from "mdast";
-import type { MdxJsxFlowElement } from "mdast-util-mdx-jsx";
+import type { BlockTag } from "@/lib/mdx/nodes";
 
 /**
  * `<Caution about="height">Text</Caution>` on one line is a paragraph with a tag in it to the parser and a tag of its own to
@@ -26,7 +26,7 @@ const isTagsAlone = (node: Nodes): node is Paragraph =>
   );
 
 function tagsOf(paragraph: Paragraph): RootContent[] {
-  return paragraph.children.flatMap((child): MdxJsxFlowElement[] => {
+  return paragraph.children.flatMap((child): BlockTag[] => {
     if (child.type !== "mdxJsxTextElement") return [];
     const { name, attributes, children, position } = child;
     const inside = children.length > 0 ? [{ type: "paragraph" as const, children, position }] : [];

@@ -6,12 +6,16 @@ export const LIMITS = {
   literal: { depth: 4, nodes: 200 },
   attributeCharacters: 2000,
   addressCharacters: 500,
+  formulaCharacters: 2000,
+  formulaCharactersInAll: 16_000,
   frontMatterCharacters: 8000,
+  /** List and quotation markers after the first of a line, in the whole module: 2,000 lines of eight took a minute. */
+  furtherMarkers: 300,
   checks: 12,
   /** Characters of the tree as JSON: reference links and formulas make more of it than was written. */
   treeCharacters: 4_000_000,
   /** Longest reading before its thread is ended; a lawful module of full size takes about a second. */
-  readingMs: 5000,
+  readingMs: 8000,
   /** A thread that is not ready by then will not be. */
   threadStartMs: 60_000,
   waitingReadings: 40,
@@ -38,8 +42,13 @@ export const MARKS_PER_BLOCK: Readonly<Record<string, number>> = {
   "\\": 1500,
 };
 
-/** Marks allowed in the whole module: each formula and each tag has a cost of its own. */
+/** Marks allowed in the whole module: many full blocks are slow in sum, and each formula and each tag has a cost of its own. */
 export const MARKS_PER_MODULE: Readonly<Record<string, number>> = {
+  "*": 4000,
+  _: 4000,
+  "~": 2000,
+  "[": 3000,
+  "`": 6000,
   $: 800,
   "<": 1500,
   "{": 2000,

@@ -122,6 +122,6 @@ function plainValue(node: AcornLiteral, expression: string): Literal {
 
 function refusal(node: { start: number; type?: string }): Refused {
   if (node.type === "Identifier")
-    return new Refused("A name stands here. Write its value, a text in quotes.", node.start);
+    return new Refused("A name stands here. Write the value itself, or a text in quotes.", node.start);
   return new Refused(`Nothing in braces is worked out. ${ONE_VALUE}`, node.start);
 }

@@ -4,7 +4,7 @@ import { LIMITS } from "@/lib/mdx/limits";
 import { unread, type ParsedModule } from "@/lib/mdx/parsedModule";
 import { parseTolerant } from "@/lib/mdx/parseTolerant";
 import { precheck } from "@/lib/mdx/precheck";
-import { problemAt, type Problem } from "@/lib/mdx/problem";
+import { inOrder, LISTED_PROBLEMS, problemAt, type Problem } from "@/lib/mdx/problem";
 import { readFrontMatter } from "@/lib/mdx/readFrontMatter";
 import { SourceText } from "@/lib/mdx/sourceText";
 import { toTree } from "@/lib/mdx/toTree";
@@ -44,7 +44,13 @@ function parseWithin(text: string): ParsedModule {
     const message = "Formulas and links make more of this module than can be kept. Move a part to another module.";
     return unread([...all, problemAt({ line: 1, column: 1 }, "size", message)]);
   }
-  return { problems: all, frontMatter: front.frontMatter, required: front.required, checks, tree };
+  return {
+    problems: inOrder(all).slice(0, LISTED_PROBLEMS),
+    frontMatter: front.frontMatter,
+    required: front.required,
+    checks,
+    tree,
+  };
 }
 
 /** Blanking out a fault can move a tag out of its check, but it cannot make one of these. */

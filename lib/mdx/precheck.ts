@@ -30,8 +30,9 @@ export function precheck(source: string): Problem[] {
     );
     return [...problems.values()];
   }
-  const module: Record<string, number> = {};
+  const whole: Record<string, number> = {};
   let block: Record<string, number> = {};
+  let furtherMarkers = 0;
   lines.forEach((text, index) => {
     const line = index + 1;
     if (text.trim() === "") block = {};
@@ -40,6 +41,15 @@ export function precheck(source: string): Problem[] {
     const nesting = openers(text);
     if (nesting.count > LIMITS.nesting || nesting.indentColumns > MARKER_INDENT_COLUMNS) {
       refuse("nesting", line, 1, `Lists and quotations are nested more than ${LIMITS.nesting} deep. Start a new list.`);
+    }
+    furtherMarkers += Math.max(0, nesting.count - 1);
+    if (furtherMarkers > LIMITS.furtherMarkers) {
+      refuse(
+        "nesting",
+        line,
+        1,
+        "Too many lists and quotations begin inside others on the same line. Give each marker its own line.",
+      );
     }
     const row = /([[({<*_~])\1{99}/.exec(text);
     if (row)
@@ -54,7 +64,7 @@ export function precheck(source: string): Problem[] {
       const most = MARKS_PER_BLOCK[mark];
       if (most === undefined) continue;
       block[mark] = (block[mark] ?? 0) + 1;
-      module[mark] = (module[mark] ?? 0) + 1;
+      whole[mark] = (whole[mark] ?? 0) + 1;
       if (block[mark] > most) {
         refuse(
           "marks",
@@ -62,7 +72,7 @@ export function precheck(source: string): Problem[] {
           at + 1,
           `More than ${most} of ${mark} stand in one block. Put an empty line between parts.`,
         );
-      } else if (module[mark] > (MARKS_PER_MODULE[mark] ?? Infinity)) {
+      } else if (whole[mark] > (MARKS_PER_MODULE[mark] ?? Infinity)) {
         refuse(
           "marks",
           line,

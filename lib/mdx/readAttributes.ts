@@ -1,6 +1,6 @@
-import type { MdxJsxAttribute, MdxJsxExpressionAttribute } from "mdast-util-mdx-jsx";
 import { readLiteral, type Literal } from "@/lib/mdx/literal";
 import { LIMITS } from "@/lib/mdx/limits";
+import type { TagAttribute } from "@/lib/mdx/nodes";
 import { problemAt, type Problem, type Range } from "@/lib/mdx/problem";
 import type { SourceText } from "@/lib/mdx/sourceText";
 
@@ -8,7 +8,7 @@ export type WrittenAttribute = { name: string; value: Literal; range: Range };
 
 /** The attributes of one tag as written, each at most once; what cannot be a value is a problem and left out. */
 export function readAttributes(
-  attributes: readonly (MdxJsxAttribute | MdxJsxExpressionAttribute)[],
+  attributes: readonly TagAttribute[],
   tagRange: Range,
   source: SourceText,
 ): { written: WrittenAttribute[]; problems: Problem[] } {

@@ -1,12 +1,11 @@
 import type { Element, ElementContent, Root as HtmlRoot } from "hast";
 import type { Root } from "mdast";
 import rehypeKatex from "rehype-katex";
-import remarkRehype from "remark-rehype";
-import type { State } from "mdast-util-to-hast";
+import remarkRehype, { type Options } from "remark-rehype";
 import { unified } from "unified";
 import { VFile } from "vfile";
-import type { Tag } from "@/lib/mdx/guard";
 import type { ModuleTree, TreeElement, TreeNode, TreeProperty } from "@/lib/mdx/moduleTree";
+import type { Tag } from "@/lib/mdx/nodes";
 import { problemAt, type Problem } from "@/lib/mdx/problem";
 
 /** A tree that is plain JSON, from the parts of the syntax tree that the guard let pass; and what is wrong with formulas. */
@@ -43,6 +42,9 @@ export function toTree(
   });
   return { tree: { type: "root", children: nodes }, problems: file.messages.map(formulaProblem) };
 }
+
+/** Of the handlers that turn Markdown into elements. */
+type State = Parameters<NonNullable<NonNullable<Options["handlers"]>["paragraph"]>>[0];
 
 /** Copies elements and text only, with the properties that JSON keeps. */
 function plain(
