@@ -1,10 +1,8 @@
 import { hash, verify } from "@node-rs/argon2";
+import { LONGEST_PASSWORD } from "@/lib/policies/passwordRule";
 
 // OWASP Password Storage Cheat Sheet, Argon2id (the package's default kind): 19 MiB, two passes, one lane.
 const SETTINGS = { memoryCost: 19_456, timeCost: 2, parallelism: 1 };
-
-export const SHORTEST_PASSWORD = 12;
-export const LONGEST_PASSWORD = 200;
 
 /** A password is the same whichever way a keyboard composes its letters. */
 export const hashPassword = (password: string): Promise<string> => hash(password.normalize("NFKC"), SETTINGS);

@@ -27,12 +27,13 @@ export const action =
     });
   };
 
-/** The same for what a person does about the own account, at no employer in particular. */
+/** The same for what a person does about the own account, whatever the employer. */
 export const personAction =
   <S extends z.ZodType, R>(schema: S, run: (input: z.output<S>, person: SignedIn) => Promise<R>): Action<R> =>
   async (_previous, input) => {
     const person = await requirePerson();
-    return toResult(() => run(parsed(schema, formValues(input)), person));
+    const { employer: _employer, ...values } = formValues(input);
+    return toResult(() => run(parsed(schema, values), person));
   };
 
 /** @throws InvalidError with the sentences of every field that the schema refuses */

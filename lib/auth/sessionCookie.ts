@@ -1,9 +1,6 @@
 import "server-only";
 import { webEnv } from "@/lib/env";
 
-/** Twelve hours: a working day. The row in `sessions` ends with it. */
-export const SESSION_SECONDS = 12 * 3600;
-
 export const isSecure = (): boolean => webEnv().PUBLIC_ORIGIN.startsWith("https:");
 
 /** Never readable by a script; sent along when a link from a mail is followed, not with another site's posts. */

@@ -1,4 +1,5 @@
 import { afterAll, beforeEach, expect } from "vitest";
+import "./settings";
 
 // One process has one role. Tests of the worker's tasks are the worker, all others are the web process.
 const isWorker = /[/\\]worker[/\\]|\.worker\.test\./.test(expect.getState().testPath ?? "");
