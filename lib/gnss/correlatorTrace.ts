@@ -33,23 +33,33 @@ export function correlatorTrace(input: {
     throw new RangeError(`correlatorTrace: delay from 0 below 1023 chips, got ${delayChips}`);
   if (!(Number.isInteger(coherentMs) && coherentMs >= 1 && coherentMs <= 20))
     throw new RangeError(`correlatorTrace: 1 to 20 whole milliseconds, got ${coherentMs}`);
-  const turns = random.uniform(); // carrier phase
-  const trace = correlatedNoise(prn, random);
-  const peak = cn0DbHz === null ? 0 : Math.sqrt(2 * coherentSnr(cn0DbHz, coherentMs / 1000));
-  const auto = circularCorrelation(caCode(prn), caCode(prn));
+  const carrierTurns = random.uniform();
+  const noise = correlatedNoise(prn, random);
+  const peak = cn0DbHz === null ? 0 : Math.sqrt(2 * coherentSnr(cn0DbHz, coherentMs / 1000)) / CA_LENGTH_CHIPS;
+  const [peakRe, peakIm] = [peak * cosTurns(carrierTurns), peak * sinTurns(carrierTurns)];
+  const auto = autocorrelation(prn);
   return Float64Array.from({ length: POINTS }, (_, n) => {
-    const level = (peak * between(auto, n / TRACE_POINTS_PER_CHIP - delayChips)) / CA_LENGTH_CHIPS;
-    const re = trace[2 * n] + level * cosTurns(turns);
-    const im = trace[2 * n + 1] + level * sinTurns(turns);
+    const level = between(auto, n / TRACE_POINTS_PER_CHIP - delayChips);
+    const re = noise[2 * n] + level * peakRe;
+    const im = noise[2 * n + 1] + level * peakIm;
     return Math.sqrt(re * re + im * im);
   });
+}
+
+const made = new Map<number, Int32Array>();
+
+function autocorrelation(prn: number): Int32Array {
+  const values = made.get(prn) ?? circularCorrelation(caCode(prn), caCode(prn));
+  made.set(prn, values);
+  return values;
 }
 
 /** The correlation of rectangular chips is straight between whole lags. */
 function between(values: Int32Array, lag: number): number {
   const below = Math.floor(lag);
-  const at = (n: number) => values[((n % values.length) + values.length) % values.length];
-  return at(below) + (lag - below) * (at(below + 1) - at(below));
+  const at = below < 0 ? below + values.length : below;
+  const next = values[at + 1 === values.length ? 0 : at + 1];
+  return values[at] + (lag - below) * (next - values[at]);
 }
 
 /** White complex noise correlated with the code at all lags, real and imaginary parts alternating, variance 1 each. */
