@@ -38,3 +38,9 @@ export function homeOf({ employerSlug, roles }: Pick<Actor, "employerSlug" | "ro
   const [first] = stationsOf(roles);
   return first ? stationAddress(employerSlug, first) : "/account";
 }
+
+const ON_THE_SCALE = 5;
+
+/** The scale holds five at the most; whoever has more finds the rest under the own name. */
+export const scaleStationsOf = (roles: readonly Role[]): readonly Station[] => stationsOf(roles).slice(0, ON_THE_SCALE);
+export const menuStationsOf = (roles: readonly Role[]): readonly Station[] => stationsOf(roles).slice(ON_THE_SCALE);

@@ -1,6 +1,7 @@
 import "server-only";
 import type { CheckPlan } from "@/lib/checks/kind";
 import { select } from "@/lib/db";
+import { checkCards, type CheckCardView } from "@/lib/mdx/checkCards";
 import type { FrontMatter } from "@/lib/mdx/frontMatter";
 import type { ModuleTree } from "@/lib/mdx/moduleTree";
 import type { Actor } from "@/lib/policies/actor";
@@ -24,7 +25,10 @@ type Row = {
   sittingId: string | null;
   assignedBy: string;
 };
-export type AssignmentView = Omit<Row, "employerId" | "technicianId"> & { isMine: boolean };
+export type AssignmentView = Omit<Row, "employerId" | "technicianId"> & {
+  isMine: boolean;
+  checkCards: Record<string, CheckCardView>;
+};
 
 /** An assignment with the text of its release, for the technician and the people who run sittings. */
 export async function getAssignment(actor: Actor, id: string): Promise<AssignmentView | null> {
@@ -32,7 +36,7 @@ export async function getAssignment(actor: Actor, id: string): Promise<Assignmen
   const [row] = await select<Row>(SQL, { id, employerId: actor.employerId });
   if (!row || !can.readSitting(actor, row)) return null;
   const { employerId: _employer, technicianId, ...view } = row;
-  return { ...view, isMine: technicianId === actor.personId };
+  return { ...view, isMine: technicianId === actor.personId, checkCards: checkCards(row.checks) };
 }
 
 const SQL = `

@@ -1,9 +1,8 @@
 import "server-only";
-import { readFile } from "node:fs/promises";
 import type { JWK } from "jose";
 import { select } from "@/lib/db";
-import { webEnv } from "@/lib/env";
 import { publicJwk } from "@/lib/trail/head";
+import { issuerCertificates } from "./issuerCertificates";
 
 /** `signature` is a compact JWS over sequence, link and instant; it alone is worth keeping. */
 export type PublicTrailHead = { sequence: string; link: string; at: string; signature: string };
@@ -13,7 +12,8 @@ export type PublicTrailHeads = { newest: PublicTrailHead | null; daily: PublicTr
 export async function getPublicTrailHeads(): Promise<PublicTrailHeads> {
   const daily = await select<PublicTrailHead>(LAST_OF_EACH_DAY);
   const [newest] = await select<PublicTrailHead>(NEWEST);
-  return { newest: newest ?? null, daily, key: publicJwk(await readFile(webEnv().ISSUER_CERTIFICATE_FILE, "utf8")) };
+  const { certificatePem } = await issuerCertificates();
+  return { newest: newest ?? null, daily, key: publicJwk(certificatePem) };
 }
 
 const HEAD = `sequence::text AS "sequence", link_sha256 AS "link", signature AS "signature",

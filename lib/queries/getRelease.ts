@@ -1,6 +1,7 @@
 import "server-only";
 import type { CheckPlan } from "@/lib/checks/kind";
 import { select } from "@/lib/db";
+import { checkCards, type CheckCardView } from "@/lib/mdx/checkCards";
 import type { FrontMatter } from "@/lib/mdx/frontMatter";
 import type { ModuleTree } from "@/lib/mdx/moduleTree";
 import type { Actor } from "@/lib/policies/actor";
@@ -35,6 +36,7 @@ export type AssignedLine = {
 };
 export type ReleaseView = Omit<Row, "releasedAt"> & {
   releasedAt: string;
+  checkCards: Record<string, CheckCardView>;
   assigned: AssignedLine[];
   technicians: { id: string; name: string }[];
 };
@@ -48,6 +50,7 @@ export async function getRelease(actor: Actor, moduleId: string, number: string)
   return {
     ...row,
     releasedAt: iso(row.releasedAt),
+    checkCards: checkCards(row.checks),
     assigned: await select<AssignedLine>(ASSIGNED, { releaseId: row.id }),
     technicians: await select<{ id: string; name: string }>(TECHNICIANS, { employerId }),
   };

@@ -1,6 +1,7 @@
 import "server-only";
 import type { CheckPlan } from "@/lib/checks/kind";
 import { select } from "@/lib/db";
+import { checkCards, type CheckCardView } from "@/lib/mdx/checkCards";
 import type { FrontMatter } from "@/lib/mdx/frontMatter";
 import type { ModuleTree } from "@/lib/mdx/moduleTree";
 import type { Actor } from "@/lib/policies/actor";
@@ -50,6 +51,7 @@ export type SittingView = Omit<Row, "employerId" | "technicianId" | "startedAt" 
   decidedAt: string | null;
   isMine: boolean;
   checks: CheckLine[];
+  checkCards: Record<string, CheckCardView>;
 };
 
 export async function getSitting(actor: Actor, id: string, now = new Date()): Promise<SittingView | null> {
@@ -63,6 +65,7 @@ export async function getSitting(actor: Actor, id: string, now = new Date()): Pr
     startedAt: iso(row.startedAt),
     decidedAt: isoOrNull(row.decidedAt),
     isMine: technicianId === actor.personId,
+    checkCards: checkCards(row.checks),
     checks: row.checks.map((plan) => checkLine(plan, row.frontMatter, cases, now)),
   };
 }

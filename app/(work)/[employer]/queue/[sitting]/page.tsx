@@ -9,7 +9,7 @@ import { confirmPasswordAction } from "@/lib/auth/actions";
 import { DecisionForm } from "./_components/DecisionForm";
 import { Exhibit } from "./_components/Exhibit";
 import { OutsideRows } from "./_components/OutsideRows";
-import { QuantityLine } from "./_components/QuantityLine";
+import { QuantityLine } from "@/components/checks/QuantityLine";
 import { SittingLog } from "./_components/SittingLog";
 import { decideAction } from "./actions";
 

@@ -1,0 +1,62 @@
+import type { Metadata } from "next";
+import { RecordSide } from "./_components/RecordSide";
+import { RecordTable } from "./_components/RecordTable";
+import { QuantityLine } from "@/components/checks/QuantityLine";
+import { SittingStateWord } from "@/components/sittings/SittingStateWord";
+import { LinkKey } from "@/components/ui/LinkKey";
+import { WorkBar } from "@/components/ui/WorkBar";
+import { orNotFound } from "@/lib/auth/orNotFound";
+import { requireActor } from "@/lib/auth/requireActor";
+import { getMarkingRecord } from "@/lib/queries/getMarkingRecord";
+import { askQuestionAction } from "./actions";
+
+export const metadata: Metadata = { title: "Marking record" };
+
+export default async function RecordPage({ params }: { params: Promise<{ employer: string; id: string }> }) {
+  const { employer, id } = await params;
+  const record = await orNotFound(getMarkingRecord(await requireActor(employer), id));
+  const { quantities, withinCount, needs } = record;
+  const critical = quantities.some((quantity) => quantity.critical);
+  return (
+    <>
+      <WorkBar
+        eyebrow={`Marking record, sitting S-${record.sittingNumber}, case ${record.caseNumber} of ${record.freshCases + 1}${record.isMine ? "" : `, ${record.technician}`}`}
+        title={`${record.code} ${record.checkTitle}`}
+        facts={[
+          { label: "Within tolerance", value: <Of count={withinCount} all={quantities.length} /> },
+          {
+            label: "Needed",
+            value: <Of count={needs} all={quantities.length} rest={critical ? ", all critical" : ""} />,
+          },
+          { label: "Check", value: <strong className="font-bold">{record.met ? "Met" : "Not met"}</strong> },
+        ]}
+        keys={<SittingStateWord state={record.sittingState} />}
+      />
+      <div className="page grid gap-x-6 gap-y-8 py-5 desk:grid-cols-[1fr_21.5rem]">
+        <div className="min-w-0">
+          <RecordTable record={record} />
+          <div className="flex flex-wrap items-center gap-6 border-t-strong border-ink bg-sheet px-4 py-4">
+            <QuantityLine quantities={quantities} />
+            <p className="font-semibold">
+              {withinCount} within, {quantities.length - withinCount} outside. The release asks for {needs}
+              {critical ? ", every critical one among them" : ""}.
+            </p>
+          </div>
+          <div className="mt-6">
+            <LinkKey href={`/${employer}/sittings/${record.sittingId}`}>Back to the sitting</LinkKey>
+          </div>
+        </div>
+        <RecordSide employer={employer} record={record} ask={askQuestionAction} />
+      </div>
+    </>
+  );
+}
+
+function Of({ count, all, rest = "" }: { count: number; all: number; rest?: string }) {
+  return (
+    <>
+      <strong className="font-bold">{count}</strong> of {all}
+      {rest}
+    </>
+  );
+}

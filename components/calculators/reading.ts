@@ -1,0 +1,10 @@
+/** What a person takes from a plot into the open answer field. */
+export type Reading = {
+  prn?: number;
+  codePhaseChips?: number;
+  dopplerHz?: number;
+  cn0DbHz?: number;
+  lagChips?: number;
+  magnitude?: number;
+  binHz?: number;
+};

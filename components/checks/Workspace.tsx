@@ -1,0 +1,59 @@
+"use client";
+import { CaptureSearch } from "@/components/calculators/CaptureSearch";
+import type { Reading } from "@/components/calculators/reading";
+import { SearchPlan } from "@/components/calculators/SearchPlan";
+import { TraceReader } from "@/components/calculators/TraceReader";
+import { SectionHead } from "@/components/ui/SectionHead";
+import type { PublicCase } from "@/lib/checks/kind";
+import { SkyAndReport, type SkyData } from "./SkyAndReport";
+
+type WorkspaceProps = { view: PublicCase; filesAddress: string; onTake?: (reading: Reading) => void };
+type CaptureData = {
+  captureFile: string;
+  rateHz: number;
+  windowHz?: number;
+  search?: { dopplerHalfWidthHz: number };
+};
+type TraceData = { trace: number[]; stepChips: number };
+
+const ALL_PRNS = Array.from({ length: 32 }, (_, index) => index + 1);
+
+/** The place to work at, by kind of check; an unknown kind has its files and the form. */
+export function Workspace({ view, filesAddress, onTake }: WorkspaceProps) {
+  switch (view.kind) {
+    case "correlator-reading": {
+      const { trace, stepChips } = view.data as TraceData;
+      return <TraceReader trace={trace} stepChips={stepChips} onTake={onTake} />;
+    }
+    case "satellites":
+    case "false-lock": {
+      const { captureFile, rateHz, windowHz, search } = view.data as CaptureData;
+      return (
+        <div className="grid gap-8">
+          {view.kind === "false-lock" && <SkyAndReport data={view.data as SkyData} />}
+          <CaptureSearch
+            address={`${filesAddress}/${captureFile}`}
+            rateHz={rateHz}
+            prns={ALL_PRNS}
+            windowHz={windowHz ?? search!.dopplerHalfWidthHz}
+            onTake={onTake}
+          />
+        </div>
+      );
+    }
+    case "search-plan":
+      return (
+        <>
+          <SectionHead
+            title="Search planner"
+            note="the bench's own, to try plans on; your answers are typed at the right"
+          />
+          <div className="mt-4">
+            <SearchPlan />
+          </div>
+        </>
+      );
+    default:
+      return <p className="text-dense text-ink-2">Work with the files of this case and type your answers.</p>;
+  }
+}
