@@ -35,6 +35,7 @@ const back = z.string().max(2000).optional();
 
 export const signInInput = z.object({ email: emailAddress, password: givenPassword, back });
 export const mailLinkInput = z.object({ email: emailAddress, back });
+export const followLinkInput = z.object({ email: emailAddress, token: z.string().min(1).max(100), back });
 export const confirmPasswordInput = z.object({ password: givenPassword }).strict();
 export const setPasswordInput = z
   .object({ current: z.string().max(LONGEST_PASSWORD).optional(), password: newPassword, again: z.string() })
