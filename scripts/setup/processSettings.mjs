@@ -14,5 +14,11 @@ const WITHHELD = {
  */
 export function processSettings(kind, settings) {
   const withheld = Object.fromEntries(WITHHELD[kind].map((name) => [name, ""]));
-  return { ...settings, NEXT_TELEMETRY_DISABLED: "1", NEXTAUTH_URL: settings.PUBLIC_ORIGIN, ...withheld };
+  return {
+    ...settings,
+    NEXT_TELEMETRY_DISABLED: "1",
+    NO_COLOR: "1",
+    NEXTAUTH_URL: settings.PUBLIC_ORIGIN,
+    ...withheld,
+  };
 }
