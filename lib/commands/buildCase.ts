@@ -10,6 +10,7 @@ import { Capture, Case, CaseSecret, CaseView, Progress } from "@/models";
 import { sealSecret } from "./caseSecret";
 import type { Engine } from "./engine";
 import { findCase } from "./findCase";
+import { plainTruth } from "./plainTruth";
 import { GRACE_MS } from "./saveAnswers";
 import { transact } from "./transact";
 
@@ -37,8 +38,9 @@ export async function buildCase(
     const openedAt = now();
     const endsAt = new Date(openedAt.getTime() + plan.minutes * 60_000);
     await store({ caseId, built, files, openedAt, endsAt }, transaction);
-    const sealed = sealSecret({ seedHex, truth: built.truth }, caseId, tools.seedKey);
-    const truthSha256 = fingerprintOf(built.truth);
+    const truth = plainTruth(built.truth);
+    const sealed = sealSecret({ seedHex, truth }, caseId, tools.seedKey);
+    const truthSha256 = fingerprintOf(truth);
     await CaseSecret.create({ caseId, sealed, truthSha256, engineVersion: ENGINE_VERSION }, { transaction });
     await enqueue("close-case", { caseId }, transaction, new Date(endsAt.getTime() + GRACE_MS));
     await Progress.destroy({ where: { subjectId: caseId, job: "build-case" }, transaction });

@@ -10,6 +10,7 @@ import { CaseSecret, HandIn, MarkingRecord, Person, Progress, Sitting } from "@/
 import { openSecret } from "./caseSecret";
 import type { Engine } from "./engine";
 import { findCase, type FoundCase } from "./findCase";
+import { plainTruth } from "./plainTruth";
 import { tellDeciders } from "./tellDeciders";
 import { transact } from "./transact";
 import { writeMail } from "./writeMail";
@@ -34,7 +35,7 @@ export async function markCase(
   const { seedHex } = openSecret(secret.sealed, caseId, tools.seedKey);
   const started = performance.now();
   const { truth, marking } = await tools.engine.mark(seedHex, context.plan, handIn.answers);
-  if (fingerprintOf(truth) !== secret.truthSha256) {
+  if (fingerprintOf(plainTruth(truth)) !== secret.truthSha256) {
     const versions = `drawn by engine ${secret.engineVersion}, this one is ${ENGINE_VERSION}`;
     throw new EngineDiffersError(`markCase: case ${caseId} is not re-created: ${versions}`);
   }

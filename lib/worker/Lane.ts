@@ -13,6 +13,8 @@ export type Queue = Pick<PgBoss, "fetch" | "complete" | "fail" | "getDb">;
 type Running = { name: JobName; abort: AbortController; ended: Promise<void> };
 
 const POLL_MS = 500;
+/** Of the time after which the queue counts a run as lost: this process should be the first to say that it failed. */
+const SHARE_OF_TIME = 0.9;
 const STOPPED = new Error("Lane: this worker stops");
 
 /**
@@ -95,13 +97,11 @@ export class Lane {
     this.#running.set(job.id, { name, abort, ended });
   }
 
-  async #run(name: JobName, { id, data }: PgBoss.Job<object>, abort: AbortController): Promise<void> {
+  async #run(name: JobName, { id, data, expireInSeconds }: PgBoss.Job<object>, abort: AbortController): Promise<void> {
     const started = performance.now();
     const about = { job: name, id, ...data };
-    const timer = setTimeout(
-      () => abort.abort(new Error(`Lane: ${name} took longer than it may`)),
-      JOBS[name].expireSeconds * 1000,
-    );
+    const tooLong = () => abort.abort(new Error(`Lane: ${name} took longer than it may`));
+    const timer = setTimeout(tooLong, expireInSeconds * 1000 * SHARE_OF_TIME);
     try {
       const outcome = await Promise.race([this.#perform(name, data, abort.signal), aborted(abort.signal)]);
       log.info({ ...about, outcome, ms: Math.round(performance.now() - started) }, "done");

@@ -48,10 +48,10 @@ test("seals seed and truth; they open with the key and for this case only", asyn
   const [seedHex] = engine.seeds;
   expect(seedHex).toMatch(/^[0-9a-f]{64}$/);
   const opened = openSecret(sealed, caseId, SEED_KEY);
-  expect(opened).toMatchObject({ seedHex, truth: { lagChips: 88.8 } });
+  expect(opened).toMatchObject({ seedHex, truth: { lagChips: 88.8, dataBits: [1, -1] } });
   // The truth's canonical JSON, written by hand.
   const draw = `truth-${seedHex!.slice(0, 16)}`;
-  expect(truth_sha256).toBe(sha256(Buffer.from(`{"draw":"${draw}","lagChips":88.8}`)));
+  expect(truth_sha256).toBe(sha256(Buffer.from(`{"dataBits":[1,-1],"draw":"${draw}","lagChips":88.8}`)));
   expect(() => openSecret(sealed, "another case", SEED_KEY)).toThrow();
   expect(() => openSecret(sealed, caseId, Buffer.alloc(32, 8).toString("base64url"))).toThrow();
 });

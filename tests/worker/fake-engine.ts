@@ -4,7 +4,9 @@ import type { Engine } from "@/lib/commands/engine";
 import { markedRow, publicCase } from "../support/samples";
 
 /** A value that stands in the truth and nowhere else. */
-const truthOf = (seedHex: string) => ({ lagChips: 88.8, draw: `truth-${seedHex.slice(0, 16)}` });
+const truthOf = (seedHex: string) => ({
+  ...{ lagChips: 88.8, draw: `truth-${seedHex.slice(0, 16)}`, dataBits: Int8Array.of(1, -1) },
+});
 const bytesOf = (seedHex: string) => new Uint8Array(createHash("sha256").update(seedHex).digest());
 
 export const builtCase = (seedHex: string): BuiltCase => ({

@@ -3,6 +3,7 @@ import { fingerprintOf } from "@/lib/certificates/canonicalJson";
 import { ENGINE_VERSION } from "@/lib/checks/engineVersion";
 import { sealSecret } from "@/lib/commands/caseSecret";
 import { EngineDiffersError, markCase } from "@/lib/commands/markCase";
+import { plainTruth } from "@/lib/commands/plainTruth";
 import { reportProgress } from "@/lib/commands/reportProgress";
 import {
   makeCase,
@@ -34,7 +35,7 @@ async function handedIn(given: Parameters<typeof makeCase>[1] = {}): Promise<str
   const { id: caseId } = await makeHandIn(firm, {
     case: await makeOpenCase(firm, { case: await makeCase(firm, given) }),
   });
-  const { truth } = builtCase(SEED);
+  const truth = plainTruth(builtCase(SEED).truth);
   const sealed = sealSecret({ seedHex: SEED, truth }, caseId, SEED_KEY);
   await insert("case_secrets", { caseId, sealed, truthSha256: fingerprintOf(truth), engineVersion: "1.0.0" });
   return caseId;

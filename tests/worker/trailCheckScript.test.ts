@@ -31,7 +31,7 @@ function trailCheck(...files: string[]): Promise<{ code: number; output: string 
     execFile(
       process.execPath,
       args,
-      { cwd: path.resolve(import.meta.dirname, "../.."), env: env as NodeJS.ProcessEnv },
+      { cwd: path.resolve(import.meta.dirname, "../.."), env: env as unknown as NodeJS.ProcessEnv },
       (error, stdout, stderr) => resolve({ code: error ? Number(error.code) : 0, output: stdout + stderr }),
     );
   });
