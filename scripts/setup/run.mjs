@@ -1,6 +1,7 @@
 import { spawn } from "node:child_process";
 import fs from "node:fs";
 import path from "node:path";
+import { stripVTControlCharacters } from "node:util";
 import { Refusal } from "./say.mjs";
 import { onStop } from "./shutdown.mjs";
 
@@ -29,7 +30,7 @@ export function run(command, args, { env = process.env, cwd, log, input } = {}) 
     child.on("close", (code) => {
       forget();
       if (file !== null) fs.closeSync(file);
-      resolve({ code: code ?? 1, output });
+      resolve({ code: code ?? 1, output: stripVTControlCharacters(output) });
     });
     if (input !== undefined) child.stdin.end(input);
   });
