@@ -5,6 +5,7 @@ import { createFft } from "./fft";
 export type Dft = { readonly length: number; transform(out: Float64Array, data: Float64Array): void };
 
 const made = new Map<number, Dft>();
+const MOST_KEPT = 16; // lengths; uploaded captures come at any rate, and each length holds tables of up to a megabyte
 
 /**
  * Exact transform of any length N: out[k] = sum of data[n] exp(-2 pi i k n / N), not normalised. Code lengths such as 1023
@@ -37,6 +38,7 @@ export function createDft(length: number): Dft {
     timesChirp(out, padded, chirp, length);
   };
   const dft = { length, transform };
+  if (made.size >= MOST_KEPT) made.clear();
   made.set(length, dft);
   return dft;
 }
