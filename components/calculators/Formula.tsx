@@ -6,7 +6,7 @@ import "katex/dist/katex.min.css";
 export function Formula({ tex, source }: { tex: string; source: string }) {
   return (
     <figure className="overflow-x-auto border-t-hair border-rule pt-3 text-dense" tabIndex={0} aria-label="Formula">
-      <BlockMath math={tex} settings={{ trust: false, maxExpand: 200, maxSize: 20, throwOnError: false }} />
+      <BlockMath math={tex} />
       <figcaption className="text-label font-normal text-ink-2">{source}</figcaption>
     </figure>
   );

@@ -34,7 +34,7 @@ export function GridReading({ result, onTake, busy }: GridReadingProps) {
   const byLag = lagCut(grid.lagsChips, rowCut(grid.power, columns, cell.row), cell.column);
   const byDoppler = columnCut(grid.power, columns, cell.column);
   const height = Math.max(2 * grid.threshold, 1.1 * power, 1.1 * Math.max(...byDoppler));
-  const threshold = [{ at: grid.threshold, name: `threshold ${formatNumber(grid.threshold, 2)}` }];
+  const threshold = [{ y: grid.threshold, name: `threshold ${formatNumber(grid.threshold, 2)}` }];
   return (
     <div className="grid gap-4" aria-busy={busy}>
       <div className="flex flex-wrap items-baseline justify-between gap-x-6 gap-y-1">

@@ -69,7 +69,7 @@ export function SearchPlan(props: SearchPlanProps) {
                   y: answer.curve.map(({ detection }) => 100 * detection),
                 },
               ]}
-              limits={[{ at: 90, name: "90 %" }]}
+              limits={[{ y: 90, name: "90 %" }]}
               summary={`Detection probability against C/N0; ${formatNumber(100 * answer.performance.detection, 1)} % at ${formatNumber(answer.inputs.cn0DbHz, 1)} dB-Hz.`}
               cursor={{
                 index: cn0Index ?? Math.round(answer.inputs.cn0DbHz) - answer.curve[0]!.cn0DbHz,

@@ -13,7 +13,7 @@ import { NumberInput } from "./NumberInput";
 export type TwoCodesProps = { a?: number; b?: number; dopplerHz?: number; lagChips?: number; coherentMs?: number };
 
 /** Gold's bound for codes of length 1 023: the side lobes of two codes without a Doppler difference. Gold 1967. */
-const FLOOR_CHIPS = 65;
+const FLOOR = { y: [-65, 63] as const, name: "floor 63 to \u221265", tone: "ink" as const };
 
 /** How alike two C/A codes are, lag by lag, with or without a Doppler difference. */
 export function TwoCodes({
@@ -47,11 +47,7 @@ export function TwoCodes({
             signed: false,
           }}
           curves={[{ name, role: "subject", x: lags, y: values }]}
-          bands={
-            exact
-              ? [{ from: -FLOOR_CHIPS, to: FLOOR_CHIPS - 2, name: `floor ${FLOOR_CHIPS - 2} to \u2212${FLOOR_CHIPS}` }]
-              : undefined
-          }
+          bands={exact ? [FLOOR] : undefined}
           summary={`Correlation of ${name}: highest ${formatNumber(values[top]!, exact ? 0 : 1)} chip at lag ${top} chip, ${level(values[top]!)}.`}
           cursor={{
             index: lag,

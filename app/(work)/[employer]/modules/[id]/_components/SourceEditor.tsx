@@ -1,0 +1,71 @@
+"use client";
+import { markdown } from "@codemirror/lang-markdown";
+import { linter, lintGutter, type Diagnostic } from "@codemirror/lint";
+import { EditorView } from "@codemirror/view";
+import CodeMirror, { type ReactCodeMirrorRef } from "@uiw/react-codemirror";
+import { forwardRef, useMemo } from "react";
+import type { Problem } from "@/lib/mdx/problem";
+import { sourceLook } from "./sourceLook";
+
+type SourceEditorProps = {
+  source: string;
+  problems: readonly Problem[];
+  nonce: string;
+  onChange: (source: string) => void;
+  onCursor: (line: number, column: number) => void;
+};
+
+/** The module's source, with its problems waved under where they are. */
+export const SourceEditor = forwardRef<ReactCodeMirrorRef, SourceEditorProps>(function SourceEditor(
+  { source, problems, nonce, onChange, onCursor },
+  ref,
+) {
+  const extensions = useMemo(
+    () => [
+      markdown(),
+      sourceLook,
+      EditorView.lineWrapping,
+      EditorView.cspNonce.of(nonce),
+      EditorView.contentAttributes.of({ "aria-label": "Source of the module", spellcheck: "false" }),
+      lintGutter(),
+      linter((view) => problems.map((problem) => diagnostic(view, problem)), { delay: 0 }),
+    ],
+    [nonce, problems],
+  );
+  return (
+    <CodeMirror
+      ref={ref}
+      value={source}
+      height="100%"
+      theme="none"
+      basicSetup={{ foldGutter: false, highlightActiveLine: true, autocompletion: false, searchKeymap: true }}
+      extensions={extensions}
+      onChange={onChange}
+      onUpdate={(update) => {
+        if (!update.selectionSet && !update.docChanged) return;
+        const at = update.state.selection.main.head;
+        const line = update.state.doc.lineAt(at);
+        onCursor(line.number, at - line.from + 1);
+      }}
+      className="h-full text-[0.875rem]"
+    />
+  );
+});
+
+function diagnostic(view: EditorView, problem: Problem): Diagnostic {
+  const from = offsetOf(view, problem.line, problem.column);
+  const to = problem.endLine ? offsetOf(view, problem.endLine, problem.endColumn ?? 1) : from + 1;
+  return {
+    from,
+    to: Math.max(from, Math.min(to, view.state.doc.length)),
+    severity: problem.severity,
+    message: problem.message,
+  };
+}
+
+/** Where a line and column are in the text as it stands now; it may have grown shorter since it was checked. */
+export function offsetOf(view: EditorView, line: number, column: number): number {
+  const doc = view.state.doc;
+  const at = doc.line(Math.min(Math.max(1, line), doc.lines));
+  return Math.min(at.from + Math.max(0, column - 1), at.to);
+}

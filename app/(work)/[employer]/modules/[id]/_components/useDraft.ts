@@ -1,0 +1,97 @@
+"use client";
+import { useCallback, useEffect, useRef, useState } from "react";
+import type { DraftReading } from "@/lib/queries/checkDraft";
+
+export type DraftSaved = { state: "saved" | "saving" | "kept" | "not-saved"; at: string | null; why: string | null };
+
+type Options = {
+  base: string;
+  source: string;
+  title: string;
+  revision: number;
+  savedAt: string;
+  reading: DraftReading;
+};
+
+const SAVE_MS = 1200;
+const CHECK_MS = 350;
+const AGAIN_MS = 4000;
+const clock = (iso: string) => new Date(iso).toTimeString().slice(0, 8);
+
+/** The text of a draft: checked a moment after each change, stored a moment later, never over somebody else's newer text. */
+export function useDraft(options: Options) {
+  const { base } = options;
+  const [source, setSource] = useState(options.source);
+  const [reading, setReading] = useState(options.reading);
+  const [checking, setChecking] = useState(false);
+  const [revision, setRevision] = useState(options.revision);
+  const [saved, setSaved] = useState<DraftSaved>({ state: "saved", at: clock(options.savedAt), why: null });
+  const state = useRef({ source, title: options.title, revision: options.revision, stored: options.source });
+  const timers = useRef<{ save?: ReturnType<typeof setTimeout>; check?: ReturnType<typeof setTimeout> }>({});
+  const checkRun = useRef(0);
+  const saveRef = useRef<() => Promise<void>>(async () => undefined);
+
+  const save = useCallback(async () => {
+    const { source: text, title, revision: seen, stored } = state.current;
+    if (text === stored) return;
+    setSaved((before) => ({ ...before, state: "saving" }));
+    try {
+      const response = await send(`${base}/draft`, "PUT", { source: text, title, revision: seen });
+      const body = (await response.json()) as { revision?: number; savedAt?: string; message?: string };
+      if (!response.ok) {
+        setSaved((before) => ({ ...before, state: "not-saved", why: body.message ?? "The server refused it." }));
+        return;
+      }
+      state.current.revision = body.revision!;
+      state.current.stored = text;
+      setRevision(body.revision!);
+      setSaved({ state: "saved", at: clock(body.savedAt!), why: null });
+      if (state.current.source !== text) timers.current.save = setTimeout(() => void saveRef.current(), SAVE_MS);
+    } catch {
+      setSaved((before) => ({ ...before, state: "kept", why: "No signal. Keep this page open; it sends by itself." }));
+      timers.current.save = setTimeout(() => void saveRef.current(), AGAIN_MS);
+    }
+  }, [base]);
+
+  const check = useCallback(async () => {
+    checkRun.current += 1;
+    const run = checkRun.current;
+    setChecking(true);
+    try {
+      const response = await send(`${base}/check`, "POST", { source: state.current.source });
+      if (!response.ok || run !== checkRun.current) return;
+      const next = (await response.json()) as DraftReading;
+      if (next.title) state.current.title = next.title;
+      setReading(next);
+    } catch {
+      // Without a signal the last reading stays; saving says that there is none.
+    } finally {
+      if (run === checkRun.current) setChecking(false);
+    }
+  }, [base]);
+
+  useEffect(() => {
+    saveRef.current = save;
+    const held = timers.current;
+    return () => {
+      clearTimeout(held.save);
+      clearTimeout(held.check);
+    };
+  }, [save]);
+
+  const change = useCallback(
+    (text: string) => {
+      state.current.source = text;
+      setSource(text);
+      clearTimeout(timers.current.save);
+      clearTimeout(timers.current.check);
+      timers.current.save = setTimeout(() => void saveRef.current(), SAVE_MS);
+      timers.current.check = setTimeout(() => void check(), CHECK_MS);
+    },
+    [check],
+  );
+  return { source, reading, checking, revision, saved, change, save };
+}
+
+const send = (address: string, method: "PUT" | "POST", body: object) =>
+  fetch(address, { method, headers: { "content-type": "application/json" }, body: JSON.stringify(body) });
