@@ -1,22 +1,14 @@
+import { NothingHere } from "@/components/site/NothingHere";
 import { SiteFoot } from "@/components/site/SiteFoot";
 import { SiteHead } from "@/components/site/SiteHead";
-import { LinkKey } from "@/components/ui/LinkKey";
 
+/** For addresses outside every shell; the shells have their own. */
 export default function NotFound() {
   return (
     <>
       <SiteHead />
-      <main id="content" className="page flex-1 py-14">
-        <h1 className="text-h1">Nothing stands at this address</h1>
-        <p className="mt-3 max-w-measure text-lead text-ink-2">
-          It was mistyped, or what it named is not yours to see. A certificate is found by its number.
-        </p>
-        <p className="mt-6 flex flex-wrap gap-3">
-          <LinkKey href="/verify" variant="filled">
-            Verify a certificate
-          </LinkKey>
-          <LinkKey href="/">Start page</LinkKey>
-        </p>
+      <main id="content" className="flex-1">
+        <NothingHere />
       </main>
       <SiteFoot />
     </>
