@@ -1,5 +1,5 @@
 import type { ReactNode } from "react";
-import { SignOut } from "@/components/site/SignOut";
+
 import { MenuLinks, NameMenu, type MenuLink } from "@/components/ui/NameMenu";
 import { Scale } from "@/components/ui/Scale";
 import { ThemeSwitch } from "@/components/ui/ThemeSwitch";
@@ -7,6 +7,7 @@ import { requireActor } from "@/lib/auth/requireActor";
 import type { Actor } from "@/lib/policies/actor";
 import { can } from "@/lib/policies/can";
 import { homeOf, menuStationsOf, scaleStationsOf, stationAddress } from "@/lib/policies/stations";
+import { SignOut } from "./_components/SignOut";
 
 type Props = { children: ReactNode; params: Promise<{ employer: string }> };
 
