@@ -3,8 +3,9 @@ import { L1_HZ } from "@/lib/gnss/constants";
 import type { Capture } from "@/lib/gnss/searchSettings";
 import type { CaseFile } from "./kind";
 
-export const CAPTURE_FILE = "capture.sigmf-meta";
-const DATA_FILE = "capture.sigmf-data";
+/** The samples; the metadata stand beside them under the same name. */
+export const CAPTURE_FILE = "capture.sigmf-data";
+const METADATA_FILE = "capture.sigmf-meta";
 const SIGMF_VERSION = "1.2.5"; // SigMF specification, schema of the 1.2 line
 
 /**
@@ -28,15 +29,15 @@ export function captureFiles({ samples, rateHz }: Capture, startedAt: string): C
   };
   const text = `${JSON.stringify(metadata, null, 2)}\n`;
   return [
-    { name: CAPTURE_FILE, mediaType: "application/json", bytes: new TextEncoder().encode(text) },
-    { name: DATA_FILE, mediaType: "application/octet-stream", bytes },
+    { name: METADATA_FILE, mediaType: "application/json", bytes: new TextEncoder().encode(text) },
+    { name: CAPTURE_FILE, mediaType: "application/octet-stream", bytes },
   ];
 }
 
 /** The capture as a technician has it, from the case's files. */
 export function readCapture(files: readonly CaseFile[]): Capture {
-  const { bytes } = fileNamed(files, DATA_FILE);
-  const metadata = JSON.parse(new TextDecoder().decode(fileNamed(files, CAPTURE_FILE).bytes));
+  const { bytes } = fileNamed(files, CAPTURE_FILE);
+  const metadata = JSON.parse(new TextDecoder().decode(fileNamed(files, METADATA_FILE).bytes));
   return {
     samples: new Int8Array(bytes.buffer, bytes.byteOffset, bytes.byteLength),
     rateHz: metadata.global["core:sample_rate"],

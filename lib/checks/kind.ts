@@ -122,6 +122,8 @@ export interface CheckKind<P = unknown, T = unknown> {
   readonly parameters: readonly ParameterSpec[];
   readonly quantities: readonly QuantityDefinition[];
   readonly cautions: readonly CautionTopic[];
+  /** Parameters that are each in range and still cannot be drawn from together; null when they can. */
+  parametersProblem?(parameters: P): { name: string; message: string } | null;
   build(seedHex: string, plan: CheckPlan<P>, progress?: Progress): BuiltCase<T>;
   mark(seedHex: string, plan: CheckPlan<P>, answers: Answers, progress?: Progress): Marking;
   /** The right method with a careful reading, from the public case and its files alone. */

@@ -1,9 +1,11 @@
 import { correlatorReading } from "./correlator-reading/correlatorReading";
+import { falseLock } from "./false-lock/falseLock";
 import type { CheckKind } from "./kind";
 import { satellites } from "./satellites/satellites";
+import { searchPlan } from "./search-plan/searchPlan";
 
 /** Every version of every kind that a release may name; a released version stays here for ever. Newest of a kind first. */
-export const KINDS: readonly CheckKind[] = [correlatorReading, satellites];
+export const KINDS: readonly CheckKind[] = [correlatorReading, falseLock, satellites, searchPlan];
 
 /**
  * A kind by its name, the newest version unless one is given.

@@ -1,8 +1,8 @@
-import { CA_LENGTH_CHIPS } from "@/lib/gnss/constants";
 import { clockErrorHz } from "@/lib/gnss/doppler";
 import type { Scene, SceneSatellite } from "@/lib/gnss/scene";
 import { seededRandom, type Random } from "@/lib/numeric/random";
 import { drawRateHz } from "../captureRate";
+import { between, drawSatellite } from "../drawSatellite";
 import { drawStart } from "../drawStart";
 import { ALL_PRNS } from "../searchCapture";
 import type { SatellitesParameters } from "./parameters";
@@ -19,17 +19,16 @@ export type SatellitesTruth = {
 export type DrawnScene = { truth: SatellitesTruth; draws: number };
 
 const DURATION_MS = 100;
-const BITS = 8; // more than 100 ms can hold
 const LEAST_TO_FIND = 3;
 
 /** Satellites of one capture; drawn again while too few of them have to be found. */
 export function drawScene(seedHex: string, parameters: SatellitesParameters): DrawnScene {
-  for (let draws = 1; draws <= 200; draws++) {
+  for (let draws = 1; draws <= 5000; draws++) {
     const random = seededRandom(seedHex, `satellites@1/draw-${draws}`);
     const truth = drawTruth(parameters, random);
     if (truth.scene.satellites.filter(mustBeFound(truth)).length >= LEAST_TO_FIND) return { truth, draws };
   }
-  throw new Error("satellites: no scene with enough strong satellites in 200 draws");
+  throw new Error("satellites: no scene with enough strong satellites in 5 000 draws");
 }
 
 export const mustBeFound =
@@ -56,17 +55,3 @@ function drawTruth(parameters: SatellitesParameters, random: Random): Satellites
   const scene: Scene = { rateHz, durationMs: DURATION_MS, ifHz: 0, satellites };
   return { scene, clockPpm, foundFromDbHz: parameters.foundFrom, windowHz, startedAt };
 }
-
-/** What is free in a satellite's signal: code phase, carrier phase, data bits and their edge. */
-export const drawSatellite = (
-  random: Random,
-  given: Pick<SceneSatellite, "prn" | "cn0DbHz" | "dopplerHz">,
-): SceneSatellite => ({
-  ...given,
-  codePhaseChips: random.uniform() * CA_LENGTH_CHIPS,
-  carrierPhaseCycles: random.uniform(),
-  dataBits: Int8Array.from({ length: BITS }, () => random.pick([-1, 1])),
-  bitEdgeMs: random.integer(0, 19),
-});
-
-export const between = (random: Random, from: number, to: number): number => from + random.uniform() * (to - from);

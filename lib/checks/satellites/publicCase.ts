@@ -62,6 +62,7 @@ export function publicCase(
       rateHz: scene.rateHz,
       samples: (scene.rateHz / 1000) * scene.durationMs,
       windowHz,
+      foundFromDbHz,
       sky: [],
     },
   };

@@ -17,6 +17,10 @@ export const satellites: CheckKind<SatellitesParameters, SatellitesTruth> = {
   parameters: satellitesParameters,
   quantities: satellitesQuantities,
   cautions: satellitesCautions,
+  parametersProblem: ({ cn0, foundFrom }) =>
+    cn0[1] >= foundFrom + 1
+      ? null
+      : { name: "foundFrom", message: "C/N0 must reach at least 1 dB above the level from which satellites must be found." },
   build: buildCase,
   mark,
   solve,

@@ -6,11 +6,17 @@ import { MOST_LINES } from "./publicCase";
 
 export type Listed = { prn: number; codePhaseChips: number; dopplerHz: number; cn0DbHz: number };
 
-/** The right method, from the files alone: search the whole window, list what passes the threshold. */
+const READING_ERROR_DB = 3; // so that no satellite that must be found is left out
+
+/**
+ * The right method, from the public case and its files: search the whole window, list what passes the threshold and can be
+ * one of those asked for. What is much weaker may be a false alarm or a false peak, and nobody asks for it.
+ */
 export function solve({ publicCase, files }: { publicCase: PublicCase; files: readonly CaseFile[] }): Answers {
   const dopplerHalfWidthHz = publicCase.data.windowHz as number;
+  const weakest = (publicCase.data.foundFromDbHz as number) - READING_ERROR_DB;
   const searched = searchCapture(readCapture(files), { ...REFERENCE_SEARCH, dopplerHalfWidthHz });
-  return answersFor(searched.filter(({ found }) => found));
+  return answersFor(searched.filter(({ found, cn0DbHz }) => found && cn0DbHz >= weakest));
 }
 
 /** A list written down as a careful person does. */

@@ -1,0 +1,24 @@
+import type { CheckKind } from "../kind";
+import { buildCase } from "./buildCase";
+import { drawCase, type SearchPlanTruth } from "./drawCase";
+import { markAnswers } from "./markAnswers";
+import { searchPlanParameters, type SearchPlanParameters } from "./parameters";
+import { searchPlanCautions, searchPlanQuantities } from "./quantities";
+import { solve } from "./solve";
+import { wrongMethods } from "./wrongMethods";
+
+/** B2: a search plan, open design. */
+export const searchPlan: CheckKind<SearchPlanParameters, SearchPlanTruth> = {
+  id: "search-plan",
+  version: 1,
+  letter: "B2",
+  title: "Search plan",
+  defaultMinutes: 40,
+  parameters: searchPlanParameters,
+  quantities: searchPlanQuantities,
+  cautions: searchPlanCautions,
+  build: buildCase,
+  mark: (seedHex, plan, answers) => markAnswers(seedHex, drawCase(seedHex, plan.parameters).truth, plan, answers),
+  solve: ({ publicCase }) => solve(publicCase),
+  wrongMethods,
+};
