@@ -57,7 +57,7 @@ async function start() {
   processes.start("worker", worker, processSettings("worker", env), { again: true });
   const next = ["node_modules/next/dist/bin/next", developing ? "dev" : "start", "-H", "127.0.0.1", "-p", String(port)];
   processes.start("web", next, processSettings("web", env));
-  await waitForAnswer(`http://127.0.0.1:${port}/`, 120);
+  await waitForAnswer(`http://127.0.0.1:${port}/`, 300);
   announce(settings, (Date.now() - begun) / 1000);
 }
 

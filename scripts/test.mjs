@@ -96,7 +96,7 @@ async function browserLane(tally, cluster, note) {
     processes.start("worker", [...demonstration.TYPESCRIPT, "lib/worker/main.ts"], processSettings("worker", env));
     const next = [NEXT, "start", "-H", "127.0.0.1", "-p", String(port)];
     processes.start("web", next, processSettings("web", env));
-    await waitForAnswer(`${origin}/`, 120);
+    await waitForAnswer(`${origin}/`, 300);
   });
   const chromium = programPath("chromium") ?? "";
   if (running) await tally.tests("browser", testSettings({ ...settings, BASE_URL: origin, CHROMIUM_PATH: chromium }));
