@@ -65,11 +65,8 @@ export class Lane {
       const batchSize = this.slots - this.#running.size;
       if (batchSize <= 0) return;
       const jobs = await this.queue.fetch<object>(name, { batchSize });
-      if (this.#stopping)
-        return this.#giveBack(
-          name,
-          jobs.map(({ id }) => id),
-        );
+      const ids = jobs.map(({ id }) => id);
+      if (this.#stopping) return this.#giveBack(name, ids);
       for (const job of jobs) this.#begin(name, job);
     }
   }
