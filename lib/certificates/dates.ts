@@ -13,14 +13,6 @@ export function isTimeZone(name: string): boolean {
   }
 }
 
-/** The day an instant falls on in a time zone. */
-export function dayOfInstant(instant: string, timeZone: string): string {
-  const parts = new Intl.DateTimeFormat("en", { timeZone, year: "numeric", month: "2-digit", day: "2-digit" });
-  const part = (type: string) =>
-    parts.formatToParts(new Date(instant)).find((found) => found.type === type)?.value ?? "";
-  return `${part("year")}-${part("month")}-${part("day")}`;
-}
-
 const MONTHS = "January February March April May June July August September October November December".split(" ");
 
 /** "14 March 2026" */

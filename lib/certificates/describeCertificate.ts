@@ -4,6 +4,7 @@ import type { CertificateRecord } from "./record";
 
 /** File name of the canonical record inside the certificate; its SHA-256 is the fingerprint. */
 export const RECORD_FILE = "record.json";
+export const CREDENTIAL_FILE = "credential.jwt";
 
 /**
  * Document information and attachments. They are written through pdf-lib, which stores text in hexadecimal: nothing a person
@@ -23,15 +24,17 @@ export async function describeCertificate(
   pdf.setKeywords([`certificate ${record.number} sha256 ${fingerprint}`]);
   const at = new Date(record.decided.at);
   const file = { creationDate: at, modificationDate: at, afRelationship: AFRelationship.Data };
+  // In the order of their names: readers search the list of attachments by halves.
+  if (credential !== undefined) {
+    await pdf.attach(new TextEncoder().encode(credential), CREDENTIAL_FILE, {
+      ...file,
+      mimeType: "application/vc+jwt",
+      description: "The same certificate as a W3C Verifiable Credential",
+    });
+  }
   await pdf.attach(new TextEncoder().encode(canonicalJson(record)), RECORD_FILE, {
     ...file,
     mimeType: "application/json",
     description: "Canonical record (RFC 8785); its SHA-256 is the fingerprint on the page",
-  });
-  if (credential === undefined) return;
-  await pdf.attach(new TextEncoder().encode(credential), "credential.jwt", {
-    ...file,
-    mimeType: "application/vc+jwt",
-    description: "The same certificate as a W3C Verifiable Credential",
   });
 }

@@ -1,6 +1,7 @@
+import { dayIn } from "@/lib/calendar";
 import { InvalidError } from "@/lib/errors";
 import { isCertificateNumber } from "./isCertificateNumber";
-import { isDay, isInstant, isTimeZone, dayOfInstant } from "./dates";
+import { isDay, isInstant, isTimeZone } from "./dates";
 
 export const RECORD_SCHEMA = { name: "lagmark.certificate", version: 1 } as const;
 
@@ -64,8 +65,8 @@ export function certificateRecord(facts: CertificateFacts): CertificateRecord {
       title: line(scheme.title, "scheme.title", 120),
       edition: line(scheme.edition, "scheme.edition", 120),
     },
-    scope: line(facts.scope, "scope", 600),
-    limits: line(facts.limits, "limits", 400),
+    scope: line(facts.scope, "scope", 500),
+    limits: line(facts.limits, "limits", 300),
     supervision: facts.supervision,
     identity: identity && { byRole: line(identity.byRole, "identity.byRole", 80), at: identity.at },
     release: { code: line(release.code, "release.code", 40), number: release.number, fingerprint: release.fingerprint },
@@ -132,7 +133,7 @@ function refuse(record: CertificateRecord): void {
     if (!holds) throw new RangeError(`certificateRecord: ${field} cannot be on a certificate`);
   }
   // ISO/IEC 17024:2012, 9.4 (from memory): a certificate is not effective before the decision was made.
-  if (record.effectiveOn < dayOfInstant(decided.at, issuer.timeZone)) {
+  if (record.effectiveOn < dayIn(issuer.timeZone, new Date(decided.at))) {
     throw new RangeError("certificateRecord: effectiveOn lies before the day of the decision");
   }
 }

@@ -5,6 +5,7 @@ import { Signer, SUBFILTER_ETSI_CADES_DETACHED } from "@signpdf/utils";
 import { PDFDocument } from "pdf-lib";
 import { commonName } from "./commonName";
 import { forbidChanges } from "./forbidChanges";
+import { signatureGaps } from "./signatureGap";
 import { padesSignature, type IssuerKey } from "./pades";
 
 export type { IssuerKey };
@@ -17,6 +18,7 @@ export const SIGNATURE_BYTES = 16_384;
  * @param at the signing time claimed in /M; nothing proves it
  */
 export async function signPdf(pdf: Uint8Array, key: IssuerKey, at: Date = new Date()): Promise<Uint8Array> {
+  if (signatureGaps(pdf).length > 0) throw new RangeError("signPdf: the file is signed already");
   const document = await PDFDocument.load(pdf, { updateMetadata: false });
   pdflibAddPlaceholder({
     pdfDoc: document,

@@ -3,6 +3,8 @@ export type SignatureGap = { cms: Uint8Array; signedParts: [Uint8Array, Uint8Arr
 
 /** More than any signature of ours can be: 128 kB of hexadecimal figures. */
 const LONGEST_CONTENTS = 131_072;
+/** One is right, two are wrong; a file of a million costs no more than a file of three. */
+const MOST_READ = 3;
 const BYTE_RANGE = /\/ByteRange\s*\[\s*(\d{1,10})\s+(\d{1,10})\s+(\d{1,10})\s+(\d{1,10})\s*\]/g;
 
 /**
@@ -11,14 +13,16 @@ const BYTE_RANGE = /\/ByteRange\s*\[\s*(\d{1,10})\s+(\d{1,10})\s+(\d{1,10})\s+(\
  */
 export function signatureGaps(pdf: Uint8Array): (SignatureGap | null)[] {
   const text = Buffer.from(pdf.buffer, pdf.byteOffset, pdf.byteLength).toString("latin1");
-  return [...text.matchAll(BYTE_RANGE)].map((match) => gap(pdf, text, match.slice(1).map(Number)));
+  const matches = [...text.matchAll(BYTE_RANGE)].slice(0, MOST_READ);
+  return matches.map((match) => gap(pdf, text, match.slice(1).map(Number)));
 }
 
 function gap(pdf: Uint8Array, text: string, [start, length, resume, rest]: number[]): SignatureGap | null {
   const gapStart = start + length;
   const contents = text.slice(gapStart, resume);
   if (resume <= gapStart || resume + rest > pdf.length || contents.length > LONGEST_CONTENTS) return null;
-  const figures = /^<([0-9a-fA-F]+)>$/.exec(contents)?.[1];
+  // Lower case only, as we write it: in any case the same signature could be spelt in many ways.
+  const figures = /^<([0-9a-f]+)>$/.exec(contents)?.[1];
   if (figures === undefined || figures.length % 2 !== 0) return null;
   const cms = cmsOf(Buffer.from(figures, "hex"));
   if (!cms) return null;

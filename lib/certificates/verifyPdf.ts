@@ -16,6 +16,8 @@ export type PdfVerdict = {
   signerName: string | null;
 };
 
+export type TrustedIssuer = { certificatePem: string; rootPem: string };
+
 export const LARGEST_PDF_BYTES = 10 * 1024 * 1024;
 
 /**
@@ -23,11 +25,8 @@ export const LARGEST_PDF_BYTES = 10 * 1024 * 1024;
  * Reads the bytes without parsing the document. Junk gives a verdict, never an error.
  * @throws RangeError when the trusted certificate was not issued by the trusted root: a fault of the installation
  */
-export async function verifyPdf(
-  pdf: Uint8Array,
-  trusted: { certificatePem: string; rootPem: string },
-): Promise<PdfVerdict> {
-  const issuer = trustedIssuer(trusted);
+export async function verifyPdf(pdf: Uint8Array, trusted: TrustedIssuer): Promise<PdfVerdict> {
+  const chain = trustedChain(trusted);
   const sha256 = createHash("sha256").update(pdf).digest("hex");
   if (!isPdf(pdf)) {
     return { signature: "unreadable", wholeFile: false, number: null, fingerprint: null, sha256, signerName: null };
@@ -35,7 +34,7 @@ export async function verifyPdf(
   const gaps = signatureGaps(pdf);
   const readings = gaps.map((gap) => gap && tryRead(gap));
   return {
-    signature: verdict(gaps, readings, issuer),
+    signature: verdict(gaps, readings, chain),
     wholeFile: gaps.length === 1 && gaps[0]?.wholeFile === true,
     ...readDescription(pdf),
     sha256,
@@ -46,16 +45,20 @@ export async function verifyPdf(
 function verdict(
   gaps: (SignatureGap | null)[],
   readings: (CmsReading | null)[],
-  issuer: X509Certificate,
+  trusted: readonly [issuer: X509Certificate, root: X509Certificate],
 ): PdfVerdict["signature"] {
   if (gaps.length === 0) return "absent";
-  const fromIssuer = readings.some((reading) => reading?.signer.raw.equals(issuer.raw));
+  const fromIssuer = readings.some((reading) => reading?.signer.raw.equals(trusted[0].raw));
   const [gap] = gaps;
   const [reading] = readings;
-  if (!gap || !reading) return fromIssuer ? "altered" : "unreadable";
-  if (gaps.length > 1) return fromIssuer ? "altered" : "other-signer";
+  if (gaps.length > 1 && fromIssuer) return "altered";
+  if (!gap || !reading) return "unreadable";
+  if (gaps.length > 1) return "other-signer";
   if (!gap.wholeFile || !reading.digestAgrees || !reading.signatureAgrees) return "altered";
-  return fromIssuer ? "genuine" : "other-signer";
+  if (!fromIssuer) return "other-signer";
+  return reading.certificates.every((certificate) => trusted.some(({ raw }) => raw.equals(certificate)))
+    ? "genuine"
+    : "altered";
 }
 
 function tryRead(gap: SignatureGap): CmsReading | null {
@@ -70,9 +73,9 @@ function tryRead(gap: SignatureGap): CmsReading | null {
 const isPdf = (pdf: Uint8Array) =>
   pdf.length <= LARGEST_PDF_BYTES && Buffer.from(pdf.subarray(0, 5)).toString("latin1") === "%PDF-";
 
-function trustedIssuer({ certificatePem, rootPem }: { certificatePem: string; rootPem: string }): X509Certificate {
-  const issuer = new X509Certificate(certificatePem);
-  const root = new X509Certificate(rootPem);
-  if (root.ca && issuer.checkIssued(root) && issuer.verify(root.publicKey)) return issuer;
+function trustedChain(trusted: TrustedIssuer): [X509Certificate, X509Certificate] {
+  const issuer = new X509Certificate(trusted.certificatePem);
+  const root = new X509Certificate(trusted.rootPem);
+  if (root.ca && issuer.checkIssued(root) && issuer.verify(root.publicKey)) return [issuer, root];
   throw new RangeError("verifyPdf: the trusted certificate was not issued by the trusted root");
 }

@@ -5,7 +5,7 @@ const SEARCH_PLAN = { check: "search-plan", title: "Plan a search" };
 
 /** Facts of an invented certificate; a test changes what it is about. */
 export const certificateFacts = (changes: Partial<CertificateFacts> = {}): CertificateFacts => ({
-  number: "LM-7K4Q0-2M9XB-M",
+  number: "LM-7K4Q0-2M9XB-0",
   holder: { name: "Daud Fenwick" },
   issuer: {
     name: "Saltmarsh Beacon Works",

@@ -40,9 +40,9 @@ export function CertificateDocument({ face, density }: { face: CertificateFace; 
       producer="Lagmark"
       creator="Lagmark"
     >
-      <Page size="A4" style={page}>
-        {parts.map((part) => (
-          <View key={part.key} wrap={false} style={{ flexShrink: 0, marginBottom: density.gap }}>
+      <Page size="A4" style={{ ...page, paddingBottom: PAGE.foot + FOOT_HEIGHT + density.gap }}>
+        {parts.map((part, index) => (
+          <View key={part.key} wrap={false} style={{ flexShrink: 0, marginTop: index === 0 ? 0 : density.gap }}>
             {part}
           </View>
         ))}
@@ -55,7 +55,6 @@ export function CertificateDocument({ face, density }: { face: CertificateFace; 
 const page = {
   paddingTop: PAGE.head,
   paddingHorizontal: PAGE.side,
-  paddingBottom: PAGE.foot + FOOT_HEIGHT,
   justifyContent: "space-between",
   fontFamily: TEXT_FACES,
   fontSize: 10,

@@ -23,7 +23,8 @@ export function Competence({ record, density }: { record: CertificateRecord; den
         {title}
       </Text>
       <Text style={{ fontSize: density.text, lineHeight: 1.3 }}>
-        Scheme {inPrint(scheme.code)}, {inPrint(scheme.edition)}
+        {/* One string: between two the layout engine may break a line and put a hyphen. */}
+        {`Scheme ${inPrint(scheme.code)}, ${inPrint(scheme.edition)}`}
       </Text>
     </View>
   );

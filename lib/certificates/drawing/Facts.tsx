@@ -8,9 +8,9 @@ export function Facts({ record, density }: { record: CertificateRecord; density:
   const { issuer, release } = record;
   const standing = issuer.accreditation ? `${issuer.standing}, ${issuer.accreditation}` : issuer.standing;
   const facts = [
-    { label: "Effective", value: dayInWords(record.effectiveOn), note: `Days in ${issuer.timeZone}`, share: 1 },
-    { label: "Last day", value: dayInWords(record.lastDay), note: "That day included", share: 1 },
-    { label: "Issuer", value: issuer.name, note: standing, share: 1.4 },
+    { label: "Effective", value: dayInWords(record.effectiveOn), note: `Days in ${issuer.timeZone}`, share: 0.9 },
+    { label: "Last day", value: dayInWords(record.lastDay), note: "That day included", share: 0.9 },
+    { label: "Issuer", value: issuer.name, note: standing, share: 1.75 },
     {
       label: "Release",
       value: `${release.code}, ${release.number}`,

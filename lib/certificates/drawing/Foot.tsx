@@ -4,8 +4,8 @@ import { CODE_FACE } from "../pdfFonts";
 import { INK, PAGE } from "./page";
 
 const LINE_PT = 0.75;
-/** Band, figures, and air above them. */
-export const FOOT_HEIGHT = 30;
+/** Band and figures with a little air above them. */
+export const FOOT_HEIGHT = 28;
 
 /** All 256 chips of the fingerprint on one line and its 64 figures beneath. */
 export function Foot({ fingerprint }: { fingerprint: string }) {

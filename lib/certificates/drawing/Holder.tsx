@@ -8,7 +8,7 @@ const DESCENDER_AIR = 0.05;
 
 /** The holder's name as large as the page allows, standing on the line. Never in the plate face, which lacks letters. */
 export function Holder({ name, density }: { name: string; density: Density }) {
-  const { sizePt, lines } = fitName(name, PAGE.width);
+  const { sizePt, lines } = fitName(name, PAGE.width, density.name);
   return (
     <View>
       <Text style={{ fontSize: density.text + 2 }}>This is to certify that</Text>

@@ -17,11 +17,19 @@ export function Particulars({ record, density }: { record: CertificateRecord; de
     <View style={{ gap: density.gap / 2.5 }}>
       <Row label="Scope" text={inPrint(record.scope)} density={density} />
       <Row label="Limits" text={inPrint(record.limits)} density={density} />
-      <Row label="Supervision" text={SUPERVISION[record.supervision]} density={density} />
-      <Row label="Identity" text={identityInWords(record.identity)} density={density} />
+      <View style={{ flexDirection: "row" }}>
+        <View style={half}>
+          <Row label="Supervision" text={SUPERVISION[record.supervision]} density={density} />
+        </View>
+        <View style={half}>
+          <Row label="Identity" text={identityInWords(record.identity)} density={density} />
+        </View>
+      </View>
     </View>
   );
 }
+
+const half = { flexGrow: 1, flexBasis: 0 } as const;
 
 function Row({ label, text, density }: { label: string; text: string; density: Density }) {
   return (

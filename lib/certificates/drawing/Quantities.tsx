@@ -45,8 +45,7 @@ function Quantity({ quantity, density }: { quantity: CertifiedQuantity; density:
   return (
     <View style={{ ...row, minHeight: density.row }}>
       <Text style={{ fontSize: density.small, flex: 1 }}>
-        {inPrint(quantity.label)}
-        {quantity.critical && <Text style={{ color: INK.quiet }}>, critical</Text>}
+        {`${inPrint(quantity.label)}${quantity.critical ? ", critical" : ""}`}
       </Text>
       <Text style={{ fontSize: density.small, fontWeight: 600, marginLeft: 8, fontFeatureSettings: ["tnum"] }}>
         {inPrint(quantity.tolerance)}
