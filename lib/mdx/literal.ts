@@ -98,7 +98,8 @@ function recordOf(node: ObjectExpression, bounds: Bounds): LiteralRecord {
       key.type === "Identifier" ? key.name : key.type === "Literal" && typeof key.value === "string" ? key.value : null;
     if (name === null) throw refusal(property);
     if (FORBIDDEN_KEYS.has(name)) throw new Refused(`"${name}" cannot be the name of an entry.`, property.start);
-    if (Object.hasOwn(record, name)) throw new Refused(`"${name}" is written twice.`, property.start);
+    if (Object.hasOwn(record, name))
+      throw new Refused(`"${name}" is written twice in this record. Delete one.`, property.start);
     record[name] = valueOf(property.value, bounds);
   }
   return record;

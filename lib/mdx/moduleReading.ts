@@ -10,6 +10,8 @@ export type ModuleReading = {
   problems: Problem[];
   /** Null as long as there is one error; warnings do not count. */
   module: CheckedModule | null;
+  /** For the preview: the checks that could be planned, also while something else is wrong. */
+  checks: CheckPlan[];
   /** For the preview: what could be read, without the refused parts; null when the source could not be parsed. */
   tree: ModuleTree | null;
 };

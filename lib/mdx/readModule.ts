@@ -16,6 +16,7 @@ export async function readModule(source: string, kinds: readonly CheckKind[] = K
   return {
     problems: found.slice(0, LISTED_PROBLEMS),
     module: sound ? { frontMatter, checks: plans, tree } : null,
+    checks: plans,
     tree,
   };
 }

@@ -46,6 +46,7 @@ const coherent: AttributeSpec = {
   unit: "ms",
   from: 1,
   to: 20,
+  whole: true,
 };
 
 export const TAGS = {
