@@ -1,4 +1,5 @@
 "use client";
+import { useId } from "react";
 import { TwoWay } from "./TwoWay";
 import { useTheme } from "./useTheme";
 
@@ -9,7 +10,9 @@ const THEMES = [
 ];
 
 /** Light or dark. Until somebody chooses, the device decides; the choice is kept in a cookie that the next answer reads. */
-export function ThemeSwitch({ name = "theme" }: { name?: string }) {
+export function ThemeSwitch() {
+  // A page may carry two of them (head and phone menu): radios of one name would be one group.
+  const name = useId();
   return <TwoWay name={name} label="Light or dark" value={useTheme()} choices={THEMES} onChange={choose} />;
 }
 
