@@ -122,7 +122,7 @@ GRANT UPDATE, DELETE ON progress TO lagmark_worker;
 REVOKE INSERT ON progress FROM lagmark_web;
 
 -- No case is drawn while the fee is open, by whatever way the row comes in.
-CREATE FUNCTION case_needs_settled_fee() RETURNS trigger LANGUAGE plpgsql AS $$
+CREATE FUNCTION case_needs_settled_fee() RETURNS trigger LANGUAGE plpgsql SET search_path = public, pg_temp AS $$
 BEGIN
   IF NOT EXISTS (SELECT 1 FROM sittings s JOIN fees f ON f.assignment_id = s.assignment_id
                  WHERE s.id = NEW.sitting_id AND f.settled_at IS NOT NULL)

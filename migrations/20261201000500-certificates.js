@@ -59,7 +59,7 @@ CREATE TABLE mails (
 GRANT UPDATE (body, sent_at) ON mails TO lagmark_worker;
 COMMENT ON COLUMN mails.body IS 'emptied once sent: a mailed sign-in link must not stay readable';
 
-CREATE FUNCTION certificate_needs_settled_fee() RETURNS trigger LANGUAGE plpgsql AS $$
+CREATE FUNCTION certificate_needs_settled_fee() RETURNS trigger LANGUAGE plpgsql SET search_path = public, pg_temp AS $$
 BEGIN
   IF NOT EXISTS (SELECT 1 FROM sittings s JOIN fees f ON f.assignment_id = s.assignment_id
                  WHERE s.id = NEW.sitting_id AND f.settled_at IS NOT NULL)
@@ -71,7 +71,7 @@ END $$;
 CREATE TRIGGER certificates_fee_settled BEFORE INSERT ON certificates FOR EACH ROW EXECUTE FUNCTION certificate_needs_settled_fee();
 
 -- Withdrawn and superseded are final.
-CREATE FUNCTION standing_may_follow() RETURNS trigger LANGUAGE plpgsql AS $$
+CREATE FUNCTION standing_may_follow() RETURNS trigger LANGUAGE plpgsql SET search_path = public, pg_temp AS $$
 BEGIN
   IF EXISTS (SELECT 1 FROM standings s WHERE s.certificate_id = NEW.certificate_id AND s.standing IN ('withdrawn', 'superseded'))
     THEN RAISE EXCEPTION 'this standing is final' USING CONSTRAINT = 'standings_final', ERRCODE = 'check_violation'; END IF;

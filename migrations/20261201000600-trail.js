@@ -36,11 +36,13 @@ REVOKE INSERT ON trail_entries, trail_unsealed, trail_links, trail_heads FROM la
 GRANT INSERT ON trail_links, trail_heads TO lagmark_worker;
 GRANT DELETE ON trail_unsealed TO lagmark_worker;
 
--- The row as text, in UTC so that the same row always gives the same hash.
+-- The row as text, in UTC so that the same row always gives the same hash. Empty columns are left out: a column that a later
+-- step adds does not change the hash of the rows that were there before it.
 CREATE FUNCTION row_sha256(content jsonb) RETURNS text LANGUAGE sql IMMUTABLE
-  RETURN encode(sha256(convert_to(content::text, 'UTF8')), 'hex');
+  RETURN (SELECT encode(sha256(convert_to(coalesce(jsonb_object_agg(f.key, f.value), '{}')::text, 'UTF8')), 'hex')
+          FROM jsonb_each(content) f WHERE f.value <> 'null'::jsonb);
 
-CREATE FUNCTION write_trail() RETURNS trigger LANGUAGE plpgsql SECURITY DEFINER SET search_path = public SET timezone = 'UTC' AS $$
+CREATE FUNCTION write_trail() RETURNS trigger LANGUAGE plpgsql SECURITY DEFINER SET search_path = public, pg_temp SET timezone = 'UTC' AS $$
 DECLARE
   content jsonb := to_jsonb(NEW);
   entry bigint;
