@@ -1,7 +1,7 @@
 import type { Metadata, Viewport } from "next";
 import { cookies, headers } from "next/headers";
 import { connection } from "next/server";
-import type { ReactNode } from "react";
+import type { CSSProperties, ReactNode } from "react";
 import { DemonstrationLine } from "@/components/site/DemonstrationLine";
 import tokens from "@/components/ui/tokens.json";
 import { fontVariables } from "./fonts";
@@ -26,6 +26,7 @@ export const viewport: Viewport = {
 export default async function RootLayout({ children }: { children: ReactNode }) {
   // A page built ahead of time would carry no nonce, and the policy of proxy.ts would then stop its scripts.
   await connection();
+  const demonstrating = Boolean(process.env.DEMONSTRATION);
   const nonce = (await headers()).get("x-nonce") ?? undefined;
   return (
     <html lang="en" data-theme={await chosenTheme()} className={fontVariables}>
@@ -33,16 +34,19 @@ export default async function RootLayout({ children }: { children: ReactNode }) 
         {/* Component libraries that add style elements read their nonce here. */}
         <meta property="csp-nonce" content={nonce} />
       </head>
-      <body className="flex flex-col">
+      <body className="flex flex-col" style={demonstrating ? BELOW_THE_LINE : undefined}>
         <a href="#content" className="skip-link">
           Skip to content
         </a>
-        {process.env.DEMONSTRATION && <DemonstrationLine mailAddress={process.env.DEMONSTRATION_MAIL_URL} />}
+        {demonstrating && <DemonstrationLine mailAddress={process.env.DEMONSTRATION_MAIL_URL} />}
         {children}
       </body>
     </html>
   );
 }
+
+/** Pages that fill the window leave room for the demonstration's line. */
+const BELOW_THE_LINE = { "--banner": "27px" } as CSSProperties;
 
 async function chosenTheme(): Promise<"light" | "dark" | undefined> {
   const theme = (await cookies()).get("theme")?.value;

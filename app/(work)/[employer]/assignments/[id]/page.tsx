@@ -32,7 +32,7 @@ export default async function AssignmentPage({ params }: { params: Promise<{ emp
         ]}
       />
       <div className="page grid gap-x-14 gap-y-10 py-8 desk:grid-cols-[2fr_1fr]">
-        <article className="prose min-w-0 bg-sheet px-6 py-6 tablet:px-10 tablet:py-8">
+        <article className="min-w-0 bg-sheet px-6 py-6 tablet:px-10 tablet:py-8">
           <ModuleTree tree={assignment.tree} checkCards={assignment.checkCards} />
         </article>
         <aside className="grid content-start gap-8">

@@ -53,7 +53,7 @@ export default async function SittingPage({ params }: { params: Promise<{ employ
           </section>
           <details className="mt-8 border-t-hair border-rule-strong pt-4">
             <summary className="plate cursor-pointer text-h3">The module&rsquo;s text</summary>
-            <article className="prose mt-4 bg-sheet px-6 py-6 tablet:px-10">
+            <article className="mt-4 bg-sheet px-6 py-6 tablet:px-10">
               <ModuleTree tree={sitting.tree} checkCards={sitting.checkCards} />
             </article>
           </details>

@@ -66,7 +66,7 @@ export function ModuleDesk({ employer, draft, reading: first, nonce, release }: 
           ? null
           : "Saving first";
   return (
-    <div className="flex flex-1 flex-col desk:h-[calc(100dvh-63px)]">
+    <div className="flex flex-1 flex-col desk:h-[calc(100dvh-63px-var(--banner,0px))]">
       <WorkBar
         title={`${draft.code} ${reading.title ?? draft.title}`}
         aside={last ? `Draft after release ${last.number}` : "Draft, never released"}
@@ -141,7 +141,7 @@ export function ModuleDesk({ employer, draft, reading: first, nonce, release }: 
             className="min-h-0 flex-1 overflow-auto px-6"
           >
             {reading.tree ? (
-              <article className="prose min-h-full bg-sheet px-6 py-5">
+              <article className="min-h-full bg-sheet px-6 py-5">
                 <ModuleTree tree={reading.tree} checkCards={reading.checkCards} />
               </article>
             ) : (
