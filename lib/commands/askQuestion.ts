@@ -15,14 +15,14 @@ export const askQuestion = (actor: Actor, { markingRecordId, quantity, words }: 
     requireId(markingRecordId, "marking record");
     const record = await MarkingRecord.findByPk(markingRecordId, { transaction });
     if (!record) throw new NotFoundError("marking record");
-    const { sitting } = await lockOwnCase(actor, record.caseId, transaction);
+    const { sitting } = await lockOwnCase(actor, record.caseId, transaction, "marking record");
     authorize(can.sit(actor, sitting), "question this record");
     if (!record.quantities.some(({ of }) => of === quantity)) {
       throw new InvalidError("Choose a quantity of this record.", { quantity: ["Choose a quantity of this record."] });
     }
-    const question = await Question.create(
-      { markingRecordId, quantity, words, askedBy: actor.personId },
-      { transaction },
-    );
+    // A second press of the same key asks nothing new.
+    const asked = { markingRecordId, quantity, words, askedBy: actor.personId };
+    const earlier = await Question.findOne({ where: asked, transaction });
+    const question = earlier ?? (await Question.create(asked, { transaction }));
     return { id: question.id };
   });

@@ -62,7 +62,8 @@ export const assignRelease = (actor: Actor, { releaseId, technicianId, dueOn }: 
 const HOLDERS = (role: string) => `
   SELECT p.id, p.name, p.email FROM people p JOIN role_grants g ON g.person_id = p.id
   WHERE g.employer_id = :employerId AND g.role = '${role}' AND g.ended_at IS NULL`;
-const TECHNICIAN = `${HOLDERS("technician")} AND p.id::text = :technicianId`;
+// Locked, so that two leads cannot assign the same module to the same person at once.
+const TECHNICIAN = `${HOLDERS("technician")} AND p.id::text = :technicianId FOR UPDATE OF g`;
 const ADMINISTRATORS = HOLDERS("administrator");
 const OPEN_ASSIGNMENT = `
   SELECT a.id FROM assignments a JOIN releases r ON r.id = a.release_id

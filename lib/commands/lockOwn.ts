@@ -38,11 +38,12 @@ export async function lockOwnSitting(actor: Actor, id: string, transaction: Tran
   return sitting;
 }
 
-export async function lockOwnCase(actor: Actor, id: string, transaction: Transaction) {
-  requireId(id, "case");
+/** @param what the person asked for: a record of another employer's case looks like no record, not like a case */
+export async function lockOwnCase(actor: Actor, id: string, transaction: Transaction, what = "case") {
+  requireId(id, what);
   const found = await Case.findByPk(id, { transaction, lock: transaction.LOCK.UPDATE });
   const sitting = found && (await Sitting.findByPk(found.sittingId, { transaction }));
-  if (!found || !sitting || sitting.employerId !== actor.employerId) throw new NotFoundError("case");
+  if (!found || !sitting || sitting.employerId !== actor.employerId) throw new NotFoundError(what);
   return { case: found, sitting };
 }
 

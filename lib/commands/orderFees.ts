@@ -42,7 +42,8 @@ async function openOrderOf(fees: Fee[], transaction: Transaction): Promise<Order
   const orderIds = [...new Set(fees.map((fee) => fee.orderId).filter((id): id is string => id !== null))];
   if (orderIds.length === 0) return null;
   const where = { id: { [Op.in]: orderIds }, closedAt: null };
-  const open = await Order.findAll({ where, transaction, lock: transaction.LOCK.UPDATE });
+  // Not locked: an event settles its order first and the fees afterwards, so the two would wait for each other.
+  const open = await Order.findAll({ where, transaction });
   if (open.length === 0) return null;
   const sameFees =
     open.length === 1 && (await Fee.count({ where: { orderId: open[0]!.id }, transaction })) === fees.length;

@@ -57,6 +57,7 @@ async function readDraft(actor: Actor, { moduleId }: ReleaseOrder): Promise<Chec
   const own = await Module.count({ where: { id: moduleId, employerId: actor.employerId } });
   const draft = own ? await Draft.findByPk(moduleId) : null;
   if (!draft) throw new NotFoundError("module");
+  authorize(can.releaseModule(actor, actor), "release this module");
   const { module, problems } = await readModule(draft.source);
   if (module) return module;
   const errors = problems.filter((problem) => problem.severity === "error");

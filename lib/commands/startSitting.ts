@@ -19,9 +19,10 @@ export const startSitting = (actor: Actor, assignmentId: string, now = new Date(
     const assignment = await Assignment.findOne({ where, transaction });
     if (!assignment) throw new NotFoundError("assignment");
     authorize(can.sit(actor, assignment), "start this sitting");
+    // Locked, so that a second press of the same key waits and finds the sitting of the first one.
+    const fee = await Fee.findOne({ where: { assignmentId }, transaction, lock: transaction.LOCK.UPDATE });
     const started = await Sitting.findOne({ where: { assignmentId }, transaction });
     if (started) return { id: started.id };
-    const fee = await Fee.findOne({ where: { assignmentId }, transaction });
     if (!fee?.settledAt) throw new ConflictError("The fee of this sitting is open. It opens once the fee is settled.");
     const release = await Release.findByPk(assignment.releaseId, { transaction, rejectOnEmpty: true });
     const employer = await Employer.findByPk(actor.employerId, { transaction, rejectOnEmpty: true });

@@ -11,8 +11,8 @@ export async function cancelOrder(actor: Actor, orderId: string, now = new Date(
   const order = await transact(actor, (transaction) => lockOwnOrder(actor, orderId, transaction));
   if (order.checkoutSessionId && !order.paidAt) {
     const session = await stripe().checkout.sessions.retrieve(order.checkoutSessionId);
-    if (session.payment_status === "paid")
-      throw new ConflictError("This order is paid; the register is told in a moment.");
+    if (session.status === "complete")
+      throw new ConflictError("This order is paid; the register is told once the money is there.");
     if (session.status === "open") await stripe().checkout.sessions.expire(order.checkoutSessionId);
   }
   await transact(actor, async (transaction) => {

@@ -12,6 +12,7 @@ type Handler = (event: Stripe.Event, transaction: Transaction) => Promise<string
 const HANDLERS: Partial<Record<Stripe.Event["type"], Handler>> = {
   "checkout.session.completed": settleOrder,
   "checkout.session.async_payment_succeeded": settleOrder,
+  "checkout.session.async_payment_failed": closeExpired,
   "checkout.session.expired": closeExpired,
 };
 

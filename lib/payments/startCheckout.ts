@@ -10,6 +10,8 @@ import { stripe } from "./stripe";
 
 type Line = { amountMinor: number; currency: string; name: string };
 
+const CANCELLED = "This order is cancelled. Order the fees again.";
+
 /**
  * The address of the hosted card page for an order. Asked twice, or again after a crash half-way, it is the same
  * page: the order's id is the idempotency key.
@@ -17,7 +19,7 @@ type Line = { amountMinor: number; currency: string; name: string };
 export async function startCheckout(actor: Actor, orderId: string): Promise<{ url: string }> {
   const order = await transact(actor, (transaction) => lockOwnOrder(actor, orderId, transaction));
   if (order.paidAt) throw new ConflictError("This order is paid.");
-  if (order.closedAt) throw new ConflictError("This order is cancelled. Order the fees again.");
+  if (order.closedAt) throw new ConflictError(CANCELLED);
   if (order.checkoutUrl) return { url: order.checkoutUrl };
   const back = `${webEnv().PUBLIC_ORIGIN}/${actor.employerSlug}/counter/orders/${orderId}`;
   const lines = await select<Line>(LINES, { orderId });
@@ -32,11 +34,15 @@ export async function startCheckout(actor: Actor, orderId: string): Promise<{ ur
     },
     { idempotencyKey: `order-${orderId}` },
   );
-  await transact(actor, async (transaction) => {
+  const closedAt = await transact(actor, async (transaction) => {
     const locked = await lockOwnOrder(actor, orderId, transaction);
     await locked.update({ checkoutSessionId: session.id, checkoutUrl: session.url }, { transaction });
+    return locked.closedAt;
   });
-  return { url: session.url! };
+  if (!closedAt) return { url: session.url! };
+  // Cancelled while the page was made: it must not be paid.
+  await stripe().checkout.sessions.expire(session.id);
+  throw new ConflictError(CANCELLED);
 }
 
 const lineItem = ({ amountMinor, currency, name }: Line): Stripe.Checkout.SessionCreateParams.LineItem => ({

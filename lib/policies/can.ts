@@ -2,6 +2,7 @@ import type { Actor, Role } from "./actor";
 
 type Owned = { employerId: string };
 type Persons = Owned & { technicianId: string };
+type Held = Owned & { holderId: string };
 
 const holds = (actor: Actor, employerId: string, ...roles: Role[]): boolean =>
   actor.employerId === employerId && roles.some((role) => actor.roles.includes(role));
@@ -27,8 +28,10 @@ export const can = {
     isTheTechnician(actor, sitting) || holds(actor, sitting.employerId, "lead", "assessor", "decider"),
   readQueue: (actor: Actor, sitting: Owned) => holds(actor, sitting.employerId, "assessor", "decider"),
   decide: (actor: Actor, sitting: Owned) => holds(actor, sitting.employerId, "decider"),
-  setStanding: (actor: Actor, certificate: Owned) => holds(actor, certificate.employerId, "decider"),
-  readCertificate: (actor: Actor, certificate: Owned & { holderId: string }) =>
+  /** Never of the own certificate: nobody decides in an own matter. */
+  setStanding: (actor: Actor, certificate: Held) =>
+    holds(actor, certificate.employerId, "decider") && actor.personId !== certificate.holderId,
+  readCertificate: (actor: Actor, certificate: Held) =>
     actor.personId === certificate.holderId ||
     holds(actor, certificate.employerId, "lead", "administrator", "assessor", "decider"),
   readTrail: (actor: Actor, employer: Owned) => holds(actor, employer.employerId, "administrator"),

@@ -4,7 +4,7 @@ import type Stripe from "stripe";
 import { closeOrder } from "../closeOrder";
 import { orderOf } from "./orderOf";
 
-/** A card page that nobody finished: the fees may be ordered again. */
+/** A card page that nobody finished, or a delayed payment that failed: the fees may be ordered again. */
 export async function closeExpired(event: Stripe.Event, transaction: Transaction): Promise<string> {
   const session = event.data.object as Stripe.Checkout.Session;
   const order = await orderOf(session, transaction);

@@ -23,11 +23,11 @@ export async function settleOrder(event: Stripe.Event, transaction: Transaction)
   }
   const settledAt = new Date(event.created * 1000);
   const where = { orderId: order.id, settledAt: null };
-  const fees = await Fee.findAll({ where, transaction, lock: transaction.LOCK.UPDATE });
-  if (fees.length === 0) {
-    log.error({ order: order.id }, "an order was paid whose fees another order carries: refund it by hand");
-    return `order ${order.id}: paid after it was closed, its fees are elsewhere`;
+  const fees = await Fee.findAll({ where, order: ["id"], transaction, lock: transaction.LOCK.UPDATE });
+  if (fees.reduce((sum, { amountMinor }) => sum + amountMinor, 0) !== order.amountMinor) {
+    log.error({ order: order.id }, "an order was paid with a fee that another order carries: refund that by hand");
   }
+  if (fees.length === 0) return `order ${order.id}: paid after it was closed, its fees are elsewhere`;
   await order.update({ paidAt: settledAt, closedAt: null }, { transaction });
   for (const fee of fees) await fee.update({ settledAt }, { transaction });
   await tellTechnicians(order, transaction);
