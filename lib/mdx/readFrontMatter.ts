@@ -64,7 +64,7 @@ function indirections(document: Document, place: (offset: number) => Place): Pro
     Alias: (_key, node) => void refuse(node, "Aliases (*name)"),
     Node: (_key, node) => {
       if ("anchor" in node && node.anchor) refuse(node, "Anchors (&name)");
-      if (node.tag?.startsWith("!")) refuse(node, "Types (!name)");
+      if (node.tag) refuse(node, "Types (!name)");
     },
   });
   return problems;
