@@ -23,7 +23,7 @@ export default async function AccountPage() {
           <h1 className="text-h1">{account.name}</h1>
           <p className="mt-1 text-ink-2">{account.email}</p>
         </div>
-        <form action={signOutAction} method="post">
+        <form action={signOutAction}>
           <SubmitKey variant="plain">Sign out</SubmitKey>
         </form>
       </div>

@@ -8,7 +8,7 @@ import { SubmitKey } from "@/components/ui/SubmitKey";
 export function NameForm({ name, action }: { name: string; action: FormAction }) {
   const [result, send] = useActionState(action, null);
   return (
-    <form action={send} method="post" className="mt-4 grid gap-4">
+    <form action={send} className="mt-4 grid gap-4">
       {/* A new default only counts for a new field. */}
       <Field
         key={name}

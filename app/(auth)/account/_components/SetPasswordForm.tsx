@@ -10,7 +10,7 @@ type SetPasswordFormProps = { email: string; asksPresent: boolean; isFirst: bool
 export function SetPasswordForm({ email, asksPresent, isFirst, action }: SetPasswordFormProps) {
   const [result, send] = useActionState(action, null);
   return (
-    <form action={send} method="post" className="mt-4 grid gap-4">
+    <form action={send} className="mt-4 grid gap-4">
       {/* Password keepers file a password under the address beside it. */}
       <input type="hidden" autoComplete="username" defaultValue={email} />
       {asksPresent && (

@@ -28,7 +28,7 @@ export function FollowLinkForm({ action, email, token, back }: FollowLinkFormPro
     );
   }
   return (
-    <form action={send} method="post" className="mt-6">
+    <form action={send} className="mt-6">
       <input type="hidden" name="email" value={email} />
       <input type="hidden" name="token" value={token} />
       {back && <input type="hidden" name="back" value={back} />}

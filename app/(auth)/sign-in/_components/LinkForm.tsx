@@ -12,7 +12,7 @@ export function LinkForm({ action, back }: LinkFormProps) {
   const [result, send] = useActionState(action, null);
   const message = messageOf(result);
   return (
-    <form action={send} method="post" className="mt-5 grid gap-5">
+    <form action={send} className="mt-5 grid gap-5">
       {back && <input type="hidden" name="back" value={back} />}
       {message && (
         <Notice tone="minus" fact={message} live>

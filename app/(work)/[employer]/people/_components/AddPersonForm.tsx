@@ -29,7 +29,7 @@ export function AddPersonForm({ employer, action }: { employer: string; action: 
   return (
     <section aria-labelledby="add">
       <SectionHead title="Add a person" id="add" />
-      <form action={send} method="post" className="mt-4 grid gap-4">
+      <form action={send} className="mt-4 grid gap-4">
         <input type="hidden" name="employer" value={employer} />
         <Field
           label="Name"

@@ -22,7 +22,7 @@ export function GrantRoleForm({ employer, personId, person, held, action }: Gran
   const message = messageOf(result);
   if (open.length === 0) return <span className="text-ink-2">holds every role</span>;
   return (
-    <form action={send} method="post" className="grid gap-2">
+    <form action={send} className="grid gap-2">
       <input type="hidden" name="employer" value={employer} />
       <input type="hidden" name="personId" value={personId} />
       <div className="flex flex-wrap items-center gap-2">

@@ -30,7 +30,7 @@ function EndRole({ employer, person, held, end }: EndRoleProps) {
   const [result, send] = useActionState(end, null);
   const message = messageOf(result);
   return (
-    <form action={send} method="post" className="flex flex-wrap items-center gap-2">
+    <form action={send} className="flex flex-wrap items-center gap-2">
       <input type="hidden" name="employer" value={employer} />
       <input type="hidden" name="grantId" value={held.grantId} />
       <SubmitKey variant="plain" size="tiny" aria-label={`End the role ${held.role} of ${person}`}>

@@ -30,7 +30,7 @@ export function RecordTrainingForm({ employer, people, action }: RecordTrainingF
   return (
     <section aria-labelledby="record-training">
       <SectionHead title="Record a training" id="record-training" />
-      <form action={send} method="post" className="mt-4 grid gap-4">
+      <form action={send} className="mt-4 grid gap-4">
         <input type="hidden" name="employer" value={employer} />
         <Select
           label="Technician"
