@@ -2,7 +2,12 @@
 import PgBoss from "pg-boss";
 import { DEAD_LETTERS, JOBS, JOBS_SCHEMA, JOB_NAMES } from "@/lib/jobs/jobs";
 
-const boss = new PgBoss({ connectionString: process.env.OWNER_DATABASE_URL, schema: JOBS_SCHEMA, supervise: false, schedule: false });
+const boss = new PgBoss({
+  connectionString: process.env.OWNER_DATABASE_URL,
+  schema: JOBS_SCHEMA,
+  supervise: false,
+  schedule: false,
+});
 await boss.start();
 await boss.createQueue(DEAD_LETTERS, { name: DEAD_LETTERS });
 for (const name of JOB_NAMES) {

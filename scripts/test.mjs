@@ -90,7 +90,8 @@ async function browserLane(tally, cluster, note) {
     const env = { ...process.env, ...settings, PORT: String(port), NODE_ENV: "production", NEXT_DIST_DIR: DIST_DIR };
     await prepareDatabase(root, env);
     await demonstration.makeIssuerKey(root, settings);
-    await demonstration.seedDemonstration(root, path.join(own, "demo-seeded"), env, path.join(logs, "seed.log"));
+    const mark = path.join(own, "demo-seeded");
+    await demonstration.seedDemonstration(root, mark, processSettings("web", env), path.join(logs, "seed.log"));
     const processes = new Processes(root, logs, note, { onEnd: (reason) => tally.fail("running product", reason) });
     demonstration.startStandIns(processes, own, settings, process.env);
     processes.start("worker", [...demonstration.TYPESCRIPT, "lib/worker/main.ts"], processSettings("worker", env));
@@ -113,8 +114,9 @@ async function freshSettings(cluster, database, port) {
   return demonstration.demonstrationSettings(own, cluster.urls(database), `http://127.0.0.1:${port}`);
 }
 
-// What a person has set for an installation of their own must not reach the tests.
-const testSettings = (settings) => ({ ...process.env, ...settings, NODE_ENV: "test" });
+// The database of an installation that this shell happens to name must not reach the tests.
+const NO_DATABASE = { OWNER_DATABASE_URL: "", DATABASE_URL: "", WORKER_DATABASE_URL: "" };
+const testSettings = (settings) => ({ ...process.env, ...NO_DATABASE, ...settings, NODE_ENV: "test" });
 const buildSettings = () =>
   processSettings("build", { ...process.env, NODE_ENV: "production", NEXT_DIST_DIR: DIST_DIR });
 

@@ -2,6 +2,7 @@ import fs from "node:fs";
 import path from "node:path";
 import { lastLines, run } from "./run.mjs";
 import { Refusal, say } from "./say.mjs";
+import { isStopping } from "./shutdown.mjs";
 
 /** Counts what passed and what failed: one for every step, one for every test of a test run. */
 export class Tally {
@@ -31,6 +32,8 @@ export class Tally {
   }
 
   fail(name, reason) {
+    // Whoever stops the run ends its commands: that says nothing about the project.
+    if (isStopping()) return;
     this.failed += 1;
     say(`FAILED  ${name}\n${reason}`);
   }

@@ -70,7 +70,7 @@ export async function makeIssuerKey(root, settings) {
 
 /** Fills an empty database with the demo firm, once in the life of the database. */
 export async function seedDemonstration(root, mark, env, log) {
-  if (fs.existsSync(mark) || !fs.existsSync(path.join(root, "scripts", "seed.ts"))) return;
+  if (fs.existsSync(mark)) return;
   say("Seeding the demo firm ...");
   await mustRun("Seeding", "node", [...TYPESCRIPT, "scripts/seed.ts"], { cwd: root, env, log });
   fs.writeFileSync(mark, "");
