@@ -17,9 +17,14 @@ export function NameMenu({
   children?: ReactNode;
 }) {
   const label = (
-    <span className="block text-right text-[0.875rem] leading-[1.125rem]">
-      <span className="block font-semibold">{name}</span>
-      {detail && <span className="block text-ink-2">{detail}</span>}
+    <span className="flex items-center gap-2.5">
+      <span className="block text-right text-[0.875rem] leading-[1.125rem]">
+        <span className="block font-semibold">{name}</span>
+        {detail && <span className="block text-ink-2">{detail}</span>}
+      </span>
+      <svg width="12" height="8" viewBox="0 0 12 8" aria-hidden>
+        <path d="M1 1l5 5 5-5" fill="none" stroke="currentColor" strokeWidth="2" />
+      </svg>
     </span>
   );
   return (

@@ -46,7 +46,7 @@ export function Th({
       {sort ? (
         <Link
           href={sort.href}
-          className="inline-flex min-h-[28px] items-center gap-1.5 underline-offset-4 hover:underline"
+          className="inline-flex min-h-[28px] items-end gap-1.5 underline-offset-4 hover:underline"
         >
           {sort.order && <span aria-hidden>{sort.order === "up" ? "▲" : "▼"}</span>}
           {children}
