@@ -14,6 +14,8 @@ type NumberInputProps = {
   /** Takes whole numbers only. */
   whole?: boolean;
   signed?: boolean;
+  /** Very small values read better as a power of ten. */
+  scientific?: boolean;
   className?: string;
 };
 
@@ -28,11 +30,13 @@ export function NumberInput({
   decimals = 0,
   whole,
   signed,
+  scientific,
   className,
 }: NumberInputProps) {
   const [typed, setTyped] = useState<string | null>(null);
   const [error, setError] = useState<string | null>(null);
-  const range = `${formatNumber(from, decimals)} to ${formatNumber(to, decimals)}${unit ? ` ${unit}` : ""}`;
+  const shown = (number: number) => (scientific ? powerOfTen(number) : formatNumber(number, decimals));
+  const range = `${shown(from)} to ${shown(to)}${unit ? ` ${unit}` : ""}`;
 
   const leave = (text: string) => {
     const number = Number(
@@ -56,7 +60,7 @@ export function NumberInput({
       help={range}
       error={error}
       signed={signed}
-      value={typed ?? formatNumber(value, decimals)}
+      value={typed ?? shown(value)}
       onChange={(text) => {
         setTyped(text);
         if (!error) return;
@@ -70,3 +74,5 @@ export function NumberInput({
     />
   );
 }
+
+const powerOfTen = (number: number) => number.toExponential().replace("e-", "e\u2212").replace("e+", "e");

@@ -36,70 +36,80 @@ export function TwoCodes({
   const exact = dopplerHz === 0;
   const name = a === b ? `code ${a} with itself` : `code ${a} against code ${b}`;
   return (
-    <div className="calculator grid gap-x-8 gap-y-5 desk:grid-cols-[1fr_15rem]">
-      <div className="min-w-0">
-        <LinePlot
-          x={{ name: "lag, chip", from: 0, to: CA_LENGTH_CHIPS - 1 }}
-          y={{
-            name: exact ? "R, chip" : "|R|, chip",
-            from: exact ? -Math.max(80, reach * 0.12) : 0,
-            to: reach,
-            signed: false,
-          }}
-          curves={[{ name, role: "subject", x: lags, y: values }]}
-          bands={exact ? [FLOOR] : undefined}
-          summary={`Correlation of ${name}: highest ${formatNumber(values[top]!, exact ? 0 : 1)} chip at lag ${top} chip, ${level(values[top]!)}.`}
-          cursor={{
-            index: lag,
-            onMove: setChosen,
-            lines: (index) => [
-              `lag ${index} chip`,
-              `R ${formatNumber(values[index]!, exact ? 0 : 1)} chip`,
-              level(values[index]!),
-            ],
-          }}
-          height={260}
-        />
-        <Formula
-          tex={
-            exact
-              ? String.raw`R_{ab}[k]=\sum_{n=0}^{1022} a_n\,b_{(n+k)\bmod 1023}`
-              : String.raw`R_{ab}[k]=\Bigl|\sum_{n} a_n\,b_{(n+k)\bmod 1023}\,e^{\,j2\pi \Delta f\,n/R_c}\Bigr|`
-          }
-          source="C/A codes: IS-GPS-200, 3.3.2.3 and Table 3-Ia. Three values 63, −1, −65 without Doppler difference: Gold, 1967."
-        />
-      </div>
-      <div className="grid content-start gap-4">
-        <div className="border-b-hair border-rule pb-3">
-          <p className="text-label font-normal text-ink-2">Highest agreement</p>
-          <p>
-            <Value value={values[top]!} decimals={exact ? 0 : 1} unit="chip" size="m" />
-          </p>
-          <p className="text-dense text-ink-2 figures">
-            {level(values[top]!)} at lag {top} chip
-          </p>
+    <div className="@container">
+      <div className="grid gap-x-8 gap-y-5 @3xl:grid-cols-[1fr_15rem]">
+        <div className="min-w-0">
+          <LinePlot
+            x={{ name: "lag, chip", from: 0, to: CA_LENGTH_CHIPS - 1 }}
+            y={{
+              name: exact ? "R, chip" : "|R|, chip",
+              from: exact ? -Math.max(80, reach * 0.12) : 0,
+              to: reach,
+              signed: false,
+            }}
+            curves={[{ name, role: "subject", x: lags, y: values }]}
+            bands={exact ? [FLOOR] : undefined}
+            summary={`Correlation of ${name}: highest ${formatNumber(values[top]!, exact ? 0 : 1)} chip at lag ${top} chip, ${level(values[top]!)}.`}
+            cursor={{
+              index: lag,
+              onMove: setChosen,
+              lines: (index) => [
+                `lag ${index} chip`,
+                `R ${formatNumber(values[index]!, exact ? 0 : 1)} chip`,
+                level(values[index]!),
+              ],
+            }}
+            height={260}
+          />
+          <Formula
+            tex={
+              exact
+                ? String.raw`R_{ab}[k]=\sum_{n=0}^{1022} a_n\,b_{(n+k)\bmod 1023}`
+                : String.raw`R_{ab}[k]=\Bigl|\sum_{n} a_n\,b_{(n+k)\bmod 1023}\,e^{\,j2\pi \Delta f\,n/R_c}\Bigr|`
+            }
+            source="C/A codes: IS-GPS-200, 3.3.2.3 and Table 3-Ia. Three values 63, −1, −65 without Doppler difference: Gold, 1967."
+          />
         </div>
-        <NumberInput label="Code a, PRN" value={a} onChange={setA} from={1} to={32} whole />
-        <NumberInput label="Code b, PRN" value={b} onChange={setB} from={1} to={32} whole />
-        <NumberInput
-          label="Doppler difference"
-          unit="Hz"
-          value={dopplerHz}
-          onChange={setDopplerHz}
-          from={-10_000}
-          to={10_000}
-          signed
-        />
-        <NumberInput
-          label="Coherent time"
-          unit="ms"
-          value={coherentMs}
-          onChange={setCoherentMs}
-          from={1}
-          to={20}
-          whole
-        />
-        <NumberInput label="Lag" unit="chip" value={lag} onChange={setChosen} from={0} to={CA_LENGTH_CHIPS - 1} whole />
+        <div className="grid grid-cols-2 content-start gap-4 @3xl:grid-cols-1">
+          <div className="col-span-full border-b-hair border-rule pb-3">
+            <p className="text-label font-normal text-ink-2">Highest agreement</p>
+            <p>
+              <Value value={values[top]!} decimals={exact ? 0 : 1} unit="chip" size="m" />
+            </p>
+            <p className="text-dense text-ink-2 figures">
+              {level(values[top]!)} at lag {top} chip
+            </p>
+          </div>
+          <NumberInput label="Code a, PRN" value={a} onChange={setA} from={1} to={32} whole />
+          <NumberInput label="Code b, PRN" value={b} onChange={setB} from={1} to={32} whole />
+          <NumberInput
+            label="Doppler difference"
+            unit="Hz"
+            value={dopplerHz}
+            onChange={setDopplerHz}
+            from={-10_000}
+            to={10_000}
+            signed
+          />
+          <NumberInput
+            label="Coherent time"
+            unit="ms"
+            value={coherentMs}
+            onChange={setCoherentMs}
+            from={1}
+            to={20}
+            whole
+          />
+          <NumberInput
+            label="Lag"
+            unit="chip"
+            value={lag}
+            onChange={setChosen}
+            from={0}
+            to={CA_LENGTH_CHIPS - 1}
+            whole
+          />
+        </div>
       </div>
     </div>
   );

@@ -65,7 +65,7 @@ export function CaseDesk({
   };
   const steps: Step[] = STEPS.map(({ id, label }) => ({ id, label, state: id === step ? "current" : "todo" }));
   return (
-    <div className="flex flex-1 flex-col desk:h-[calc(100dvh-63px-var(--banner,0px))]">
+    <div className="flex flex-1 flex-col desk:flex-none desk:h-[calc(100dvh-63px-var(--banner,0px))]">
       <WorkBar
         eyebrow={`Sitting S-${open.sittingNumber}, case ${open.number} of ${open.ofCases}`}
         title={`${open.code} ${open.view.title}`}

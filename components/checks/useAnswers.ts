@@ -33,10 +33,13 @@ export function useAnswers({ caseId, address, server, closed }: Options) {
   const sent = useRef(server.revision);
   const timer = useRef<ReturnType<typeof setTimeout> | null>(null);
   const sendRef = useRef<() => Promise<void>>(async () => undefined);
+  const underWay = useRef(false);
 
   const send = useCallback(async () => {
     const { answers, revision } = latest.current;
-    if (closed || revision <= sent.current) return;
+    // What is typed meanwhile is sent when the answer to this one is there.
+    if (closed || revision <= sent.current || underWay.current) return;
+    underWay.current = true;
     setSaved((before) => ({ ...before, state: before.state === "kept" ? "kept" : "saving" }));
     try {
       const response = await fetch(address, {
@@ -56,6 +59,8 @@ export function useAnswers({ caseId, address, server, closed }: Options) {
     } catch {
       setSaved((before) => ({ ...before, state: "kept", since: before.since ?? clock(new Date()) }));
       schedule(AGAIN_MS);
+    } finally {
+      underWay.current = false;
     }
     function schedule(ms: number) {
       if (timer.current) clearTimeout(timer.current);

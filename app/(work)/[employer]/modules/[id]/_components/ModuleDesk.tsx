@@ -66,7 +66,7 @@ export function ModuleDesk({ employer, draft, reading: first, nonce, release }: 
           ? null
           : "Saving first";
   return (
-    <div className="flex flex-1 flex-col desk:h-[calc(100dvh-63px-var(--banner,0px))]">
+    <div className="flex flex-1 flex-col desk:flex-none desk:h-[calc(100dvh-63px-var(--banner,0px))]">
       <WorkBar
         title={`${draft.code} ${reading.title ?? draft.title}`}
         aside={last ? `Draft after release ${last.number}` : "Draft, never released"}

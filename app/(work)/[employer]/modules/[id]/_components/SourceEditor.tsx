@@ -1,6 +1,6 @@
 "use client";
 import { markdown } from "@codemirror/lang-markdown";
-import { linter, lintGutter, type Diagnostic } from "@codemirror/lint";
+import { linter, type Diagnostic } from "@codemirror/lint";
 import { EditorView } from "@codemirror/view";
 import CodeMirror, { type ReactCodeMirrorRef } from "@uiw/react-codemirror";
 import { forwardRef, useMemo } from "react";
@@ -27,7 +27,6 @@ export const SourceEditor = forwardRef<ReactCodeMirrorRef, SourceEditorProps>(fu
       EditorView.lineWrapping,
       EditorView.cspNonce.of(nonce),
       EditorView.contentAttributes.of({ "aria-label": "Source of the module", spellcheck: "false" }),
-      lintGutter(),
       linter((view) => problems.map((problem) => diagnostic(view, problem)), { delay: 0 }),
     ],
     [nonce, problems],

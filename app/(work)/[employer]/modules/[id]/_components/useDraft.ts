@@ -30,8 +30,9 @@ export function useDraft(options: Options) {
   const timers = useRef<{ save?: ReturnType<typeof setTimeout>; check?: ReturnType<typeof setTimeout> }>({});
   const checkRun = useRef(0);
   const saveRef = useRef<() => Promise<void>>(async () => undefined);
+  const underWay = useRef<Promise<void> | null>(null);
 
-  const save = useCallback(async () => {
+  const storeOnce = useCallback(async () => {
     const { source: text, title, revision: seen, stored } = state.current;
     if (text === stored) return;
     setSaved((before) => ({ ...before, state: "saving" }));
@@ -53,6 +54,15 @@ export function useDraft(options: Options) {
     }
   }, [base]);
 
+  // One at a time: a second save with the revision of the first would be refused as somebody else's.
+  const save = useCallback(async () => {
+    while (underWay.current) await underWay.current;
+    underWay.current = storeOnce().finally(() => {
+      underWay.current = null;
+    });
+    await underWay.current;
+  }, [storeOnce]);
+
   const check = useCallback(async () => {
     checkRun.current += 1;
     const run = checkRun.current;
@@ -62,7 +72,8 @@ export function useDraft(options: Options) {
       if (!response.ok || run !== checkRun.current) return;
       const next = (await response.json()) as DraftReading;
       if (next.title) state.current.title = next.title;
-      setReading(next);
+      // A text with an error has no plan of checks; the cards of the last good one stay.
+      setReading((before) => (next.title === null ? { ...next, checkCards: before.checkCards } : next));
     } catch {
       // Without a signal the last reading stays; saving says that there is none.
     } finally {
