@@ -3,6 +3,7 @@ import type { CheckKind, ParameterSpec, QuantityDefinition } from "@/lib/checks/
 import { KINDS } from "@/lib/checks/registry";
 import { FRONT_MATTER_EXAMPLES } from "@/lib/mdx/frontMatter";
 import { TAGS, type TagName } from "@/lib/mdx/tags";
+import { toleranceText } from "@/lib/mdx/toleranceText";
 
 /** One offer of the editor: `insert` is what is typed for the lead. */
 export type CompletionRow = { label: string; detail: string; insert: string };
@@ -59,6 +60,6 @@ function parameterRow(spec: ParameterSpec): CompletionRow {
 }
 
 function quantityRow({ id, label, tolerance, critical }: QuantityDefinition): CompletionRow {
-  const attributes = `${tolerance ? ` tolerance="${tolerance.value} ${tolerance.unit}"` : ""}${critical ? " critical" : ""}`;
+  const attributes = `${tolerance ? ` tolerance="${toleranceText(tolerance)}"` : ""}${critical ? " critical" : ""}`;
   return { label: id, detail: label, insert: `<Quantity of="${id}"${attributes} />` };
 }

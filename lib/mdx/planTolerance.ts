@@ -4,6 +4,7 @@ import { parseQuantity } from "@/lib/checks/parseQuantity";
 import { UNITS, type Unit } from "@/lib/gnss/units";
 import { numberValue } from "@/lib/mdx/attributeValue";
 import { problemAt, type Problem, type Range, type Repair } from "@/lib/mdx/problem";
+import { toleranceText } from "@/lib/mdx/toleranceText";
 
 /** The tolerance a lead wrote, in the unit of the kind; a fault says what could be compared and offers the kind's own. */
 export function planTolerance(
@@ -18,7 +19,7 @@ export function planTolerance(
     return refuse(message, { label: "Delete tolerance", text: "", ...range });
   }
   const text = written.replace(/^(±|\+\/-|\+-)\s*/, "");
-  const example = `${usual.value} ${formatUnit(usual.unit)}`.trim();
+  const example = toleranceText(usual);
   const repair = { label: `Write “${example}”`, text: `tolerance="${example}"`, ...range };
   const other = unitOfAnotherKind(text, bounds.unit);
   if (other) return refuse(`Tolerance is in ${other}, but ${whatFits(definition, bounds.unit)}`, repair);

@@ -1,0 +1,55 @@
+import { expect, test } from "vitest";
+import { CAUTIONS } from "@/components/mdx/cautions";
+import { components } from "@/components/mdx/components";
+import { KINDS } from "@/lib/checks/registry";
+import { completions } from "@/lib/mdx/completions";
+import { parseModule } from "@/lib/mdx/parseModule";
+import { planChecks } from "@/lib/mdx/planChecks";
+import { CAUTION_TOPICS, LATER_KINDS, LATER_TAGS, TAGS } from "@/lib/mdx/tags";
+
+test("every tag has its component and every component its tag", () => {
+  expect(Object.keys(components).sort()).toEqual(Object.keys(TAGS).sort());
+  expect(Object.entries(TAGS).filter(([name, tag]) => tag.name !== name)).toEqual([]);
+});
+
+test("every caution topic has its text and every text its topic", () => {
+  expect(Object.keys(CAUTIONS).sort()).toEqual([...CAUTION_TOPICS].sort());
+});
+
+test("what the language has later is not offered now", () => {
+  expect(LATER_TAGS.filter((name) => Object.hasOwn(TAGS, name))).toEqual([]);
+  expect(LATER_KINDS.filter((id) => KINDS.some((kind) => kind.id === id))).toEqual([]);
+});
+
+test.each([...LATER_TAGS])("<%s> is refused as not available", (name) => {
+  const { problems } = parseModule(`Text.\n\n<${name} />`);
+  expect(problems.at(-1)).toMatchObject({ line: 3, column: 1, rule: "not-available" });
+});
+
+test.each([...LATER_KINDS])("the kind %s is refused as not available", (kind) => {
+  const { checks } = parseModule(`<Check id="a" kind="${kind}">x</Check>`);
+  expect(planChecks(checks, KINDS).problems[0]?.message).toMatch(/not available in this release/);
+});
+
+test("what the editor offers can be written as it is", () => {
+  const offers = completions();
+  for (const { label, insert } of offers.tags) {
+    if (label === "Check" || label === "Quantity") continue;
+    expect(parseModule(`Text.\n\n${insert}`).problems.filter(({ rule }) => rule !== "front-matter")).toEqual([]);
+  }
+  for (const kind of KINDS) {
+    const attributes = offers.kindAttributes[kind.id]?.map(({ insert }) => insert).join(" ");
+    const quantities = offers.quantities[kind.id]?.map(({ insert }) => insert).join("\n");
+    const { checks, problems } = parseModule(`<Check id="a" kind="${kind.id}" ${attributes}>\n${quantities}\n</Check>`);
+    const plan = planChecks(checks, KINDS);
+    expect([...problems, ...plan.problems].filter(({ rule }) => rule !== "front-matter")).toEqual([]);
+    expect(plan.plans[0]?.parameters).toEqual(
+      Object.fromEntries(kind.parameters.map(({ name, default: value }) => [name, value])),
+    );
+  }
+});
+
+test("the front matter that the editor offers line by line is a whole one", () => {
+  const lines = completions().frontMatter.map(({ insert }) => insert);
+  expect(parseModule(`---\n${lines.join("\n")}\n---\n`).problems).toEqual([]);
+});
