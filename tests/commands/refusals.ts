@@ -17,7 +17,7 @@ type Refusals = {
 
 /** Every role but the one allowed is refused, every role of another firm sees no such row, and neither leaves a trace. */
 export function refusals({ allowed, setting, act, noSuchId = NO_SUCH_ID }: Refusals): void {
-  test(`refuses everybody of the firm but a ${allowed}, also whoever was one`, async () => {
+  test(`refuses every role of the firm but ${allowed}, also whoever held it`, async () => {
     const { firm, id } = setting();
     const refused = ROLES.filter((role) => role !== allowed).map((role) => firm[role]);
     await expectRefused([...refused, { ...firm[allowed], roles: [] }], (actor) => act(actor, id), "ForbiddenError");
