@@ -43,8 +43,8 @@ function askedQuantity(definition: QuantityDefinition, named?: CheckPlan["quanti
 }
 
 function toleranceOf(definition: QuantityDefinition, named?: CheckPlan["quantities"][number]): number {
-  if (!definition.tolerance) return NaN;
-  if (!named?.tolerance) return definition.tolerance.value;
+  if (!named?.tolerance) return definition.tolerance?.value ?? NaN;
+  if (!definition.tolerance) throw new RangeError(`askedQuantities: ${definition.id} takes no tolerance`);
   const value = convert(named.tolerance.value, named.tolerance.unit, definition.tolerance.unit);
   const range = definition.toleranceRange;
   if (!range || !(value >= range.from && value <= range.to)) {

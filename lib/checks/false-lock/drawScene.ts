@@ -1,4 +1,5 @@
 import { clockErrorHz } from "@/lib/gnss/doppler";
+import { falsePeaks } from "@/lib/gnss/falseLock";
 import type { Scene, SceneSatellite } from "@/lib/gnss/scene";
 import { seededRandom, type Random } from "@/lib/numeric/random";
 import { drawRateHz } from "../captureRate";
@@ -12,6 +13,7 @@ import type { FalseLockParameters } from "./parameters";
 import type { Verdict } from "./quantities";
 import { REFERENCE_SEARCH, RESOLUTION_HZ } from "./referenceSearch";
 import { EQUAL_WITHIN_DB, strongestFalsePeaks, type FalsePeakPlace } from "./strongestFalsePeaks";
+import { STRONG_FROM_DBHZ } from "./unborrowedPeak";
 
 /** One satellite of the sky plot, with what the receiver reports of it. */
 export type ListedSatellite = SkyPlace & { prn: number; verdict: Verdict; reportedCn0DbHz: number | null };
@@ -25,36 +27,34 @@ export type FalseLockTruth = {
   wall: Wall;
   /** False peaks of the victim, highest first; those within 1 dB of the first count as the one found. */
   falsePeaks: FalsePeakPlace[];
+  /** The satellite in open sky that is there or not, and the least C/N0 it has when it is. */
+  weakPrn: number;
+  weakestDbHz: number;
   startedAt: string;
 };
-
-export type DrawnScene = { truth: FalseLockTruth; draws: number };
 
 const DURATION_MS = 100;
 const MOTION_HZ = 4500;
 const CLOCK_PPM = 0.5; // a receiver that tracks knows its own clock; the search window is 6 kHz
 const WORST_PEAK_DB = { from: -22, to: -21 } as const;
-const STRONG_FROM_DBHZ = 42; // false peaks of these come near the threshold
 const CLEAR_OF_PARENT_HZ = 2 * RESOLUTION_HZ; // data bits spread a false peak over a bin to either side
 const LEAST_DETECTION = 0.99;
 const VICTIMS_TRIED = 6;
 
 /**
- * Draws until the scene can be judged: no genuine signal lies where a false peak of the strong satellite may lie (so none
- * shares a bin with one, whatever their lags), the weak genuine one is found by the search asked for, and one satellite
- * behind the wall has a false peak of -21 to -22 dB.
+ * One scene, or null when it could not be judged: no genuine signal may lie where a false peak of the strong satellite may
+ * lie (so none shares a bin with one, whatever their lags), the weak genuine one must be found by the search asked for, and
+ * a satellite behind the wall must have a false peak of -21 to -22 dB.
  */
-export function drawScene(seedHex: string, parameters: FalseLockParameters): DrawnScene {
+export function drawScene(seedHex: string, parameters: FalseLockParameters, draw: number): FalseLockTruth | null {
   const first = seededRandom(seedHex, "false-lock@1/case");
   const hasDecoy = first.uniform() * 100 < parameters.decoy; // before the draws, so that refusing does not move the share
-  for (let draws = 1; draws <= 20_000; draws++) {
-    const random = seededRandom(seedHex, `false-lock@1/draw-${draws}`);
-    const signals = drawSignals(parameters, random);
-    if (!canBeToldApart(signals)) continue;
-    const victim = drawVictim(signals, random);
-    if (victim) return { truth: assemble(parameters, signals, victim, hasDecoy, random), draws };
-  }
-  throw new Error("false-lock: no scene that can be judged in 20 000 draws");
+  const random = seededRandom(seedHex, `false-lock@1/draw-${draw}`);
+  const signals = drawSignals(parameters, random);
+  if (!canBeToldApart(signals)) return null;
+  const rateHz = drawRateHz(parameters.rate, random);
+  const victim = drawVictim(signals, rateHz, random);
+  return victim && assemble(signals, victim, hasDecoy, rateHz, parameters.decoyCn0[0], random);
 }
 
 type Signals = { parent: SceneSatellite; others: SceneSatellite[]; decoy: SceneSatellite; free: number[] };
@@ -88,22 +88,34 @@ function canBeToldApart({ parent, others, decoy }: Signals): boolean {
   );
 }
 
-function drawVictim({ parent, free }: Signals, random: Random): Victim | null {
+function drawVictim({ parent, free }: Signals, rateHz: number, random: Random): Victim | null {
   const candidates = random.shuffle(free);
-  for (const prn of candidates.slice(0, VICTIMS_TRIED)) {
-    const peaks = strongestFalsePeaks(parent, prn);
-    const worst = peaks[0].levelDb;
-    if (worst < WORST_PEAK_DB.from || worst > WORST_PEAK_DB.to) continue;
-    return { prn, absentPrn: candidates[candidates.length - 1], falsePeaks: peaks };
-  }
-  return null;
+  const prn = candidates.slice(0, VICTIMS_TRIED).find((candidate) => isWorstPair(parent, candidate));
+  if (prn === undefined) return null;
+  return { prn, absentPrn: candidates[candidates.length - 1], falsePeaks: strongestFalsePeaks(parent, prn, rateHz) };
+}
+
+/** Chip by chip, as handbooks print the levels of code pairs. */
+function isWorstPair({ prn, dopplerHz, cn0DbHz }: SceneSatellite, victimPrn: number): boolean {
+  const { coherentMs, sums, dopplerHalfWidthHz } = REFERENCE_SEARCH;
+  const [worst] = falsePeaks({
+    parentPrn: prn,
+    victimPrn,
+    parentDopplerHz: dopplerHz,
+    parentCn0DbHz: cn0DbHz,
+    coherentMs,
+    sums,
+    dopplerHalfWidthHz,
+  });
+  return worst.levelDb >= WORST_PEAK_DB.from && worst.levelDb <= WORST_PEAK_DB.to;
 }
 
 function assemble(
-  parameters: FalseLockParameters,
   { parent, others, decoy }: Signals,
   victim: Victim,
   hasDecoy: boolean,
+  rateHz: number,
+  weakestDbHz: number,
   random: Random,
 ): FalseLockTruth {
   const wall = drawWall(random);
@@ -130,7 +142,7 @@ function assemble(
     },
   ];
   const satellites = [parent, ...others, ...(hasDecoy ? [decoy] : [])].sort((a, b) => a.prn - b.prn);
-  const scene: Scene = { rateHz: drawRateHz(parameters.rate, random), durationMs: DURATION_MS, ifHz: 0, satellites };
+  const scene: Scene = { rateHz, durationMs: DURATION_MS, ifHz: 0, satellites };
   return {
     scene,
     parentPrn: parent.prn,
@@ -138,6 +150,8 @@ function assemble(
     listed: listed.sort((a, b) => a.prn - b.prn),
     wall,
     falsePeaks: victim.falsePeaks,
+    weakPrn: decoy.prn,
+    weakestDbHz,
     startedAt: drawStart(random),
   };
 }

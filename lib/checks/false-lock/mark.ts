@@ -1,7 +1,6 @@
 import type { Answers, CheckPlan, Marking, Progress } from "../kind";
 import { searchCapture } from "../searchCapture";
-import { makeCapture } from "./buildCase";
-import { drawScene } from "./drawScene";
+import { drawCase } from "./drawCase";
 import { markAnswers } from "./markAnswers";
 import type { FalseLockParameters } from "./parameters";
 import { REFERENCE_SEARCH } from "./referenceSearch";
@@ -13,7 +12,7 @@ export function mark(
   answers: Answers,
   progress?: Progress,
 ): Marking {
-  const { truth } = drawScene(seedHex, plan.parameters);
-  const searched = searchCapture(makeCapture(seedHex, truth, progress), REFERENCE_SEARCH, progress);
+  const { truth, capture } = drawCase(seedHex, plan.parameters, progress);
+  const searched = searchCapture(capture, REFERENCE_SEARCH, progress);
   return markAnswers(truth, plan, answers, searched);
 }

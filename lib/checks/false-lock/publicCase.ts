@@ -11,14 +11,20 @@ import { REFERENCE_SEARCH } from "./referenceSearch";
 import { EQUAL_WITHIN_DB } from "./strongestFalsePeaks";
 
 /** Field by field. Sky plot and report look the same whether the weak satellite is there or not. */
-export function publicCase({ scene, listed, wall }: FalseLockTruth, plan: CheckPlan<FalseLockParameters>): PublicCase {
+export function publicCase(
+  { scene, listed, wall, weakestDbHz }: FalseLockTruth,
+  plan: CheckPlan<FalseLockParameters>,
+): PublicCase {
   const asked = askedQuantities(falseLockQuantities, plan);
   const { coherentMs, sums, dopplerHalfWidthHz, dopplerStepHz, falseAlarmPerSearch } = REFERENCE_SEARCH;
   return {
     kind: "false-lock",
     version: 1,
     title: plan.title,
-    brief: BRIEF,
+    brief: [
+      ...BRIEF,
+      `A weak satellite in open sky may be in the capture although the receiver has not found it; it then has at least ${formatUnderstood(weakestDbHz, "dB-Hz")}.`,
+    ],
     given: [
       { label: "Signal", value: "GPS L1 C/A" },
       { label: "Centre", value: "1\u2009575.42\u00a0MHz" },
@@ -60,6 +66,7 @@ export function publicCase({ scene, listed, wall }: FalseLockTruth, plan: CheckP
         cn0DbHz: reportedCn0DbHz,
       })),
       search: { coherentMs, sums, dopplerHalfWidthHz, dopplerStepHz, falseAlarmPerSearch },
+      weakestDbHz,
     },
   };
 }
@@ -67,7 +74,6 @@ export function publicCase({ scene, listed, wall }: FalseLockTruth, plan: CheckP
 const BRIEF = [
   "A receiver beside a wall reports a satellite that stands behind the wall. Find out from the capture whether it is there, and what every other satellite of the sky plot is.",
   "Genuine: the satellite's own signal is in the capture, reported or not. Cross-correlation: reported as tracked, but the lock is on another satellite's code. Absent: not reported as tracked, and its own signal is not in the capture, whatever peaks another satellite's code raises in its search.",
-  "A weak satellite in open sky may be in the capture although the receiver has not found it.",
   "A false lock has several peaks of nearly the same height. Give the Doppler and the apparent C/N0 of one of the highest.",
 ];
 

@@ -20,7 +20,10 @@ export const satellites: CheckKind<SatellitesParameters, SatellitesTruth> = {
   parametersProblem: ({ cn0, foundFrom }) =>
     cn0[1] >= foundFrom + 1
       ? null
-      : { name: "foundFrom", message: "C/N0 must reach at least 1 dB above the level from which satellites must be found." },
+      : {
+          name: "foundFrom",
+          message: "C/N0 must reach at least 1 dB above the level from which satellites must be found.",
+        },
   build: buildCase,
   mark,
   solve,
