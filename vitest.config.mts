@@ -39,7 +39,7 @@ export default defineConfig({
           testTimeout: 30_000,
         },
       ),
-      // A built application, driven by Chromium: BASE_URL comes from scripts/test.mjs.
+      // A built application, driven by Chromium: PUBLIC_ORIGIN comes from scripts/test.mjs.
       project("browser", ["entrances", "e2e"], { fileParallelism: false, testTimeout: 240_000, hookTimeout: 120_000 }),
     ],
   },

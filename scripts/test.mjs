@@ -100,7 +100,7 @@ async function browserLane(tally, cluster, note) {
     await waitForAnswer(`${origin}/`, 300);
   });
   const chromium = programPath("chromium") ?? "";
-  if (running) await tally.tests("browser", testSettings({ ...settings, BASE_URL: origin, CHROMIUM_PATH: chromium }));
+  if (running) await tally.tests("browser", testSettings({ ...settings, CHROMIUM_PATH: chromium }));
 }
 
 const NEXT = bin("next", "dist/bin/next");
