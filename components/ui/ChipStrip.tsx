@@ -1,6 +1,10 @@
+import { classNames } from "./classNames";
+
 const INDEX_WIDTH = 18;
 const LANE_CHIPS = 32;
 const LINE = 1.5;
+/** What a phone of 320 px has between its margins. */
+const PHONE_WIDTH = 286;
 
 /** First 64 bits of a fingerprint, most significant first, in two lanes of 32. */
 export function stripLanes(fingerprint: string): (0 | 1)[][] {
@@ -17,9 +21,20 @@ export function stripLanes(fingerprint: string): (0 | 1)[][] {
  * The chip strip of a release or certificate: bit 0 is +1 and stands above the line, bit 1 is -1 and hangs below it.
  * A help to the eye and no proof; say so where it is shown.
  * @param fingerprint 64 hexadecimal figures
- * @param width drawn width in px, at least 228 (chips of 6 px)
+ * @param width drawn width in px, at least 228 (chips of 6 px); on a phone a wider strip is drawn anew, so that its
+ * figures stay legible
  */
 export function ChipStrip({ fingerprint, width = 480 }: { fingerprint: string; width?: number }) {
+  if (width <= PHONE_WIDTH) return <Strip fingerprint={fingerprint} width={width} />;
+  return (
+    <>
+      <Strip fingerprint={fingerprint} width={width} className="max-tablet:hidden" />
+      <Strip fingerprint={fingerprint} width={PHONE_WIDTH} className="tablet:hidden" />
+    </>
+  );
+}
+
+function Strip({ fingerprint, width, className }: { fingerprint: string; width: number; className?: string }) {
   const lanes = stripLanes(fingerprint);
   const hex = fingerprint.slice(0, 16).toLowerCase();
   const unit = (width - INDEX_WIDTH) / (LANE_CHIPS + 3);
@@ -34,7 +49,7 @@ export function ChipStrip({ fingerprint, width = 480 }: { fingerprint: string; w
       viewBox={`0 0 ${width} ${total.toFixed(2)}`}
       role="img"
       aria-label={`Chip strip ${hex}`}
-      className="block h-auto max-w-full select-text"
+      className={classNames("block h-auto max-w-full select-text", className)}
     >
       {lanes.map((bits, index) => (
         <Lane

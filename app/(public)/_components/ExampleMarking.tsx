@@ -37,7 +37,7 @@ const ROWS: Row[] = [
 /** Two rows of a marking record; which is within and how far off follows from the values. */
 export function ExampleMarking() {
   return (
-    <Table caption="Example of a marking record">
+    <Table caption="Example of a marking record" className="max-tablet:-mx-3">
       <thead>
         <tr>
           <Th>Quantity</Th>

@@ -22,7 +22,7 @@ test("only a whole fingerprint is drawn", () => {
 
 test("bit 0 stands above the line, bit 1 hangs below it", () => {
   const { container } = render(<ChipStrip fingerprint={ABC} width={480} />);
-  const chips = [...container.querySelectorAll("[data-bit]")];
+  const chips = [...container.querySelector("svg")!.querySelectorAll("[data-bit]")];
   const bits = stripLanes(ABC).flat();
   expect(chips.map((chip) => Number(chip.getAttribute("data-bit")))).toEqual(bits);
   const tops = chips.slice(0, 32).map((chip) => Number(chip.getAttribute("y")));
@@ -31,7 +31,7 @@ test("bit 0 stands above the line, bit 1 hangs below it", () => {
 
 test("the geometry is that of the drawing of 480 px", () => {
   const { container } = render(<ChipStrip fingerprint={ABC} width={480} />);
-  const chips = [...container.querySelectorAll("[data-bit]")];
+  const chips = [...container.querySelector("svg")!.querySelectorAll("[data-bit]")];
   const x = (at: number) => Number(chips[at].getAttribute("x"));
   // Left edges of chips 0, 8, 24 and 31 in the drawing, rounded there to hundredths.
   [18.92, 137.72, 375.32, 467.72].forEach((left, order) =>
@@ -43,7 +43,15 @@ test("the geometry is that of the drawing of 480 px", () => {
 });
 
 test("its name is the 16 figures, and they can be read beneath the groups", () => {
-  render(<ChipStrip fingerprint={ABC.toUpperCase()} />);
+  render(<ChipStrip fingerprint={ABC.toUpperCase()} width={228} />);
   expect(screen.getByRole("img").getAttribute("aria-label")).toBe("Chip strip ba7816bf8f01cfea");
   for (const group of ["BA", "78", "16", "BF", "8F", "01", "CF", "EA"]) expect(screen.getByText(group)).toBeTruthy();
+});
+
+test("on a phone a wide strip is drawn anew with figures of the same size", () => {
+  const { container } = render(<ChipStrip fingerprint={ABC} width={480} />);
+  const [wide, narrow] = [...container.querySelectorAll("svg")];
+  expect([wide.getAttribute("width"), narrow.getAttribute("width")]).toEqual(["480", "286"]);
+  expect(narrow.querySelectorAll("[data-bit]")).toHaveLength(64);
+  expect(narrow.querySelector("text")!.getAttribute("font-size")).toBe("12");
 });
