@@ -1,0 +1,51 @@
+import { makeCertificate } from "../support/certified";
+import { makeMarkingRecord, makeSitting } from "../support/chain";
+import { NOW } from "../support/clock";
+import { makeFirm } from "../support/factories";
+import { insert, ownerRows } from "../support/owner";
+
+const HASH = "0".repeat(64);
+
+/** Tables of records: what stands in them is followed and never changed. */
+export const RECORDS = [
+  "assignments",
+  "captures",
+  "case_secrets",
+  "case_views",
+  "cases",
+  "certificates",
+  "decisions",
+  "hand_ins",
+  "marking_records",
+  "questions",
+  "release_writers",
+  "releases",
+  "sittings",
+  "standings",
+  "trail_entries",
+  "trail_heads",
+  "trail_links",
+  "trainings",
+] as const;
+
+/** At least one row in every one of them. */
+export async function makeEveryRecord(): Promise<void> {
+  const firm = await makeFirm();
+  const sitting = await makeSitting(firm);
+  const { id: markingRecordId, caseId } = await makeMarkingRecord(firm, { sitting });
+  await makeCertificate(firm);
+  const { personId: askedBy } = firm.technician;
+  await insert("questions", { markingRecordId, quantity: "lag", words: "Why?", askedBy });
+  await insert("case_secrets", { caseId, sealed: Buffer.alloc(8), truthSha256: HASH, engineVersion: "1.0.0" });
+  await insert("captures", {
+    ...{ caseId, name: "a.sigmf-data", storageKey: "a", mediaType: "application/octet-stream", sizeBytes: 8 },
+    sha256: HASH,
+  });
+  await insert("trainings", {
+    ...{ employerId: firm.employer.id, trainerId: firm.lead.personId, technicianId: askedBy, endedOn: "2026-06-01" },
+    recordedBy: firm.lead.personId,
+  });
+  const [entry] = await ownerRows<{ id: string }>("SELECT min(id)::text AS id FROM trail_entries");
+  await insert("trail_links", { sequence: 1, entryId: entry!.id, entrySha256: HASH, linkSha256: HASH });
+  await insert("trail_heads", { sequence: 1, linkSha256: HASH, signedAt: NOW, signature: "none" });
+}
