@@ -4,7 +4,6 @@ import { requireActor } from "@/lib/auth/requireActor";
 import { can } from "@/lib/policies/can";
 import { checkDraft } from "@/lib/queries/checkDraft";
 import { getModule } from "@/lib/queries/getModule";
-import { headers } from "next/headers";
 import { releaseModuleAction } from "../actions";
 import { ModuleDesk } from "./_components/ModuleDesk";
 import { ReleaseList } from "./_components/ReleaseList";
@@ -21,7 +20,6 @@ export default async function ModulePage({ params }: { params: Promise<{ employe
       employer={employer}
       draft={draft}
       reading={await checkDraft(actor, id, draft.source)}
-      nonce={(await headers()).get("x-nonce") ?? ""}
       release={releaseModuleAction}
     />
   );

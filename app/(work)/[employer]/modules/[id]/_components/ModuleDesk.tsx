@@ -22,12 +22,11 @@ type ModuleDeskProps = {
   employer: string;
   draft: ModuleView;
   reading: DraftReading;
-  nonce: string;
   release: FormAction;
 };
 
 /** Source and preview side by side, problems under both; on a phone one of the two. */
-export function ModuleDesk({ employer, draft, reading: first, nonce, release }: ModuleDeskProps) {
+export function ModuleDesk({ employer, draft, reading: first, release }: ModuleDeskProps) {
   const editor = useRef<ReactCodeMirrorRef>(null);
   const { source, reading, checking, revision, saved, change, save } = useDraft({
     base: `/api/employers/${employer}/modules/${draft.id}`,
@@ -121,7 +120,6 @@ export function ModuleDesk({ employer, draft, reading: first, nonce, release }: 
               ref={editor}
               source={source}
               problems={reading.problems}
-              nonce={nonce}
               onChange={change}
               onCursor={(line, column) => setCursor({ line, column })}
             />

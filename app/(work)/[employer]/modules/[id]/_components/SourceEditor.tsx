@@ -10,14 +10,13 @@ import { sourceLook } from "./sourceLook";
 type SourceEditorProps = {
   source: string;
   problems: readonly Problem[];
-  nonce: string;
   onChange: (source: string) => void;
   onCursor: (line: number, column: number) => void;
 };
 
 /** The module's source, with its problems waved under where they are. */
 export const SourceEditor = forwardRef<ReactCodeMirrorRef, SourceEditorProps>(function SourceEditor(
-  { source, problems, nonce, onChange, onCursor },
+  { source, problems, onChange, onCursor },
   ref,
 ) {
   const extensions = useMemo(
@@ -25,11 +24,11 @@ export const SourceEditor = forwardRef<ReactCodeMirrorRef, SourceEditorProps>(fu
       markdown(),
       sourceLook,
       EditorView.lineWrapping,
-      EditorView.cspNonce.of(nonce),
+      EditorView.cspNonce.of(documentNonce()),
       EditorView.contentAttributes.of({ "aria-label": "Source of the module", spellcheck: "false" }),
       linter((view) => problems.map((problem) => diagnostic(view, problem)), { delay: 0 }),
     ],
-    [nonce, problems],
+    [problems],
   );
   return (
     <CodeMirror
@@ -50,6 +49,12 @@ export const SourceEditor = forwardRef<ReactCodeMirrorRef, SourceEditorProps>(fu
     />
   );
 });
+
+/** The nonce of the document, not of this page's own answer: after a navigation without a reload the two differ. */
+function documentNonce(): string {
+  if (typeof document === "undefined") return "";
+  return document.querySelector<HTMLMetaElement>('meta[property="csp-nonce"]')?.content ?? "";
+}
 
 function diagnostic(view: EditorView, problem: Problem): Diagnostic {
   const from = offsetOf(view, problem.line, problem.column);
