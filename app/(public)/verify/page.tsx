@@ -1,3 +1,4 @@
+import Link from "next/link";
 import type { Metadata } from "next";
 import { redirect } from "next/navigation";
 import { SectionHead } from "@/components/ui/SectionHead";
@@ -46,9 +47,9 @@ export default async function VerifyPage({ searchParams }: { searchParams: Promi
         </ul>
         <p className="mt-6 text-dense text-ink-2">
           You need not trust this page:{" "}
-          <a className="link" href="/trust">
+          <Link className="link" href="/trust">
             how to verify a file off line
-          </a>{" "}
+          </Link>{" "}
           with public tools.
         </p>
       </aside>

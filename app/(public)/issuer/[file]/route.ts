@@ -12,6 +12,6 @@ export async function GET(_request: Request, { params }: { params: Promise<{ fil
   const pem = files.get((await params).file);
   if (!pem) return new Response("No such file", { status: 404 });
   return new Response(pem, {
-    headers: { "content-type": "application/x-pem-file", "cache-control": "public, max-age=3600" },
+    headers: { "content-type": "application/pem-certificate-chain", "cache-control": "public, max-age=3600" },
   });
 }

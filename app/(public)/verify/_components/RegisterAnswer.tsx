@@ -1,3 +1,4 @@
+import Link from "next/link";
 import { StandingGlyph } from "@/components/certificates/StandingGlyph";
 import { ValidityLine } from "@/components/certificates/ValidityLine";
 import { ChipStrip } from "@/components/ui/ChipStrip";
@@ -86,9 +87,9 @@ export function RegisterAnswer({ entry }: { entry: PublicVerification }) {
         </div>
         <p className="mt-4 text-label font-normal text-ink-2">
           Only the file can show that its signature is genuine.{" "}
-          <a className="link" href="/trust">
+          <Link className="link" href="/trust">
             Verify it off line
-          </a>
+          </Link>
           .
         </p>
       </section>

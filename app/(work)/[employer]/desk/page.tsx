@@ -1,3 +1,4 @@
+import Link from "next/link";
 import type { Metadata } from "next";
 import { StandingGlyph } from "@/components/certificates/StandingGlyph";
 import { SittingStateWord } from "@/components/sittings/SittingStateWord";
@@ -66,9 +67,9 @@ export default async function DeskPage({ params }: { params: Promise<{ employer:
           <ul>
             {certificates.map((row) => (
               <li key={row.number} className="border-b-hair border-rule py-3">
-                <a className="link font-semibold" href={`/${employer}/certificates/${row.number}`}>
+                <Link className="link font-semibold" href={`/${employer}/certificates/${row.number}`}>
                   {row.code} {row.title}
-                </a>
+                </Link>
                 <p className="mt-1 flex flex-wrap justify-between gap-3 text-dense">
                   <StandingGlyph standing={row.standing} daysLeft={row.daysLeft} />
                   <span className="text-ink-2">until {formatDay(row.lastDay)}</span>

@@ -1,3 +1,4 @@
+import Link from "next/link";
 import type { Metadata } from "next";
 import { Empty } from "@/components/ui/Empty";
 import { formatDay } from "@/components/ui/formatDay";
@@ -45,9 +46,9 @@ export default async function ModulesPage({ params }: { params: Promise<{ employ
                     <Td>{row.title}</Td>
                     <Td>
                       {row.number ? (
-                        <a className="link" href={`/${employer}/modules/${row.id}/releases/${row.number}`}>
+                        <Link className="link" href={`/${employer}/modules/${row.id}/releases/${row.number}`}>
                           {row.number}, {formatDay(row.releasedAt!)}
-                        </a>
+                        </Link>
                       ) : (
                         "none yet"
                       )}

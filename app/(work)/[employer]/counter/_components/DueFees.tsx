@@ -1,4 +1,5 @@
 "use client";
+import Link from "next/link";
 import { useActionState, useState } from "react";
 import { messageOf, type FormAction } from "@/components/ui/actionResult";
 import { formatDay } from "@/components/ui/formatDay";
@@ -41,9 +42,9 @@ export function DueFees({ employer, fees, action }: { employer: string; fees: Fe
               <Tr key={fee.id}>
                 <Td>
                   {fee.orderId ? (
-                    <a className="link" href={`/${employer}/counter/orders/${fee.orderId}`}>
+                    <Link className="link" href={`/${employer}/counter/orders/${fee.orderId}`}>
                       in an order
-                    </a>
+                    </Link>
                   ) : (
                     <input
                       type="checkbox"

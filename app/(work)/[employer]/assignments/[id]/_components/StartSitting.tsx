@@ -1,4 +1,5 @@
 "use client";
+import Link from "next/link";
 import { useActionState, useState } from "react";
 import { messageOf, type FormAction } from "@/components/ui/actionResult";
 import { CheckBox } from "@/components/ui/CheckBox";
@@ -22,16 +23,16 @@ export function StartSitting({ employer, assignmentId, action }: StartSittingPro
         <li>
           Your answers, the marking and the decision are kept as evidence of the certificate; what is kept how long
           stands under{" "}
-          <a className="link" href="/privacy">
+          <Link className="link" href="/privacy">
             privacy
-          </a>
+          </Link>
           .
         </li>
         <li>
           A person decides, not the marking. You may{" "}
-          <a className="link" href="/impartiality">
+          <Link className="link" href="/impartiality">
             appeal
-          </a>
+          </Link>
           .
         </li>
       </ul>

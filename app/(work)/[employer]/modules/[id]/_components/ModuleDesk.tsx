@@ -1,4 +1,5 @@
 "use client";
+import Link from "next/link";
 import type { EditorView } from "@codemirror/view";
 import type { ReactCodeMirrorRef } from "@uiw/react-codemirror";
 import { useCallback, useEffect, useRef, useState } from "react";
@@ -81,9 +82,9 @@ export function ModuleDesk({ employer, draft, reading: first, release }: ModuleD
           where={saved.why ?? "At the server, not released"}
         />
         {last && (
-          <a className="link text-dense" href={`/${employer}/modules/${draft.id}/releases/${last.number}`}>
+          <Link className="link text-dense" href={`/${employer}/modules/${draft.id}/releases/${last.number}`}>
             Release {last.number}
-          </a>
+          </Link>
         )}
         <div className="desk:hidden">
           <TwoWay

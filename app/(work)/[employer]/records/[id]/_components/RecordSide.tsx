@@ -1,3 +1,4 @@
+import Link from "next/link";
 import type { FormAction } from "@/components/ui/actionResult";
 import { ChipStrip } from "@/components/ui/ChipStrip";
 import { formatInstant } from "@/components/ui/formatDay";
@@ -87,9 +88,9 @@ export function RecordSide({
         ) : (
           <p className="mt-2 text-dense text-ink-2">
             {record.isMine ? "The sitting is decided. " : ""}An appeal goes to people who had no part in it;{" "}
-            <a className="link" href="/impartiality">
+            <Link className="link" href="/impartiality">
               the procedure is public
-            </a>
+            </Link>
             .
           </p>
         )}

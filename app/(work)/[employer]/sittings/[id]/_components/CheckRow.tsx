@@ -1,3 +1,4 @@
+import Link from "next/link";
 import type { FormAction } from "@/components/ui/actionResult";
 import { formatInstant } from "@/components/ui/formatDay";
 import { Glyph } from "@/components/ui/Glyph";
@@ -36,9 +37,9 @@ export function CheckRow({ employer, sittingId, check, freshCases, mayOpen, open
                 {one.state === "marked" && (
                   <>
                     {" "}
-                    <a className="link" href={`/${employer}/records/${one.id}`}>
+                    <Link className="link" href={`/${employer}/records/${one.id}`}>
                       Marking record
-                    </a>
+                    </Link>
                   </>
                 )}
               </li>
