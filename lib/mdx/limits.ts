@@ -15,7 +15,7 @@ export const LIMITS = {
   /** Characters of the tree as JSON: reference links and formulas make more of it than was written. */
   treeCharacters: 4_000_000,
   /** Longest reading before its thread is ended; a lawful module of full size takes about a second. */
-  readingMs: 8000,
+  readingMs: 10_000,
   /** A thread that is not ready by then will not be. */
   threadStartMs: 60_000,
   waitingReadings: 40,

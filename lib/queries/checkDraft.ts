@@ -22,6 +22,6 @@ export async function checkDraft(actor: Actor, moduleId: string, source: string)
   authorize(can.writeModule(actor, actor), "write this module");
   const own = isId(moduleId) && (await Module.count({ where: { id: moduleId, employerId: actor.employerId } }));
   if (!own) throw new NotFoundError("module");
-  const { problems, tree, module: checked } = await readModule(source);
-  return { problems, tree, checkCards: checkCards(checked?.checks ?? []), title: checked?.frontMatter.title ?? null };
+  const { problems, tree, checks, module: checked } = await readModule(source);
+  return { problems, tree, checkCards: checkCards(checks), title: checked?.frontMatter.title ?? null };
 }
