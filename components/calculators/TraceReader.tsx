@@ -18,7 +18,7 @@ export function TraceReader({ trace, stepChips, onTake }: TraceReaderProps) {
   const overview = useMemo(() => strongest(trace, stepChips), [trace, stepChips]);
   const top = useMemo(() => trace.reduce((most, value) => Math.max(most, value), 0), [trace]);
   const close = useMemo(() => around(trace, stepChips, cell), [trace, stepChips, cell]);
-  const y = { name: "|R|", from: 0, to: top * 1.08, decimals: 2 };
+  const y = { name: "|R|", from: 0, to: top * 1.08 };
   const lag = cell * stepChips;
   const magnitude = trace[cell]!;
   const take = () => onTake?.({ lagChips: lag, magnitude });
@@ -27,9 +27,10 @@ export function TraceReader({ trace, stepChips, onTake }: TraceReaderProps) {
       <section>
         <h3 className="text-h3">The whole code</h3>
         <LinePlot
-          x={{ name: "lag, chip", from: 0, to: cells * stepChips, decimals: 2 }}
+          x={{ name: "lag, chip", from: 0, to: cells * stepChips }}
           y={y}
           curves={[{ name: "|R|", role: "subject", x: overview.x, y: overview.y }]}
+          columns={columnsOf(overview)}
           summary={`Magnitude of the correlator against lag over ${formatNumber(cells * stepChips)} chip.`}
           cursor={{
             index: Math.floor(cell / MERGED),
@@ -46,9 +47,10 @@ export function TraceReader({ trace, stepChips, onTake }: TraceReaderProps) {
       <section>
         <h3 className="text-h3">Around {formatNumber(lag, 3)} chip</h3>
         <LinePlot
-          x={{ name: "lag, chip", from: close.x[0]!, to: close.x.at(-1)!, decimals: 3 }}
+          x={{ name: "lag, chip", from: close.x[0]!, to: close.x.at(-1)!, decimals: 1 }}
           y={y}
           curves={[{ name: "|R|", role: "subject", x: close.x, y: close.y }]}
+          columns={columnsOf(close)}
           summary={`Cells around ${formatNumber(lag, 3)} chip; |R| is ${formatNumber(magnitude, 3)} there.`}
           cursor={{
             index: close.index,
@@ -70,6 +72,12 @@ export function TraceReader({ trace, stepChips, onTake }: TraceReaderProps) {
     </div>
   );
 }
+
+/** The table is for values, the axis for orientation. */
+const columnsOf = ({ x, y }: { x: Float64Array; y: Float64Array }) => [
+  { name: "lag, chip", values: x, decimals: 3 },
+  { name: "|R|", values: y, decimals: 3 },
+];
 
 function strongest(trace: readonly number[], stepChips: number) {
   const length = Math.ceil(trace.length / MERGED);

@@ -112,7 +112,7 @@ export function CaseDesk({
         </p>
         <p className="flex items-center gap-5 text-dense text-ink-2 figures">
           {missing > 0 && (missing === 1 ? "1 answer missing" : `${missing} answers missing`)}
-          <Key variant="filled" onClick={() => setHanding(true)} reason={over ? "Time is over." : null}>
+          <Key onClick={() => setHanding(true)} reason={over ? "Time is over." : null}>
             Review and hand in
           </Key>
         </p>
