@@ -34,6 +34,14 @@ export function CodePeak({ prn, delayChips, height, className }: CodePeakProps) 
   const dotted = levels
     .filter((level) => level !== -1)
     .map((level) => `M${-BEFORE * PITCH} ${round(-level * perChip)}H${AFTER * PITCH}`);
+  // One path for each of the two states: a rectangle a chip would make the page several times as heavy.
+  const chips = (above: boolean) =>
+    lags
+      .filter((lag) => code[at(lag)] > 0 === above)
+      .map(
+        (lag) => `M${round(lag * PITCH - PITCH / 2 + 0.4)} ${above ? -CHIP : 0}h${PITCH - 0.8}v${CHIP}h${0.8 - PITCH}z`,
+      )
+      .join("");
   const foot = round(65 * perChip) + 20;
   return (
     <figure className={`code-peak ${className ?? ""}`} style={{ height: height + foot + CHIP + 2 }}>
@@ -44,16 +52,8 @@ export function CodePeak({ prn, delayChips, height, className }: CodePeakProps) 
         <path d={`M0 ${foot - CHIP - 20}v11`} stroke="var(--ink)" strokeWidth="1.5" />
         <path d={`M-6 ${foot - CHIP - 10}h12l-6 8z`} fill="var(--ink)" />
         <g transform={`translate(0 ${foot})`}>
-          {lags.map((lag) => (
-            <rect
-              key={lag}
-              x={lag * PITCH - PITCH / 2 + 0.4}
-              y={code[at(lag)] > 0 ? -CHIP : 0}
-              width={PITCH - 0.8}
-              height={CHIP}
-              fill={code[at(lag)] > 0 ? "var(--plus)" : "var(--minus)"}
-            />
-          ))}
+          <path d={chips(true)} fill="var(--plus)" />
+          <path d={chips(false)} fill="var(--minus)" />
           <path d={`M${-BEFORE * PITCH} 0H${AFTER * PITCH}`} stroke="var(--ink)" strokeWidth="1.5" />
         </g>
       </svg>
