@@ -27,7 +27,7 @@ export async function listQueue(actor: Actor): Promise<QueueRow[]> {
 }
 
 const SQL = `
-  SELECT * FROM (
+  SELECT "sittingId", number, technician, code, title, checks, met, "readyAt", questions FROM (
     SELECT s.id AS "sittingId", s.number::text AS number, p.name AS technician, m.code, r.title,
       jsonb_array_length(r.checks) AS checks, ${SITTING_STATE} AS state,
       (SELECT count(DISTINCT x.check_id)::int FROM case_states x WHERE x.sitting_id = s.id AND x.met) AS met,
