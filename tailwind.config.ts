@@ -51,7 +51,8 @@ export default {
     borderRadius: { none: "0", control: `${tokens.radius.control}px`, focus: `${tokens.radius.focus}px` },
     boxShadow: {},
     extend: {
-      borderWidth: { hair: "1px", control: "1.5px", strong: "2px" },
+      // Named apart from the colours "control" and "rule-strong": one class sets one thing.
+      borderWidth: { hair: "1px", line: "1.5px", strong: "2px" },
       maxWidth: { content: `${tokens.grid.desktop.max}px`, measure: "68ch" },
       minHeight: { control: "44px", field: "56px", row: "44px" },
       transitionDuration: { press: motion.press.duration, move: motion.move.duration, sweep: motion.sweep.duration },
