@@ -53,7 +53,7 @@ export function FileDrop() {
         }}
         onDragLeave={() => setOver(false)}
         onDrop={drop}
-        className={`grid justify-items-start gap-3 border-control border-dashed border-control px-6 py-7 ${over ? "bg-plus-wash" : "bg-sheet"}`}
+        className={`grid justify-items-start gap-3 border-line border-dashed border-control px-6 py-7 ${over ? "bg-plus-wash" : "bg-sheet"}`}
       >
         <p className="text-dense text-ink-2">Drop the PDF here, or choose it. Up to 10 MB; it is read and not kept.</p>
         <Key onClick={() => input.current?.click()} busy={state.at === "reading"}>
