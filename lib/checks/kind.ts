@@ -73,6 +73,7 @@ export type MarkedRow = {
   computed: string;
   difference: string | null;
   tolerance: string;
+  /** Signed, handed in minus computed; null where a difference has no meaning. */
   offByTolerances: number | null;
   within: boolean;
   critical: boolean;

@@ -4,6 +4,7 @@ import { drawCase } from "./drawCase";
 import { markAnswers } from "./markAnswers";
 import type { FalseLockParameters } from "./parameters";
 import { REFERENCE_SEARCH } from "./referenceSearch";
+import { STRONG_FROM_DBHZ, unborrowedPeak } from "./unborrowedPeak";
 
 /** Makes the capture again from its seed, searches it for all satellites and marks the hand-in. */
 export function mark(
@@ -14,5 +15,7 @@ export function mark(
 ): Marking {
   const { truth, capture } = drawCase(seedHex, plan.parameters, progress);
   const searched = searchCapture(capture, REFERENCE_SEARCH, progress);
-  return markAnswers(truth, plan, answers, searched);
+  const strong = searched.filter(({ found, cn0DbHz }) => found && cn0DbHz >= STRONG_FROM_DBHZ);
+  const weakPeak = unborrowedPeak(capture, truth.weakPrn, REFERENCE_SEARCH, strong);
+  return markAnswers(truth, plan, answers, { searched, weakPeak });
 }

@@ -1,4 +1,3 @@
-import type { SatelliteSearch } from "@/lib/gnss/acquire";
 import { answerOf } from "../answerOf";
 import { askedQuantities, type AskedQuantity } from "../askedQuantities";
 import { finishMarking } from "../finishMarking";
@@ -9,7 +8,7 @@ import { markFalseCn0, markFalseDoppler, markParent } from "./markFalsePeak";
 import { markVerdicts } from "./markVerdicts";
 import type { FalseLockParameters } from "./parameters";
 import { falseLockQuantities, RIGHT_REMEDIES, RIGHT_TESTS } from "./quantities";
-import { workingsOf } from "./workings";
+import { workingsOf, type Measured } from "./workings";
 
 type Marker = (truth: FalseLockTruth, quantity: AskedQuantity, answers: Answers) => MarkedRow[];
 
@@ -27,11 +26,11 @@ export function markAnswers(
   truth: FalseLockTruth,
   plan: CheckPlan<FalseLockParameters>,
   answers: Answers,
-  searched: readonly SatelliteSearch[],
+  measured: Measured,
 ): Marking {
   const asked = askedQuantities(falseLockQuantities, plan);
   const rows = [...asked.values()].flatMap((quantity) => MARKERS[quantity.id](truth, quantity, answers));
-  return finishMarking({ id: "false-lock", version: 1 }, plan, asked, rows, workingsOf(truth, searched));
+  return finishMarking({ id: "false-lock", version: 1 }, plan, asked, rows, workingsOf(truth, measured));
 }
 
 const markTest = (quantity: AskedQuantity, answers: Answers) =>

@@ -4,14 +4,18 @@ import { formatQuantity } from "../formatQuantity";
 import type { Marking } from "../kind";
 import { acceptedFalsePeaks, type FalseLockTruth, type ListedSatellite } from "./drawScene";
 import { REFERENCE_SEARCH } from "./referenceSearch";
+import { LARGEST_CELL_LOSS_DB, type GridPeak } from "./unborrowedPeak";
+
+/** What the server's own search of the capture gives; `weakPeak` is the weak satellite's, away from all false peaks. */
+export type Measured = { searched: readonly SatelliteSearch[]; weakPeak: GridPeak | null };
 
 type Signal = { codePhaseChips: number; dopplerHz: number; cn0DbHz: number };
-type Measured = ReadonlyMap<number, SatelliteSearch>;
+type ByPrn = ReadonlyMap<number, SatelliteSearch>;
 
 /** What was put into the capture and what the two codes predict, beside what the server's own search measures. */
-export function workingsOf(truth: FalseLockTruth, searched: readonly SatelliteSearch[]): Marking["workings"] {
+export function workingsOf(truth: FalseLockTruth, { searched, weakPeak }: Measured): Marking["workings"] {
   const { coherentMs, sums, dopplerStepHz, dopplerHalfWidthHz } = REFERENCE_SEARCH;
-  const measured: Measured = new Map(searched.map((search) => [search.prn, search]));
+  const measured: ByPrn = new Map(searched.map((search) => [search.prn, search]));
   const present = new Map(truth.scene.satellites.map((satellite) => [satellite.prn, satellite]));
   const accepted = acceptedFalsePeaks(truth);
   return [
@@ -31,6 +35,9 @@ export function workingsOf(truth: FalseLockTruth, searched: readonly SatelliteSe
       label: `PRN ${satellite.prn}`,
       value: `${putIn(present.get(satellite.prn))}; ${searchText(measured.get(satellite.prn))}`,
     })),
+    ...(weakPeak
+      ? [{ label: `PRN ${truth.weakPrn} where no false peak can lie`, value: weakText(truth, weakPeak) }]
+      : []),
     { label: "Scene and search", value: agreement(truth, present, measured) },
   ];
 }
@@ -50,7 +57,7 @@ function searchText(search: SatelliteSearch | undefined): string {
 }
 
 /** A scene and a search that differ by more than a tolerance mean that one of them is wrong: said, never hidden. */
-function agreement(truth: FalseLockTruth, present: ReadonlyMap<number, SceneSatellite>, measured: Measured): string {
+function agreement(truth: FalseLockTruth, present: ReadonlyMap<number, SceneSatellite>, measured: ByPrn): string {
   const apart = truth.listed.filter((satellite) => {
     const search = measured.get(satellite.prn);
     const signal = present.get(satellite.prn);
@@ -73,3 +80,8 @@ const agreesWithCodes = (truth: FalseLockTruth, satellite: ListedSatellite, sear
 
 const near = (search: SatelliteSearch, dopplerHz: number, cn0DbHz: number) =>
   Math.abs(search.dopplerHz - dopplerHz) <= 50 && Math.abs(search.cn0DbHz - cn0DbHz) <= 1.5;
+
+function weakText({ weakestDbHz }: FalseLockTruth, peak: GridPeak): string {
+  const least = formatQuantity(weakestDbHz - LARGEST_CELL_LOSS_DB, "dB-Hz", 1);
+  return `highest cell ${signalText(peak)}; a signal shows ${least} or more`;
+}

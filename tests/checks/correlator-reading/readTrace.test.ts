@@ -33,7 +33,7 @@ describe("second peak and noise", () => {
   });
 
   test("median and root mean square are told apart from the mean", () => {
-    const half = Array.from({ length: CELLS }, (_, cell) => (cell % 4 === 0 ? 5 : 1));
+    const half: number[] = Array.from({ length: CELLS }, (_, cell) => (cell % 4 === 0 ? 5 : 1));
     const reading = readTrace(half.with(4001, 50), 1e-6);
     expect(reading.noiseMedian).toBe(1);
     expectNear(reading.noiseMean, 2, 0.01, "mean");

@@ -1,0 +1,55 @@
+import { describe, expect, test } from "vitest";
+import { correlatorReading } from "@/lib/checks/correlator-reading/correlatorReading";
+import { falseLock } from "@/lib/checks/false-lock/falseLock";
+import { publicCase as falseLockCase } from "@/lib/checks/false-lock/publicCase";
+import { drawScene } from "@/lib/checks/satellites/drawScene";
+import { publicCase as satellitesCase } from "@/lib/checks/satellites/publicCase";
+import { satellites } from "@/lib/checks/satellites/satellites";
+import { searchPlan } from "@/lib/checks/search-plan/searchPlan";
+import { sceneFor } from "./false-lock/sceneFor";
+import { GOLDEN } from "./goldenHashes";
+import { goldenOf } from "./goldenOf";
+import { planOf, seedOf } from "./planOf";
+
+/*
+ * A released builder never changes: these hashes are of its first release, and a difference means a new version of the kind.
+ * Captures take seconds, so their scenes are compared for all seeds and their files for a few.
+ */
+const SLOW = 120_000;
+const list = (hashes: readonly string[]) => hashes.map((hash, n) => [n, hash] as const);
+
+describe("correlator-reading@1", () => {
+  const plan = planOf(correlatorReading);
+  test.each(list(GOLDEN.correlatorReading))("seed %i", (n, hash) =>
+    expect(goldenOf(correlatorReading.build(seedOf(n), plan))).toBe(hash),
+  );
+});
+
+describe("search-plan@1", () => {
+  const plan = planOf(searchPlan);
+  test.each(list(GOLDEN.searchPlan))("seed %i", { timeout: SLOW }, (n, hash) =>
+    expect(goldenOf(searchPlan.build(seedOf(n), plan))).toBe(hash),
+  );
+});
+
+describe("satellites@1", () => {
+  const plan = planOf(satellites);
+  test.each(list(GOLDEN.satelliteScenes))("scene of seed %i", (n, hash) => {
+    const { truth } = drawScene(seedOf(n), plan.parameters);
+    expect(goldenOf({ truth, publicCase: satellitesCase(truth, plan), files: [] })).toBe(hash);
+  });
+  test.each(list(GOLDEN.satelliteCaptures))("capture of seed %i", { timeout: SLOW }, (n, hash) =>
+    expect(goldenOf(satellites.build(seedOf(n), plan))).toBe(hash),
+  );
+});
+
+describe("false-lock@1", () => {
+  const plan = planOf(falseLock);
+  test.each(list(GOLDEN.falseLockScenes))("scene of seed %i", { timeout: SLOW }, (n, hash) => {
+    const { truth } = sceneFor(seedOf(n));
+    expect(goldenOf({ truth, publicCase: falseLockCase(truth, plan), files: [] })).toBe(hash);
+  });
+  test.each(list(GOLDEN.falseLockCaptures))("capture of seed %i", { timeout: SLOW }, (n, hash) =>
+    expect(goldenOf(falseLock.build(seedOf(n), plan))).toBe(hash),
+  );
+});

@@ -1,0 +1,8 @@
+export const GOLDEN = {
+  correlatorReading: [],
+  searchPlan: [],
+  satelliteScenes: [],
+  satelliteCaptures: [],
+  falseLockScenes: [],
+  falseLockCaptures: [],
+} as Record<string, string[]>;

@@ -1,0 +1,11 @@
+import { createHash } from "node:crypto";
+import type { BuiltCase, CaseFile } from "@/lib/checks/kind";
+
+/** SHA-256 over a case as it is handed out and as it is marked: public case, truth, files. */
+export function goldenOf({ publicCase, truth, files }: Pick<BuiltCase, "publicCase" | "truth" | "files">): string {
+  const hash = createHash("sha256").update(JSON.stringify([publicCase, truth]));
+  for (const file of files) hash.update(fileHead(file)).update(file.bytes);
+  return hash.digest("hex");
+}
+
+const fileHead = ({ name, mediaType, bytes }: CaseFile) => `\n${name} ${mediaType} ${bytes.length}\n`;
