@@ -9,8 +9,8 @@ const FILE = { name: "a.sigmf-data", mediaType: "application/octet-stream", size
 
 /** All that a firm can have: a certificate, a sitting with an open case, one that waits for the decider, a fee that is due. */
 export async function makeWholeChain(firm: Firm) {
-  const module = await makeModule(firm);
-  const release = await makeRelease(firm, { module });
+  const made = await makeModule(firm);
+  const release = await makeRelease(firm, { module: made });
   const assignment = await makeAssignment(firm, { release });
   const sitting = await makeSitting(firm, { assignment });
   const record = await makeMarkingRecord(firm, { sitting });
@@ -27,7 +27,7 @@ export async function makeWholeChain(firm: Firm) {
     assignment.id,
   ]);
   return {
-    module,
+    module: made,
     release,
     assignment,
     sitting,
