@@ -50,10 +50,13 @@ export const SourceEditor = forwardRef<ReactCodeMirrorRef, SourceEditorProps>(fu
   );
 });
 
-/** The nonce of the document, not of this page's own answer: after a navigation without a reload the two differ. */
+/**
+ * The nonce that the document was loaded with: the only one its policy knows. Later answers of the server bring nonces of
+ * their own, and the meta element follows them; a script that was there from the start keeps the first.
+ */
 function documentNonce(): string {
   if (typeof document === "undefined") return "";
-  return document.querySelector<HTMLMetaElement>('meta[property="csp-nonce"]')?.content ?? "";
+  return [...document.scripts].find((script) => script.nonce)?.nonce ?? "";
 }
 
 function diagnostic(view: EditorView, problem: Problem): Diagnostic {
