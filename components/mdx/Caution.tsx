@@ -8,7 +8,11 @@ export function Caution({ about = "", children }: { about?: string; children?: R
   return (
     <div className="my-5">
       <Cautions items={topics.map((topic) => CAUTIONS[topic])} />
-      {children && <div className="flow-root border-line border-t-0 border-l-8 border-caution-deep bg-sheet px-3.5">{children}</div>}
+      {children && (
+        <div className="flow-root border-line border-t-0 border-l-8 border-caution-deep bg-sheet px-3.5">
+          {children}
+        </div>
+      )}
     </div>
   );
 }

@@ -29,7 +29,9 @@ export const elements: Components = {
   span: (props) => {
     const display = props.className?.split(" ").includes("katex-display");
     const scroll = display ? { tabIndex: 0, role: "group", "aria-label": "Formula" } : {};
-    return <span {...props} {...scroll} className={classNames(props.className, display && "block overflow-x-auto py-2")} />;
+    return (
+      <span {...props} {...scroll} className={classNames(props.className, display && "block overflow-x-auto py-2")} />
+    );
   },
 };
 
