@@ -29,14 +29,17 @@ const finding = (table: string, { key, recorded, present }: Differing): Finding 
       : "is gone, the trail has it",
 });
 
-// The hash is written out here and not left to the database's own function, which its owner could replace.
+// The hash is written out here and not left to the database's own function, which its owner could replace. Empty columns
+// are left out, so that a column added later does not change the hashes of rows that were there before.
 const differing = (table: (typeof TRAILED_TABLES)[number]) => `
   WITH newest AS (
     SELECT DISTINCT ON (subject_key) subject_key AS key, row_sha256 AS hash FROM trail_entries
     WHERE subject_table = $1 ORDER BY subject_key, id DESC
   ), present AS (
     SELECT coalesce(j->>'id', j->>'case_id', (j->>'release_id') || '/' || (j->>'person_id') || '/' || (j->>'part')) AS key,
-           encode(sha256(convert_to(j::text, 'UTF8')), 'hex') AS hash
+           encode(sha256(convert_to(coalesce(
+             (SELECT jsonb_object_agg(f.key, f.value) FROM jsonb_each(j) f WHERE f.value <> 'null'::jsonb), '{}'
+           )::text, 'UTF8')), 'hex') AS hash
     FROM (SELECT to_jsonb(t) AS j FROM ${table} t) rows
   )
   SELECT coalesce(newest.key, present.key) AS "key", newest.hash AS "recorded", present.hash AS "present"
