@@ -1,8 +1,21 @@
 // The trail. A trigger writes the entry, so no row of the chain can come in without one; the worker's sealer
 // links entries into a hash chain afterwards, so that no act ever waits for another act's lock.
 const RECORDS = [
-  "releases", "release_writers", "assignments", "sittings", "cases", "case_views", "case_secrets", "captures", "hand_ins",
-  "marking_records", "questions", "decisions", "certificates", "standings", "trainings",
+  "releases",
+  "release_writers",
+  "assignments",
+  "sittings",
+  "cases",
+  "case_views",
+  "case_secrets",
+  "captures",
+  "hand_ins",
+  "marking_records",
+  "questions",
+  "decisions",
+  "certificates",
+  "standings",
+  "trainings",
 ];
 const CHANGING = ["employers", "role_grants", "orders", "fees"];
 
@@ -67,7 +80,10 @@ BEGIN
 END $$;
 
 ${[...RECORDS, "trail_entries", "trail_links", "trail_heads"]
-  .map((table) => `CREATE TRIGGER ${table}_kept BEFORE UPDATE OR DELETE ON ${table} FOR EACH ROW EXECUTE FUNCTION refuse_change();`)
+  .map(
+    (table) =>
+      `CREATE TRIGGER ${table}_kept BEFORE UPDATE OR DELETE ON ${table} FOR EACH ROW EXECUTE FUNCTION refuse_change();`,
+  )
   .join("\n")}
 ${RECORDS.map((table) => `CREATE TRIGGER ${table}_trail AFTER INSERT ON ${table} FOR EACH ROW EXECUTE FUNCTION write_trail();`).join("\n")}
 ${CHANGING.map((table) => `CREATE TRIGGER ${table}_trail AFTER INSERT OR UPDATE ON ${table} FOR EACH ROW EXECUTE FUNCTION write_trail();`).join("\n")}
