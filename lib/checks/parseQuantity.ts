@@ -1,6 +1,6 @@
 import { convert, isConvertible, type Unit } from "@/lib/gnss/units";
 import { formatUnit } from "./formatQuantity";
-import { unitNamed } from "./unitNames";
+import { unitNamed } from "./unitNamed";
 
 export type Reading = { value: number } | { problem: string };
 

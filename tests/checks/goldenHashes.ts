@@ -96,6 +96,5 @@ export const GOLDEN = {
   falseLockCaptures: [
     "f47edc7c096d69a569b205f6bff375dbf3dcdacec8f5abb6d8c3537165184974",
     "7d93303d3790052f5e359f3e5227c4f42caeafc07eed890b85d5b38d38608d0e",
-    "57729d895281b98c5b76ae0f8699431f4fb87b590c31fac283d27cff67033dd5",
   ],
 } as const;

@@ -2,7 +2,7 @@ import { describe, expect, test } from "vitest";
 import type { Answers, CheckKind, PublicCase } from "@/lib/checks/kind";
 import { correlatorReading } from "@/lib/checks/correlator-reading/correlatorReading";
 import { drawCase } from "@/lib/checks/correlator-reading/drawCase";
-import { markAnswers as markReading } from "@/lib/checks/correlator-reading/mark";
+import { markAnswers as markReading } from "@/lib/checks/correlator-reading/markAnswers";
 import { publicCase as readingCase } from "@/lib/checks/correlator-reading/publicCase";
 import { ENGINE_VERSION } from "@/lib/checks/engineVersion";
 import { falseLock } from "@/lib/checks/false-lock/falseLock";

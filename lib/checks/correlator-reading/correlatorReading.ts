@@ -1,7 +1,7 @@
 import type { CheckKind } from "../kind";
 import { buildCase } from "./buildCase";
-import { drawCase, type CorrelatorReadingTruth } from "./drawCase";
-import { markAnswers } from "./mark";
+import type { CorrelatorReadingTruth } from "./drawCase";
+import { mark } from "./mark";
 import { correlatorReadingParameters, type CorrelatorReadingParameters } from "./parameters";
 import { correlatorReadingCautions, correlatorReadingQuantities } from "./quantities";
 import { solve } from "./solve";
@@ -18,7 +18,7 @@ export const correlatorReading: CheckKind<CorrelatorReadingParameters, Correlato
   quantities: correlatorReadingQuantities,
   cautions: correlatorReadingCautions,
   build: buildCase,
-  mark: (seedHex, plan, answers) => markAnswers(drawCase(seedHex, plan.parameters).truth, plan, answers),
+  mark,
   solve: ({ publicCase }) => solve(publicCase),
   wrongMethods,
 };

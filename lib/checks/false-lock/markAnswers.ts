@@ -4,7 +4,7 @@ import { finishMarking } from "../finishMarking";
 import type { Answers, CheckPlan, MarkedRow, Marking } from "../kind";
 import { markChoice } from "../markChoice";
 import type { FalseLockTruth } from "./drawScene";
-import { markFalseCn0, markFalseDoppler, markParent } from "./markFalsePeak";
+import { markFalseCn0, markFalseDoppler, markParent } from "./false-peak-rows";
 import { markVerdicts } from "./markVerdicts";
 import type { FalseLockParameters } from "./parameters";
 import { falseLockQuantities, RIGHT_REMEDIES, RIGHT_TESTS } from "./quantities";

@@ -1,4 +1,4 @@
-import { rateParameter, type CaptureRate } from "../captureRate";
+import { rateParameter, type CaptureRate } from "../capture-rate";
 import type { ParameterSpec } from "../kind";
 
 /** Ends of ranges are included. */

@@ -2,6 +2,7 @@ import type { SatelliteSearch } from "@/lib/gnss/acquire";
 import type { SceneSatellite } from "@/lib/gnss/scene";
 import { formatQuantity } from "../formatQuantity";
 import type { Marking } from "../kind";
+import { signalText } from "../signalText";
 import { acceptedFalsePeaks, type FalseLockTruth, type ListedSatellite } from "./drawScene";
 import { REFERENCE_SEARCH } from "./referenceSearch";
 import { LARGEST_CELL_LOSS_DB, type GridPeak } from "./unborrowedPeak";
@@ -9,13 +10,10 @@ import { LARGEST_CELL_LOSS_DB, type GridPeak } from "./unborrowedPeak";
 /** What the server's own search of the capture gives; `weakPeak` is the weak satellite's, away from all false peaks. */
 export type Measured = { searched: readonly SatelliteSearch[]; weakPeak: GridPeak | null };
 
-type Signal = { codePhaseChips: number; dopplerHz: number; cn0DbHz: number };
-type ByPrn = ReadonlyMap<number, SatelliteSearch>;
-
 /** What was put into the capture and what the two codes predict, beside what the server's own search measures. */
-export function workingsOf(truth: FalseLockTruth, { searched, weakPeak }: Measured): Marking["workings"] {
+export function workingsOf(truth: FalseLockTruth, measured: Measured): Marking["workings"] {
   const { coherentMs, sums, dopplerStepHz, dopplerHalfWidthHz } = REFERENCE_SEARCH;
-  const measured: ByPrn = new Map(searched.map((search) => [search.prn, search]));
+  const { searched, weakPeak } = measured;
   const present = new Map(truth.scene.satellites.map((satellite) => [satellite.prn, satellite]));
   const accepted = acceptedFalsePeaks(truth);
   return [
@@ -33,21 +31,14 @@ export function workingsOf(truth: FalseLockTruth, { searched, weakPeak }: Measur
     })),
     ...truth.listed.map((satellite) => ({
       label: `PRN ${satellite.prn}`,
-      value: `${putIn(present.get(satellite.prn))}; ${searchText(measured.get(satellite.prn))}`,
+      value: `${putIn(present.get(satellite.prn))}; ${searchText(searched.find(({ prn }) => prn === satellite.prn))}`,
     })),
     ...(weakPeak
       ? [{ label: `PRN ${truth.weakPrn} where no false peak can lie`, value: weakText(truth, weakPeak) }]
       : []),
-    { label: "Scene and search", value: agreement(truth, present, measured) },
+    { label: "Scene and search", value: agreement(truth, measured) },
   ];
 }
-
-const signalText = ({ codePhaseChips, dopplerHz, cn0DbHz }: Signal) =>
-  [
-    formatQuantity(codePhaseChips, "chip", 2),
-    formatQuantity(dopplerHz, "Hz", 0),
-    formatQuantity(cn0DbHz, "dB-Hz", 1),
-  ].join(", ");
 
 const putIn = (signal: SceneSatellite | undefined) => (signal ? `put in ${signalText(signal)}` : "not put in");
 
@@ -57,31 +48,29 @@ function searchText(search: SatelliteSearch | undefined): string {
 }
 
 /** A scene and a search that differ by more than a tolerance mean that one of them is wrong: said, never hidden. */
-function agreement(truth: FalseLockTruth, present: ReadonlyMap<number, SceneSatellite>, measured: ByPrn): string {
-  const apart = truth.listed.filter((satellite) => {
-    const search = measured.get(satellite.prn);
-    const signal = present.get(satellite.prn);
-    if (signal && satellite.reportedCn0DbHz !== null)
-      return !search?.found || !near(search, signal.dopplerHz, signal.cn0DbHz);
-    return satellite.verdict === "cross-correlation" && !search?.found
-      ? true
-      : !agreesWithCodes(truth, satellite, search);
-  });
+function agreement(truth: FalseLockTruth, measured: Measured): string {
+  const apart = truth.listed.filter((satellite) => !agrees(truth, satellite, measured));
   if (apart.length === 0) return "agree for all satellites of the sky plot";
   return `differ by more than the tolerance for PRN ${apart.map(({ prn }) => prn).join(", ")}`;
 }
 
-/** The victim's highest peak is one of the predicted ones; a weak or absent satellite's may be its own or a false one. */
-const agreesWithCodes = (truth: FalseLockTruth, satellite: ListedSatellite, search: SatelliteSearch | undefined) =>
-  satellite.verdict !== "cross-correlation" ||
-  acceptedFalsePeaks(truth).some(
-    ({ dopplerHz, apparentCn0DbHz }) => search !== undefined && near(search, dopplerHz, apparentCn0DbHz),
-  );
-
-const near = (search: SatelliteSearch, dopplerHz: number, cn0DbHz: number) =>
-  Math.abs(search.dopplerHz - dopplerHz) <= 50 && Math.abs(search.cn0DbHz - cn0DbHz) <= 1.5;
-
-function weakText({ weakestDbHz }: FalseLockTruth, peak: GridPeak): string {
-  const least = formatQuantity(weakestDbHz - LARGEST_CELL_LOSS_DB, "dB-Hz", 1);
-  return `highest cell ${signalText(peak)}; a signal shows ${least} or more`;
+function agrees(truth: FalseLockTruth, { prn, verdict }: ListedSatellite, { searched, weakPeak }: Measured): boolean {
+  const search = searched.find((candidate) => candidate.prn === prn);
+  const signal = truth.scene.satellites.find((candidate) => candidate.prn === prn);
+  // Its highest peak may be a false one even when it is there.
+  if (prn === truth.weakPrn) return weakPeak !== null && weakPeak.cn0DbHz >= leastSeenDbHz(truth) === Boolean(signal);
+  if (signal) return near(search, signal.dopplerHz, signal.cn0DbHz);
+  if (verdict === "absent") return search !== undefined;
+  return acceptedFalsePeaks(truth).some(({ dopplerHz, apparentCn0DbHz }) => near(search, dopplerHz, apparentCn0DbHz));
 }
+
+const near = (search: SatelliteSearch | undefined, dopplerHz: number, cn0DbHz: number): boolean =>
+  search !== undefined &&
+  search.found &&
+  Math.abs(search.dopplerHz - dopplerHz) <= 50 &&
+  Math.abs(search.cn0DbHz - cn0DbHz) <= 1.5;
+
+const leastSeenDbHz = ({ weakestDbHz }: FalseLockTruth) => weakestDbHz - LARGEST_CELL_LOSS_DB;
+
+const weakText = (truth: FalseLockTruth, peak: GridPeak) =>
+  `highest cell ${signalText(peak)}; a signal shows ${formatQuantity(leastSeenDbHz(truth), "dB-Hz", 1)} or more`;

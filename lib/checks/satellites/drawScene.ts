@@ -1,7 +1,7 @@
 import { clockErrorHz } from "@/lib/gnss/doppler";
 import type { Scene, SceneSatellite } from "@/lib/gnss/scene";
 import { seededRandom, type Random } from "@/lib/numeric/random";
-import { drawRateHz } from "../captureRate";
+import { drawRateHz } from "../capture-rate";
 import { between, drawSatellite } from "../drawSatellite";
 import { drawStart } from "../drawStart";
 import { ALL_PRNS } from "../searchCapture";

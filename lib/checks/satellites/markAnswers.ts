@@ -6,7 +6,7 @@ import type { Answers, CheckPlan, MarkedRow, Marking } from "../kind";
 import { markWord } from "../markWord";
 import { parseQuantity } from "../parseQuantity";
 import { mustBeFound, type SatellitesTruth } from "./drawScene";
-import { markFound, markInvented } from "./markList";
+import { markFound, markInvented } from "./list-rows";
 import { markValues } from "./markValues";
 import type { SatellitesParameters } from "./parameters";
 import { satellitesQuantities } from "./quantities";

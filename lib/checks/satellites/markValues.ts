@@ -7,7 +7,7 @@ import type { MarkedRow } from "../kind";
 import { markNumber, type Finding, type NumberLine } from "../markNumber";
 import { wrongSign } from "../wrongSign";
 import { mustBeFound, type SatellitesTruth } from "./drawScene";
-import { twice } from "./markList";
+import { twice } from "./list-rows";
 import type { ListedLine } from "./readLines";
 
 /** Code phase, Doppler and C/N0 of one satellite of the scene, as far as they are asked. */

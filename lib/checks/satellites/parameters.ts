@@ -1,5 +1,5 @@
 import type { ParameterSpec } from "../kind";
-import { rateParameter, type CaptureRate } from "../captureRate";
+import { rateParameter, type CaptureRate } from "../capture-rate";
 
 /** Ends of ranges are included. */
 export type SatellitesParameters = {

@@ -4,10 +4,9 @@ import { clockErrorHz } from "@/lib/gnss/doppler";
 import { circularDifference } from "../circularDifference";
 import { formatQuantity } from "../formatQuantity";
 import type { Marking } from "../kind";
+import { signalText, type Signal } from "../signalText";
 import { mustBeFound, type SatellitesTruth } from "./drawScene";
 import { REFERENCE_SEARCH } from "./referenceSearch";
-
-type Signal = { codePhaseChips: number; dopplerHz: number; cn0DbHz: number };
 
 /** What was put into the capture beside what the server's own search measures in it. */
 export function workingsOf(truth: SatellitesTruth, searched: readonly SatelliteSearch[]): Marking["workings"] {
@@ -33,13 +32,6 @@ export function workingsOf(truth: SatellitesTruth, searched: readonly SatelliteS
     { label: "Scene and search", value: agreement(truth, measured) },
   ];
 }
-
-const signalText = ({ codePhaseChips, dopplerHz, cn0DbHz }: Signal) =>
-  [
-    formatQuantity(codePhaseChips, "chip", 2),
-    formatQuantity(dopplerHz, "Hz", 0),
-    formatQuantity(cn0DbHz, "dB-Hz", 1),
-  ].join(", ");
 
 function searchText(search: SatelliteSearch | undefined): string {
   if (!search) return "not searched";

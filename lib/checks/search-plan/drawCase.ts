@@ -2,7 +2,7 @@ import { seededRandom, type Random } from "@/lib/numeric/random";
 import { between } from "../drawSatellite";
 import type { SearchPlanParameters } from "./parameters";
 import { planGrid, type Requirement } from "./planGrid";
-import { fastestPlan, plansWithin, type ReferencePlan } from "./referencePlans";
+import { fastestPlan, plansWithin, type ReferencePlan } from "./reference-plans";
 
 export type SearchPlanTruth = {
   requirement: Requirement;

@@ -6,7 +6,7 @@ import type { Answers, CheckPlan, MarkedRow, Marking } from "../kind";
 import { attain, type Attained } from "./attain";
 import type { SearchPlanTruth } from "./drawCase";
 import { figures } from "./figures";
-import { markEstimate } from "./markEstimates";
+import { markEstimate } from "./markEstimate";
 import { markPlan } from "./markPlan";
 import type { SearchPlanParameters } from "./parameters";
 import { searchPlanQuantities } from "./quantities";

@@ -42,7 +42,8 @@ export function planGrid(requirement: Requirement): Rated[] {
 export const cellsOf = ({ dopplerBinHz, codeStepChips }: Plan, { windowHz }: Requirement): number =>
   (2 * Math.ceil(windowHz / dopplerBinHz) + 1) * (CA_LENGTH_CHIPS / codeStepChips);
 
-const timeOf = (plan: Plan, requirement: Requirement): number =>
+/** Every cell in turn takes all of its coherent sums. */
+export const timeOf = (plan: Plan, requirement: Requirement): number =>
   (cellsOf(plan, requirement) * (plan.coherentMs / 1000) * plan.sums) / requirement.correlators;
 
 /** Detection of a satellite in the middle of its bin and cell, without data bits: no plan does better. */

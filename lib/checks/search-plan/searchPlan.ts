@@ -1,7 +1,7 @@
 import type { CheckKind } from "../kind";
 import { buildCase } from "./buildCase";
-import { drawCase, type SearchPlanTruth } from "./drawCase";
-import { markAnswers } from "./markAnswers";
+import type { SearchPlanTruth } from "./drawCase";
+import { mark } from "./mark";
 import { searchPlanParameters, type SearchPlanParameters } from "./parameters";
 import { searchPlanCautions, searchPlanQuantities } from "./quantities";
 import { solve } from "./solve";
@@ -18,7 +18,7 @@ export const searchPlan: CheckKind<SearchPlanParameters, SearchPlanTruth> = {
   quantities: searchPlanQuantities,
   cautions: searchPlanCautions,
   build: buildCase,
-  mark: (seedHex, plan, answers) => markAnswers(seedHex, drawCase(seedHex, plan.parameters).truth, plan, answers),
+  mark,
   solve: ({ publicCase }) => solve(publicCase),
   wrongMethods,
 };

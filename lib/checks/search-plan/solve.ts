@@ -2,7 +2,7 @@ import { falseAlarmOfThreshold, falseAlarmPerSearch } from "@/lib/gnss/detection
 import { seededRandom } from "@/lib/numeric/random";
 import type { Answers, PublicCase } from "../kind";
 import { cellsOf, performanceOf, type Plan, type Rated, type Requirement } from "./planGrid";
-import { plansWithin } from "./referencePlans";
+import { plansWithin } from "./reference-plans";
 
 const DRAWS = 2000;
 const SEED = "501e".padEnd(64, "0");

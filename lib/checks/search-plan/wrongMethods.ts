@@ -2,7 +2,7 @@ import { thresholdSigma2 } from "@/lib/gnss/detection";
 import type { Answers, BuiltCase, WrongMethod } from "../kind";
 import type { SearchPlanTruth } from "./drawCase";
 import type { SearchPlanParameters } from "./parameters";
-import { cellsOf, losslessDetection, thresholdFor, type Plan, type Rated, type Requirement } from "./planGrid";
+import { losslessDetection, thresholdFor, timeOf, type Plan, type Rated } from "./planGrid";
 import { answersFor, requirementOf, roundedUp, solve } from "./solve";
 
 type Wrong = WrongMethod<SearchPlanParameters, SearchPlanTruth>;
@@ -37,12 +37,7 @@ function planWithoutLosses({ publicCase }: BuiltCase<SearchPlanTruth>, given: Om
   const requirement = requirementOf(publicCase);
   let sums = 1;
   while (sums < 500 && losslessDetection({ ...given, sums }, requirement) < requirement.detection) sums++;
-  const plan = rated({ ...given, sums }, requirement);
+  const plan: Rated = { ...given, sums, timeS: timeOf({ ...given, sums }, requirement) };
   const threshold = roundedUp(thresholdFor(plan, requirement));
   return answersFor(plan, requirement, threshold, losslessDetection(plan, requirement, threshold));
 }
-
-const rated = (plan: Plan, requirement: Requirement): Rated => ({
-  ...plan,
-  timeS: (cellsOf(plan, requirement) * (plan.coherentMs / 1000) * plan.sums) / requirement.correlators,
-});

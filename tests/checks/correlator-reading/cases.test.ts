@@ -1,7 +1,7 @@
 import { describe, expect, test } from "vitest";
 import { correlatorReading as kind } from "@/lib/checks/correlator-reading/correlatorReading";
 import { drawCase } from "@/lib/checks/correlator-reading/drawCase";
-import { markAnswers } from "@/lib/checks/correlator-reading/mark";
+import { markAnswers } from "@/lib/checks/correlator-reading/markAnswers";
 import { circularDifference } from "@/lib/checks/circularDifference";
 import { planOf, seedOf, seeds } from "../planOf";
 

@@ -1,7 +1,7 @@
 import { describe, expect, test } from "vitest";
 import { correlatorReading as kind } from "@/lib/checks/correlator-reading/correlatorReading";
 import type { CorrelatorReadingTruth } from "@/lib/checks/correlator-reading/drawCase";
-import { markAnswers } from "@/lib/checks/correlator-reading/mark";
+import { markAnswers } from "@/lib/checks/correlator-reading/markAnswers";
 import { planOf, seedOf } from "../planOf";
 
 const plan = planOf(kind, { noiseOnly: 0 });
