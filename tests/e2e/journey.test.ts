@@ -102,7 +102,7 @@ describe("from a draft to a stranger's verification", () => {
     await page.getByText("Exhibit 1").waitFor();
     findings.push(...(await axeFindings(page)));
     await page.getByText("Competent", { exact: true }).click();
-    await page.getByLabel("Reasons").fill("Every line is within, and the sitting log shows no gap.");
+    await page.getByRole("textbox", { name: "Reasons" }).fill("Every line is within, and the sitting log shows no gap.");
     await page.getByRole("checkbox").check();
     await page.getByRole("button", { name: "Sign: competent" }).click();
     await page.getByLabel("Your password, again").fill(password);
@@ -155,7 +155,7 @@ describe("from a draft to a stranger's verification", () => {
     await page.goto(`${ORIGIN}/saltmarsh/register/${kept.number}`);
     await page.getByText("Withdraw", { exact: true }).click();
     await page.getByLabel("Ground").selectOption("Competence in doubt");
-    await page.getByLabel("Reason").fill("Two sites report a wrong lock.");
+    await page.getByRole("textbox", { name: "Reason" }).fill("Two sites report a wrong lock.");
     await page.getByLabel(/Type the second group/).fill(kept.number!.split("-")[2]!);
     await page.getByRole("button", { name: /^Withdraw LM-/ }).click();
     await page.getByLabel("Your password, again").fill(password);
