@@ -42,7 +42,12 @@ export async function sql(bin, folder, database, lines) {
   const at = paths(folder);
   const port = fs.readFileSync(at.port, "utf8");
   const args = ["-qAtX", "-v", "ON_ERROR_STOP=1", "-h", "127.0.0.1", "-p", port, "-U", SUPERUSER, "-d", database];
-  const env = { ...process.env, PGPASSWORD: fs.readFileSync(at.password, "utf8"), PGOPTIONS: "", PGCONNECT_TIMEOUT: "30" };
+  const env = {
+    ...process.env,
+    PGPASSWORD: fs.readFileSync(at.password, "utf8"),
+    PGOPTIONS: "",
+    PGCONNECT_TIMEOUT: "30",
+  };
   return mustRun("A statement of the set-up", path.join(bin, "psql"), args, { env, input: `${lines.join("\n")}\n` });
 }
 
