@@ -3,8 +3,9 @@ import { owner } from "@/tests/support/owner";
 import { PAGES, READING_ROUTES, WRITING_ROUTES, type Addressed } from "./rows";
 import { makeWorld, VISITORS, type Visitor, type World } from "./world";
 
-const origin = process.env.BASE_URL;
-if (!origin) throw new Error("BASE_URL is not set: run the browser tests through npm test");
+// The running product's own address. (BASE_URL is no help: the test runner sets it to "/" for itself.)
+const origin = process.env.PUBLIC_ORIGIN;
+if (!origin) throw new Error("PUBLIC_ORIGIN is not set: run the browser tests through npm test");
 
 let world: World;
 beforeAll(async () => {

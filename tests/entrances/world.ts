@@ -61,7 +61,8 @@ export async function makeWorld() {
       employer: firm.employer.slug,
       module: made.id,
       release: release.number,
-      assignment: assignment.id,
+      // Not started yet: once it is, its page leads on to the sitting.
+      assignment: (await makeAssignment(firm)).id,
       order: orderId,
       openCase: openCase.id,
       file: await storedFile(openCase.id),
