@@ -56,7 +56,9 @@ export async function makeRelease(
     tree: TREE,
     frontMatter: frontMatter(),
     checks: [checkPlan()],
-    fingerprint: createHash("sha256").update(`release ${next()}`).digest("hex"),
+    fingerprint: createHash("sha256")
+      .update(`${module.id} ${columns.number ?? "1.0"}`)
+      .digest("hex"),
     reason: "first release",
     releasedBy: personId,
     releasedAt: daysFrom(NOW, -20),

@@ -1,24 +1,33 @@
 import { hashPassword } from "@/lib/passwords";
 import type { Actor, Role } from "@/lib/policies/actor";
 import { daysFrom, minutesFrom, NOW } from "./clock";
-import { insert } from "./owner";
+import { insert, ownerRows } from "./owner";
 
 /** Rows of people and firms, put in by the owner; the chain of records is in chain.ts. */
 export type Employer = { id: string; slug: string; name: string; timeZone: string; issuerStanding: string };
 export type Person = { id: string; email: string; name: string; passwordHash: string | null };
 
-let count = 0;
-const next = () => (count += 1);
+let count: number | undefined;
 
-export const makeEmployer = (over: Partial<Employer> = {}): Promise<Employer> => {
-  const n = next();
+/** Numbers go on after what is stored: test files that share the running product's database do not meet. */
+async function next(): Promise<number> {
+  if (count === undefined) {
+    const sql = "SELECT (SELECT count(*) FROM people) + (SELECT count(*) FROM employers) AS stored";
+    const [{ stored } = { stored: 0 }] = await ownerRows<{ stored: number }>(sql);
+    count ??= Number(stored);
+  }
+  return (count += 1);
+}
+
+export const makeEmployer = async (over: Partial<Employer> = {}): Promise<Employer> => {
+  const n = await next();
   return insert<Employer>("employers", { slug: `firm-${n}`, name: `Firm ${n}`, timeZone: "Europe/London", ...over });
 };
 
 export const makePerson = async (
   over: { email?: string; name?: string; password?: string; isOperator?: boolean } = {},
 ) => {
-  const n = next();
+  const n = await next();
   const { password, ...columns } = over;
   const passwordHash = password === undefined ? null : await hashPassword(password);
   return insert<Person>("people", { email: `person-${n}@example.test`, name: `Person ${n}`, passwordHash, ...columns });
