@@ -29,7 +29,7 @@ type ModuleDeskProps = {
 /** Source and preview side by side, problems under both; on a phone one of the two. */
 export function ModuleDesk({ employer, draft, reading: first, release }: ModuleDeskProps) {
   const editor = useRef<ReactCodeMirrorRef>(null);
-  const { source, reading, checking, revision, saved, change, save } = useDraft({
+  const { source, reading, checking, saved, change, save } = useDraft({
     base: `/api/employers/${employer}/modules/${draft.id}`,
     source: draft.source,
     title: draft.title,
@@ -164,7 +164,6 @@ export function ModuleDesk({ employer, draft, reading: first, release }: ModuleD
         onClose={() => setReleasing(false)}
         employer={employer}
         moduleId={draft.id}
-        revision={revision}
         last={last?.number ?? null}
         save={save}
         action={release}

@@ -12,10 +12,10 @@ type ReleaseDialogProps = {
   onClose: () => void;
   employer: string;
   moduleId: string;
-  revision: number;
   /** Number of the last release; null before the first. */
   last: string | null;
-  save: () => Promise<void>;
+  /** Gives the revision that holds the text of the editor, or null when it could not be stored. */
+  save: () => Promise<number | null>;
   action: FormAction;
 };
 
@@ -29,7 +29,8 @@ export function ReleaseDialog({ open, onClose, employer, moduleId, revision, las
 
   const release = () =>
     start(async () => {
-      await save();
+      const revision = await save();
+      if (revision === null) return setMessage("The text could not be saved.");
       const form = new FormData();
       for (const [name, value] of Object.entries({
         employer,

@@ -24,12 +24,11 @@ export function useDraft(options: Options) {
   const [source, setSource] = useState(options.source);
   const [reading, setReading] = useState(options.reading);
   const [checking, setChecking] = useState(false);
-  const [revision, setRevision] = useState(options.revision);
   const [saved, setSaved] = useState<DraftSaved>({ state: "saved", at: clock(options.savedAt), why: null });
   const state = useRef({ source, title: options.title, revision: options.revision, stored: options.source });
   const timers = useRef<{ save?: ReturnType<typeof setTimeout>; check?: ReturnType<typeof setTimeout> }>({});
   const checkRun = useRef(0);
-  const saveRef = useRef<() => Promise<void>>(async () => undefined);
+  const saveRef = useRef<() => Promise<unknown>>(async () => undefined);
   const underWay = useRef<Promise<void> | null>(null);
 
   const storeOnce = useCallback(async () => {
@@ -45,7 +44,6 @@ export function useDraft(options: Options) {
       }
       state.current.revision = body.revision!;
       state.current.stored = text;
-      setRevision(body.revision!);
       setSaved({ state: "saved", at: clock(body.savedAt!), why: null });
       if (state.current.source !== text) timers.current.save = setTimeout(() => void saveRef.current(), SAVE_MS);
     } catch {
@@ -54,13 +52,15 @@ export function useDraft(options: Options) {
     }
   }, [base]);
 
-  // One at a time: a second save with the revision of the first would be refused as somebody else's.
-  const save = useCallback(async () => {
+  /** Store what stands in the editor. The revision that holds it, or null when it could not be stored. */
+  const save = useCallback(async (): Promise<number | null> => {
+    // One at a time: a second save with the revision of the first would be refused as somebody else's.
     while (underWay.current) await underWay.current;
     underWay.current = storeOnce().finally(() => {
       underWay.current = null;
     });
     await underWay.current;
+    return state.current.stored === state.current.source ? state.current.revision : null;
   }, [storeOnce]);
 
   const check = useCallback(async () => {
@@ -101,7 +101,7 @@ export function useDraft(options: Options) {
     },
     [check],
   );
-  return { source, reading, checking, revision, saved, change, save };
+  return { source, reading, checking, saved, change, save };
 }
 
 const send = (address: string, method: "PUT" | "POST", body: object) =>
