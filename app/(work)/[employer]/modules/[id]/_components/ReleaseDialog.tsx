@@ -20,7 +20,7 @@ type ReleaseDialogProps = {
 };
 
 /** Freezing the draft: which number it gets, and why. */
-export function ReleaseDialog({ open, onClose, employer, moduleId, revision, last, save, action }: ReleaseDialogProps) {
+export function ReleaseDialog({ open, onClose, employer, moduleId, last, save, action }: ReleaseDialogProps) {
   const [kind, setKind] = useState<string>("minor");
   const [reason, setReason] = useState("");
   const [message, setMessage] = useState<string | null>(null);
