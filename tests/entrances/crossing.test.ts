@@ -1,7 +1,8 @@
 import { afterAll, beforeAll, describe, expect, test } from "vitest";
 import { owner } from "@/tests/support/owner";
 import { PAGES, READING_ROUTES, WRITING_ROUTES, type Addressed } from "./rows";
-import { makeWorld, VISITORS, type Visitor, type World } from "./world";
+import { VISITORS, type Visitor } from "./visitors";
+import { makeWorld, type World } from "./world";
 
 // The running product's own address. (BASE_URL is no help: the test runner sets it to "/" for itself.)
 const origin = process.env.PUBLIC_ORIGIN;

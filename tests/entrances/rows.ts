@@ -1,4 +1,4 @@
-import { VISITORS, type Ids, type Visitor } from "./world";
+import { VISITORS, type Ids, type Visitor } from "./visitors";
 
 /** What each visitor is answered: an HTTP status, or "sign in" for the way to the sign-in page and back. */
 export type Answers = Record<Visitor, number | "sign in">;
@@ -140,14 +140,14 @@ export const WRITING_ROUTES: Readonly<Record<string, Crossed & { address?: (ids:
   },
   "POST /api/employers/[employer]/modules/[id]/check": {
     address: (ids) => `/api/employers/${ids.employer}/modules/${ids.module}/check`,
-    ...crossedIn("queries/checkDraft", "checkDraft"),
+    ...crossedIn("queries/tenants", "checkDraft"),
   },
   "PUT /api/employers/[employer]/modules/[id]/draft": {
     address: (ids) => `/api/employers/${ids.employer}/modules/${ids.module}/draft`,
     ...crossedIn("commands/saveDraft", "saveDraft"),
   },
   // Open to anyone: the one is believed by its signature only, the other stores nothing.
-  "POST /api/stripe/webhook": crossedIn("payments/receiveStripeEvent", "receiveStripeEvent"),
+  "POST /api/stripe/webhook": crossedIn("payments/webhook-signature", "POST"),
   "POST /api/verify/file": crossedIn("routes/verifyFile", "POST"),
 };
 
@@ -168,8 +168,8 @@ export const ACTIONS: Readonly<Record<string, Crossed>> = {
   releaseModuleAction: crossedIn("commands/releaseModule", "releaseModule"),
   assignReleaseAction: crossedIn("commands/assignRelease", "assignRelease"),
   orderFeesAction: crossedIn("commands/orderFees", "orderFees"),
-  payOrderAction: crossedIn("payments/startCheckout", "startCheckout"),
-  cancelOrderAction: crossedIn("payments/cancelOrder", "cancelOrder"),
+  payOrderAction: crossedIn("payments/checkout", "startCheckout"),
+  cancelOrderAction: crossedIn("payments/checkout", "cancelOrder"),
   startSittingAction: crossedIn("commands/startSitting", "startSitting"),
   openCaseAction: crossedIn("commands/openCase", "openCase"),
   askQuestionAction: crossedIn("commands/askQuestion", "askQuestion"),

@@ -16,20 +16,7 @@ import {
 import { makeActor, makeEmployer, makeFirm, makePerson, makeSession } from "@/tests/support/factories";
 import { insert, ownerRows } from "@/tests/support/owner";
 import { checkPlan } from "@/tests/support/samples";
-
-/** Everybody who tries every entrance. All but the last two belong to the firm whose pages they ask for. */
-export const VISITORS = [
-  "signed out",
-  "the technician",
-  "another technician",
-  "lead",
-  "assessor",
-  "decider",
-  "administrator",
-  "every role elsewhere",
-  "operator",
-] as const;
-export type Visitor = (typeof VISITORS)[number];
+import type { Ids, Visitor } from "./visitors";
 
 /** One firm with every record of the chain; put into the database of the running product. */
 export async function makeWorld() {
@@ -55,27 +42,23 @@ export async function makeWorld() {
     "every role elsewhere": (await makeActor(await makeEmployer(), [...ROLES])).sessionId,
     operator: (await makeSession((await makePerson({ isOperator: true })).id)).id,
   };
-  return {
-    firm,
-    ids: {
-      employer: firm.employer.slug,
-      module: made.id,
-      release: release.number,
-      // Not started yet: once it is, its page leads on to the sitting.
-      assignment: (await makeAssignment(firm)).id,
-      order: orderId,
-      openCase: openCase.id,
-      file: await storedFile(openCase.id),
-      sitting: sitting.id,
-      undecided: undecided.id,
-      record: marked.caseId,
-      certificate: certificate.number,
-    },
-    cookies: await cookiesOf(people),
+  const ids: Ids = {
+    employer: firm.employer.slug,
+    module: made.id,
+    release: release.number,
+    // Not started yet: once it is, its page leads on to the sitting.
+    assignment: (await makeAssignment(firm)).id,
+    order: orderId,
+    openCase: openCase.id,
+    file: await storedFile(openCase.id),
+    sitting: sitting.id,
+    undecided: undecided.id,
+    record: marked.caseId,
+    certificate: certificate.number,
   };
+  return { firm, ids, cookies: await cookiesOf(people) };
 }
 export type World = Awaited<ReturnType<typeof makeWorld>>;
-export type Ids = World["ids"];
 
 /** A file of the case, put where the running product looks for it. */
 async function storedFile(caseId: string): Promise<string> {

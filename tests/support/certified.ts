@@ -2,7 +2,7 @@ import { createHash, randomBytes } from "node:crypto";
 import { addDays } from "@/lib/calendar";
 import { canonicalJson, fingerprintOf } from "@/lib/certificates/canonicalJson";
 import { drawCertificateNumber } from "@/lib/certificates/number";
-import { certificateRecord } from "@/lib/certificates/record";
+import { certificateRecord, type CertificateRecord } from "@/lib/certificates/record";
 import type { FrontMatter } from "@/lib/mdx/frontMatter";
 import type { StandingWord } from "@/lib/policies/standing";
 import type { Outcome } from "@/models/Decision";
@@ -47,12 +47,18 @@ export async function makeDecision(
   });
 }
 
-/** Valid from the day of the decision on; the PDF is a few bytes that no reader opens. */
+/** Valid from the day of the decision on; the PDF is a few bytes that no reader opens, unless one is drawn. */
 export async function makeCertificate(
   firm: Firm,
   given: Given<
     { decision: Decision },
-    { number: string; effectiveOn: string; lastDay: string; pdf: Buffer; issuedAt: Date }
+    {
+      number: string;
+      effectiveOn: string;
+      lastDay: string;
+      pdf: Buffer | ((record: CertificateRecord) => Promise<Uint8Array>);
+      issuedAt: Date;
+    }
   > = {},
 ) {
   const { decision: earlier, ...columns } = given;
@@ -90,7 +96,8 @@ export async function makeCertificate(
     ],
     demonstration: false,
   });
-  const pdf = columns.pdf ?? Buffer.from(`%PDF-1.7 ${number}`);
+  const { pdf: file = Buffer.from(`%PDF-1.7 ${number}`) } = columns;
+  const pdf = Buffer.isBuffer(file) ? file : Buffer.from(await file(record));
   const certificate = await insert<Certificate>("certificates", {
     decisionId: decision.id,
     sittingId: decision.sittingId,
