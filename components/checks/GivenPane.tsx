@@ -42,12 +42,13 @@ export function GivenPane({ open, filesAddress }: GivenPaneProps) {
         <SectionHead title="Accepted within" />
         <dl className="mt-1">
           {view.tolerances.map((row) => (
-            <div key={row.quantity} className="border-b-hair border-rule py-1.5 text-dense">
-              <div className="flex justify-between gap-3">
-                <dt>{row.label}</dt>
-                <dd className="text-right font-semibold figures">{row.tolerance}</dd>
-              </div>
-              <dd className="text-label font-normal text-ink-2">
+            <div
+              key={row.quantity}
+              className="grid grid-cols-[1fr_auto] gap-x-3 border-b-hair border-rule py-1.5 text-dense"
+            >
+              <dt>{row.label}</dt>
+              <dd className="text-right font-semibold figures">{row.tolerance}</dd>
+              <dd className="col-span-2 text-label font-normal text-ink-2">
                 {row.critical && <strong className="text-minus-deep">Critical. </strong>}
                 {row.reason}
               </dd>

@@ -1,10 +1,8 @@
-import AxeBuilder from "@axe-core/playwright";
 import { readFileSync } from "node:fs";
-import { chromium, type Browser, type BrowserContextOptions, type Page } from "playwright-core";
+import { chromium, type Browser, type BrowserContextOptions } from "playwright-core";
 
 export const ORIGIN = process.env.PUBLIC_ORIGIN!;
-export const DESK = { width: 1440, height: 900 };
-export const PHONE = { width: 390, height: 844 };
+const DESK = { width: 1440, height: 900 };
 
 type SignIn = { role: string; name: string; email: string; password: string };
 
@@ -50,18 +48,3 @@ export async function signedIn(browser: Browser, role: string, options: BrowserC
   await page.waitForURL((url) => !url.pathname.startsWith("/sign-in"));
   return { page, faults, password };
 }
-
-/** Rules of WCAG 2.2 AA that a machine can tell; the answer lists what it found and where. */
-export async function axeFindings(page: Page): Promise<string[]> {
-  const { violations } = await new AxeBuilder({ page })
-    .withTags(["wcag2a", "wcag2aa", "wcag21aa", "wcag22aa"])
-    .analyze();
-  return violations.map(
-    ({ id, nodes }) =>
-      `${new URL(page.url()).pathname} ${id}: ${nodes.map((node) => node.target.join(" ")).join("; ")}`,
-  );
-}
-
-/** Whether the page is wider than the window. */
-export const scrollsSideways = (page: Page): Promise<boolean> =>
-  page.evaluate(() => document.documentElement.scrollWidth > document.documentElement.clientWidth + 1);
