@@ -1,11 +1,13 @@
 import type { Metadata } from "next";
 import Link from "next/link";
+import { CertificateTable } from "@/components/certificates/CertificateTable";
 import { formatInstant } from "@/components/ui/formatDay";
 import { SectionHead } from "@/components/ui/SectionHead";
 import { SubmitKey } from "@/components/ui/SubmitKey";
 import { RowHead, Table, Td, Th, Tr } from "@/components/ui/Table";
 import { signOutAction } from "@/lib/auth/actions";
 import { requirePerson } from "@/lib/auth/requirePerson";
+import { listOwnCertificates } from "@/lib/queries/listCertificates";
 import { getAccount, type AccountView } from "@/lib/queries/getAccount";
 import { EndSession } from "./_components/EndSession";
 import { NameForm } from "./_components/NameForm";
@@ -15,7 +17,8 @@ import { endSessionAction, renamePersonAction, setPasswordAction } from "./actio
 export const metadata: Metadata = { title: "Account" };
 
 export default async function AccountPage() {
-  const account = await getAccount(await requirePerson(), new Date());
+  const person = await requirePerson();
+  const [account, certificates] = await Promise.all([getAccount(person, new Date()), listOwnCertificates(person)]);
   return (
     <div className="page py-8 desk:py-10">
       <div className="flex flex-wrap items-end justify-between gap-4">
@@ -30,6 +33,12 @@ export default async function AccountPage() {
       <div className="mt-8 grid gap-x-(--gutter) gap-y-10 desk:grid-cols-[7fr_5fr]">
         <div className="grid content-start gap-10">
           <Employers employers={account.employers} />
+          {certificates.length > 0 && (
+            <section aria-labelledby="certificates">
+              <SectionHead title="Certificates" id="certificates" note="yours for life, whoever employs you" />
+              <CertificateTable rows={certificates} base="/verify" />
+            </section>
+          )}
           <Sessions sessions={account.sessions} />
         </div>
         <div className="grid content-start gap-10">

@@ -55,44 +55,34 @@ export default async function PeoplePage({ params }: { params: Promise<{ employe
 
 function Roles({ employer, view: { people, may } }: { employer: string; view: PeopleView }) {
   return (
-    <Table caption="People and their roles">
-      <thead>
-        <tr>
-          <Th>Person</Th>
-          <Th>Roles</Th>
-          {may.grantRole && <Th>Grant</Th>}
-        </tr>
-      </thead>
-      <tbody>
-        {people.map((person) => (
-          <Tr key={person.id}>
-            <RowHead>
-              {person.name}
-              <span className="block text-label font-normal text-ink-2">{person.email}</span>
-            </RowHead>
-            <Td>
-              <HeldRoles
-                employer={employer}
-                person={person.name}
-                roles={person.roles}
-                end={may.endRole ? endRoleAction : null}
-              />
-            </Td>
-            {may.grantRole && (
-              <Td>
-                <GrantRoleForm
-                  employer={employer}
-                  personId={person.id}
-                  person={person.name}
-                  held={person.roles.map(({ role }) => role)}
-                  action={grantRoleAction}
-                />
-              </Td>
-            )}
-          </Tr>
-        ))}
-      </tbody>
-    </Table>
+    <ul>
+      {people.map((person) => (
+        <li
+          key={person.id}
+          className="grid gap-x-6 gap-y-3 border-b-hair border-rule py-4 tablet:grid-cols-[5fr_4fr_3fr] tablet:py-3"
+        >
+          <div className="min-w-0">
+            <h3 className="font-text text-body font-semibold tracking-normal">{person.name}</h3>
+            <p className="text-dense text-ink-2">{person.email}</p>
+          </div>
+          <HeldRoles
+            employer={employer}
+            person={person.name}
+            roles={person.roles}
+            end={may.endRole ? endRoleAction : null}
+          />
+          {may.grantRole && (
+            <GrantRoleForm
+              employer={employer}
+              personId={person.id}
+              person={person.name}
+              held={person.roles.map(({ role }) => role)}
+              action={grantRoleAction}
+            />
+          )}
+        </li>
+      ))}
+    </ul>
   );
 }
 

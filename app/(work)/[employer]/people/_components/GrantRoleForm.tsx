@@ -2,6 +2,7 @@
 import { useActionState, useState } from "react";
 import { messageOf, type FormAction } from "@/components/ui/actionResult";
 import { CheckBox } from "@/components/ui/CheckBox";
+import { Select } from "@/components/ui/Select";
 import { SubmitKey } from "@/components/ui/SubmitKey";
 import { ROLE_CHOICES } from "./roleChoices";
 
@@ -22,36 +23,28 @@ export function GrantRoleForm({ employer, personId, person, held, action }: Gran
   const message = messageOf(result);
   if (open.length === 0) return <span className="text-ink-2">holds every role</span>;
   return (
-    <form action={send} className="grid gap-2">
-      <input type="hidden" name="employer" value={employer} />
-      <input type="hidden" name="personId" value={personId} />
-      <div className="flex flex-wrap items-center gap-2">
-        <div className="field-box">
-          <select
-            name="role"
-            aria-label={`Role to grant to ${person}`}
-            value={chosen}
-            onChange={(event) => setRole(event.target.value)}
-            required
-          >
-            <option value="">Choose a role</option>
-            {open.map(({ value, label }) => (
-              <option key={value} value={value}>
-                {label}
-              </option>
-            ))}
-          </select>
+    <details>
+      <summary className="key key-small">Grant a role</summary>
+      <form action={send} className="mt-3 grid gap-3">
+        <input type="hidden" name="employer" value={employer} />
+        <input type="hidden" name="personId" value={personId} />
+        <Select
+          label={`Role for ${person}`}
+          name="role"
+          choices={open}
+          empty="Choose a role"
+          value={chosen}
+          onChange={(event) => setRole(event.target.value)}
+          error={message}
+          required
+        />
+        {chosen === "decider" && <CheckBox name="outsideLine" label="Outside the candidates’ line" />}
+        <div>
+          <SubmitKey variant="plain" size="small">
+            Grant
+          </SubmitKey>
         </div>
-        <SubmitKey variant="plain" size="small" aria-label={`Grant the role to ${person}`}>
-          Grant
-        </SubmitKey>
-      </div>
-      {chosen === "decider" && <CheckBox name="outsideLine" label="Outside the candidates’ line" />}
-      {message && (
-        <span role="alert" className="text-dense text-minus-deep">
-          {message}
-        </span>
-      )}
-    </form>
+      </form>
+    </details>
   );
 }

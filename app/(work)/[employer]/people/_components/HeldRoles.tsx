@@ -10,7 +10,7 @@ type HeldRolesProps = { employer: string; person: string; roles: readonly Held[]
 export function HeldRoles({ employer, person, roles, end }: HeldRolesProps) {
   if (roles.length === 0) return <span className="text-ink-2">no role now</span>;
   return (
-    <ul className="grid gap-1">
+    <ul className="grid content-start gap-1">
       {roles.map((held) => (
         <li key={held.grantId} className="flex flex-wrap items-center gap-x-3 gap-y-1">
           <span>
