@@ -40,7 +40,6 @@ export function publicCase(
         value: `${coherentMs}\u00a0ms × ${sums}, ±${formatQuantity(dopplerHalfWidthHz, "Hz", 0)}, bins of ${dopplerStepHz}\u00a0Hz`,
       },
       { label: "False alarms per search", value: formatUnderstood(falseAlarmPerSearch, "1") },
-      ...listed.map((satellite) => ({ label: `PRN ${satellite.prn}`, value: reportText(satellite) })),
     ],
     cautions: [...falseLockCautions],
     sections: sectionsOf(asked, listed),
@@ -76,11 +75,6 @@ const BRIEF = [
   "Genuine: the satellite's own signal is in the capture, reported or not. Cross-correlation: reported as tracked, but the lock is on another satellite's code. Absent: not reported as tracked, and its own signal is not in the capture, whatever peaks another satellite's code raises in its search.",
   "A false lock has several peaks of nearly the same height. Give the Doppler and the apparent C/N0 of one of the highest.",
 ];
-
-const reportText = ({ azimuthDeg, elevationDeg, reportedCn0DbHz }: ListedSatellite) =>
-  `azimuth ${azimuthDeg}°, elevation ${elevationDeg}°, ${
-    reportedCn0DbHz === null ? "not tracked" : `tracked at ${formatQuantity(reportedCn0DbHz, "dB-Hz", 0)}`
-  }`;
 
 const sectionsOf = (asked: AskedQuantities, listed: readonly ListedSatellite[]): FormSection[] =>
   [
