@@ -8,7 +8,9 @@ export function safeBack(path: unknown): string | null {
   if (typeof path !== "string" || !path.startsWith("/") || /[\\\p{Cc}]/u.test(path)) return null;
   if (!URL.canParse(path, ANY_ORIGIN)) return null;
   const url = new URL(path, ANY_ORIGIN);
+  // Dots that were taken out may leave two slashes in front, and those begin an address of another site.
+  if (url.origin !== ANY_ORIGIN || url.pathname.startsWith("//")) return null;
   // Coming back to the sign-in page, or to an answer for machines, would lead nowhere.
-  if (url.origin !== ANY_ORIGIN || /^\/(sign-in|api)(\/|$)/.test(url.pathname)) return null;
+  if (/^\/(sign-in|api)(\/|$)/.test(url.pathname)) return null;
   return url.pathname + url.search;
 }
