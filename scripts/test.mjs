@@ -39,17 +39,18 @@ async function test(parts) {
     }
   });
   if (ready) {
-    // Two lanes for two cores: the build and what needs it, and everything else.
+    // The build keeps both cores busy; the browser and the database tests wait more than they compute.
     const built = parts.includes("browser") ? build(tally) : Promise.resolve(false);
     await Promise.all([
       built.then((done) => done && browserLane(tally, cluster, note)),
-      otherLane(tally, cluster, parts, built),
+      built.then(() => parts.includes("database") && databaseLane(tally, cluster)),
+      sourcesLane(tally, parts, built),
     ]);
   }
   await stop(tally.failed > 0 ? 1 : 0, `${tally.passed} passed, ${tally.failed} failed`);
 }
 
-async function otherLane(tally, cluster, parts, built) {
+async function sourcesLane(tally, parts, built) {
   if (parts.includes("checks")) {
     await tally.command("format", [bin("prettier", "bin/prettier.cjs"), "--check", "."], process.env);
     await tally.command("lint", [bin("eslint", "bin/eslint.js"), ".", "--max-warnings=0"], process.env);
@@ -61,10 +62,9 @@ async function otherLane(tally, cluster, parts, built) {
     if (!(await built)) await tally.command("route types", [NEXT, "typegen"], buildSettings());
     await tally.command("types", [bin("typescript", "bin/tsc"), "--noEmit"], process.env);
   }
-  if (parts.includes("database")) await databaseTests(tally, cluster);
 }
 
-async function databaseTests(tally, cluster) {
+async function databaseLane(tally, cluster) {
   const settings = await freshSettings(cluster, "lagmark_tests", await freePort());
   const env = { ...process.env, ...settings, NODE_ENV: "test" };
   const migrated = await tally.step("migrations up, down and up again", async () => {

@@ -27,7 +27,8 @@ export function run(command, args, { env = process.env, cwd, log, input } = {}) 
     child.stdout.setEncoding("utf8").on("data", keep);
     child.stderr.setEncoding("utf8").on("data", keep);
     child.on("error", reject);
-    child.on("close", (code) => {
+    child.on("close", (code, signal) => {
+      if (signal) keep(`\n${path.basename(command)} was ended by ${signal}.\n`);
       forget();
       if (file !== null) fs.closeSync(file);
       resolve({ code: code ?? 1, output: stripVTControlCharacters(output) });
