@@ -189,7 +189,10 @@ describe("modules and releases", () => {
   test("a number is given once in a module, a fingerprint once in the world", async () => {
     const made = await makeModule(firm);
     const { fingerprint } = await makeRelease(firm, { module: made });
-    await broken(makeRelease(firm, { module: made }), "releases_module_id_number_key");
+    await broken(
+      makeRelease(firm, { module: made, fingerprint: sha256("another text") }),
+      "releases_module_id_number_key",
+    );
     await broken(makeRelease(await makeFirm(), { fingerprint }), "releases_fingerprint_key");
   });
 
