@@ -7,6 +7,7 @@ import type { SignedIn } from "@/lib/queries/getSignedIn";
 import { toResult, type ActionResult } from "./actionResult";
 import { formValues } from "./formValues";
 import { requirePerson } from "./requirePerson";
+import { unstorableField } from "./unstorableField";
 
 type Input = FormData | Readonly<Record<string, unknown>>;
 type Action<R> = (previous: unknown, input: Input) => Promise<ActionResult<R>>;
@@ -36,10 +37,17 @@ export const personAction =
     return toResult(() => run(parsed(schema, values), person));
   };
 
-/** @throws InvalidError with the sentences of every field that the schema refuses */
-export function parsed<S extends z.ZodType>(schema: S, values: unknown): z.output<S> {
+/**
+ * @param stored false for what is only read and answered: any character is welcome then
+ * @throws InvalidError with the sentences of every field that the schema refuses, or that holds what cannot be stored
+ */
+export function parsed<S extends z.ZodType>(schema: S, values: unknown, { stored = true } = {}): z.output<S> {
   const { data, error } = schema.safeParse(values);
-  if (!error) return data as z.output<S>;
+  if (!error) {
+    const found = stored && unstorableField(data);
+    if (found) throw new InvalidError(found.message, found.field === null ? {} : { [found.field]: [found.message] });
+    return data as z.output<S>;
+  }
   const { fieldErrors, formErrors } = z.flattenError(error) as {
     fieldErrors: Record<string, string[]>;
     formErrors: string[];
