@@ -1,4 +1,5 @@
-import { chipsOf, registerOutput, registerSequence, type Chips } from "./shiftRegister";
+import { CA_G2_DELAYS } from "./caDelays";
+import { chipsOf, registerOutput, registerSequence, type Chips, type Levels } from "./shiftRegister";
 
 const G1 = 0o2011; // 1 + x^3 + x^10, IS-GPS-200, 3.3.2.3
 const G2 = 0o3515; // 1 + x^2 + x^3 + x^6 + x^8 + x^9 + x^10, same section
@@ -18,21 +19,25 @@ const made = new Map<number, Chips>();
 /**
  * C/A code of one satellite, one period of 1023 chips of +1 (logic 0) or -1 (logic 1), first chip first. The array is
  * shared between callers: do not write into it.
- * @param prn 1 to 37; 34 and 37 are the same code
+ * @param prn 1 to 63, 120 to 158 or 183 to 206; 34 and 37 are the same code
+ * @throws RangeError when no code is published for it
  */
 export function caCode(prn: number): Chips {
   const known = made.get(prn);
   if (known) return known;
-  const [a, b] = stagesFor(prn);
   const g1 = registerSequence(G1);
-  const g2 = registerOutput(G2, (1 << (a - 1)) | (1 << (b - 1)));
+  const g2 = g2Of(prn);
   const code = chipsOf(g1.map((level, n) => level ^ g2[n]));
   made.set(prn, code);
   return code;
 }
 
-function stagesFor(prn: number): readonly [number, number] {
+/** The satellite's own G2 sequence: the sum of two stages, or the last stage some chips late. */
+function g2Of(prn: number): Levels {
   const stages = CA_G2_STAGES.get(prn);
-  if (!stages) throw new RangeError(`caCode: prn has no published stages, got ${prn}`);
-  return stages;
+  if (stages) return registerOutput(G2, (1 << (stages[0] - 1)) | (1 << (stages[1] - 1)));
+  const delay = CA_G2_DELAYS.get(prn);
+  if (delay === undefined) throw new RangeError(`caCode: prn has no published stages or delay, got ${prn}`);
+  const plain = registerSequence(G2);
+  return plain.map((_, n) => plain[(n + plain.length - delay) % plain.length]);
 }

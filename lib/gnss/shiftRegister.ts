@@ -38,6 +38,9 @@ export const stepRegister = (state: number, taps: number, stages: number): numbe
 /** +1 for logic 0, -1 for logic 1. */
 export const chipsOf = (levels: Levels): Chips => Int8Array.from(levels, (level) => 1 - 2 * level);
 
+/** The inverse of `chipsOf`. */
+export const levelsOf = (chips: Chips): Levels => Uint8Array.from(chips, (chip) => (1 - chip) >> 1);
+
 function stagesOf(polynomial: number): number {
   const stages = 31 - Math.clz32(polynomial);
   if (!Number.isInteger(polynomial) || polynomial % 2 !== 1 || stages < 2 || stages > 20)

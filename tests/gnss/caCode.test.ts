@@ -57,7 +57,7 @@ test("the G1 register taken alone is balanced by one chip, as every maximal-leng
   expect(ones).toBe(512);
 });
 
-test.each([0, 38, -1, 1.5, NaN])("caCode(%d) is refused: no published stages", (prn) =>
+test.each([0, 64, 119, 159, 182, 207, -1, 1.5, NaN])("caCode(%d) is refused: no published code", (prn) =>
   expect(() => caCode(prn)).toThrow(/prn has no published stages/),
 );
 
