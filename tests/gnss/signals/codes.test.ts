@@ -2,7 +2,7 @@ import { createHash } from "node:crypto";
 import { describe, expect, test } from "vitest";
 import { isSignalName, loadSignal, SIGNAL_NAMES, type SignalName } from "@/lib/gnss/signals/registry";
 import second from "@/tests/reference/signal-codes.json";
-import { bitsOf, octalOf } from "@/tests/support/bits";
+import { bitsOf, octalOf } from "./bits";
 
 type Row = [number, number, string, string, number, number, string];
 const rowsOf = (name: SignalName) => second.signals[name] as Row[];

@@ -3,7 +3,7 @@ import { CA_G2_DELAYS } from "@/lib/gnss/caDelays";
 import { caCode } from "@/lib/gnss/caCode";
 import { gpsL1Ca } from "@/lib/gnss/signals/gpsL1Ca";
 import published from "@/tests/reference/gps-l1-ca-more.json";
-import { bitsOf, octalOf } from "@/tests/support/bits";
+import { bitsOf, octalOf } from "./bits";
 
 const rows = published.rows as [number, number, string][];
 
