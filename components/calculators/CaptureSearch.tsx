@@ -71,7 +71,7 @@ export function CaptureSearch({ address, rateHz, prns, windowHz, onTake }: Captu
   return (
     <div className="grid gap-4">
       <form
-        className="flex flex-wrap items-end gap-3"
+        className="grid grid-cols-2 items-end gap-3 tablet:flex tablet:flex-wrap"
         onSubmit={(event) => {
           event.preventDefault();
           run(prn);
@@ -82,18 +82,20 @@ export function CaptureSearch({ address, rateHz, prns, windowHz, onTake }: Captu
           value={String(prn)}
           onChange={(event) => setPrn(Number(event.target.value))}
           choices={prns.map((one) => ({ value: String(one), label: `PRN ${one}` }))}
-          className="w-[7.5rem]"
+          className="col-span-2 tablet:w-[7.5rem]"
         />
         <SearchSettingsFields value={text} onChange={setText} />
-        <Key type="submit" busy={busy}>
-          Search PRN {prn}
-        </Key>
-        <Key onClick={() => run(beside(-1))} busy={busy} aria-label={`Search PRN ${beside(-1)}`}>
-          −1
-        </Key>
-        <Key onClick={() => run(beside(1))} busy={busy} aria-label={`Search PRN ${beside(1)}`}>
-          +1
-        </Key>
+        <div className="col-span-2 grid grid-cols-[auto_1fr_auto] gap-3 tablet:flex">
+          <Key onClick={() => run(beside(-1))} busy={busy} aria-label={`Search PRN ${beside(-1)}`}>
+            −1
+          </Key>
+          <Key type="submit" busy={busy}>
+            Search PRN {prn}
+          </Key>
+          <Key onClick={() => run(beside(1))} busy={busy} aria-label={`Search PRN ${beside(1)}`}>
+            +1
+          </Key>
+        </div>
       </form>
       {refused && (
         <Notice tone="minus" fact="These settings cannot be searched.">

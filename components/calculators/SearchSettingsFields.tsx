@@ -25,7 +25,7 @@ export function SearchSettingsFields({
       unit={unit === "1" ? undefined : unit}
       value={value[key]}
       onChange={(text) => onChange({ ...value, [key]: text })}
-      className="w-[8.25rem]"
+      className="tablet:w-[8.25rem]"
     />
   ));
 }

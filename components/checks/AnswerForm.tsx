@@ -100,7 +100,7 @@ function AnswerField({ spec, row, value, onChange }: AnswerFieldProps) {
       label={shown}
       aria-label={label}
       unit={unit === "1" ? undefined : formatQuantity(0, unit, 0).replace(/^0\s?/, "")}
-      signed={unit === "Hz"}
+      signed={spec.id === "doppler"} // a step or a bin has no sign
       value={value}
       error={error}
       help={spec.help}

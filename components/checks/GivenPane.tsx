@@ -1,6 +1,7 @@
 import { Cautions } from "@/components/ui/Cautions";
 import { Ledger } from "@/components/ui/Ledger";
 import { SectionHead } from "@/components/ui/SectionHead";
+import { wholeNumbers } from "@/components/ui/wholeNumbers";
 import { CAUTIONS } from "@/components/mdx/cautions";
 import type { OpenCaseView } from "@/lib/queries/getCase";
 
@@ -15,7 +16,7 @@ export function GivenPane({ open, filesAddress }: GivenPaneProps) {
         <SectionHead title="Given" />
         <div className="mt-3 grid gap-3">
           {view.brief.map((paragraph) => (
-            <p key={paragraph}>{paragraph}</p>
+            <p key={paragraph}>{wholeNumbers(paragraph)}</p>
           ))}
         </div>
         <Ledger narrow className="mt-4" rows={view.given} />
@@ -50,7 +51,7 @@ export function GivenPane({ open, filesAddress }: GivenPaneProps) {
               <dd className="text-right font-semibold figures">{row.tolerance}</dd>
               <dd className="col-span-2 text-label font-normal text-ink-2">
                 {row.critical && <strong className="text-minus-deep">Critical. </strong>}
-                {row.reason}
+                {wholeNumbers(row.reason)}
               </dd>
             </div>
           ))}

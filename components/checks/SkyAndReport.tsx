@@ -86,12 +86,14 @@ function SkyPlot({ data: { sky, wall } }: { data: SkyData }) {
       })}
       {sky.map(({ prn, azimuthDeg, elevationDeg }) => {
         const [x, y] = place(azimuthDeg, elevationDeg);
+        const side = labelSide(sky, prn);
         return (
           <g key={prn}>
             <rect x={x - 4} y={y - 4} width="8" height="8" fill="var(--plus)" stroke="var(--sheet)" strokeWidth="1.5" />
             <text
-              x={x + 8}
+              x={x + 8 * side}
               y={y + 4.5}
+              textAnchor={side > 0 ? "start" : "end"}
               fontSize="13"
               fontWeight="600"
               fill="var(--ink)"
@@ -106,6 +108,19 @@ function SkyPlot({ data: { sky, wall } }: { data: SkyData }) {
       })}
     </svg>
   );
+}
+
+const LABEL = { width: 26, height: 16 };
+
+/** 1: number at the right of its square; -1: at the left, where the right is taken by another square or its number. */
+function labelSide(sky: SkyData["sky"], prn: number): 1 | -1 {
+  const places = sky.map((one) => ({ prn: one.prn, at: place(one.azimuthDeg, one.elevationDeg) }));
+  const [x, y] = places.find((one) => one.prn === prn)!.at;
+  const crowded = places.some(({ prn: other, at: [otherX, otherY] }) => {
+    const right = otherX - x;
+    return (right > 0 || (right === 0 && other > prn)) && right < LABEL.width && Math.abs(otherY - y) < LABEL.height;
+  });
+  return crowded ? -1 : 1;
 }
 
 const radius = (elevationDeg: number) => (RADIUS * (90 - elevationDeg)) / 90;

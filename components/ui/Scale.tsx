@@ -4,7 +4,8 @@ import { Mark } from "./Mark";
 import { Menu } from "./Menu";
 import { Stations } from "./Stations";
 
-export type Station = { href: string; label: string };
+/** `covers`: addresses of pages that belong to the station though they do not lie under its own. */
+export type Station = { href: string; label: string; covers?: readonly string[] };
 
 type ScaleProps = {
   /** At most five. */

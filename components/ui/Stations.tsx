@@ -35,8 +35,9 @@ export function Stations({
   });
 }
 
-/** The station with the longest address that leads to this page, or none. */
+/** The station with the longest address that leads to this page, else one that covers it, or none. */
 export function currentStation(stations: readonly Station[], path: string): string | undefined {
-  const leading = stations.filter(({ href }) => path === href || path.startsWith(`${href}/`));
-  return leading.sort((a, b) => b.href.length - a.href.length)[0]?.href;
+  const leadsHere = (address: string) => path === address || path.startsWith(`${address}/`);
+  const leading = stations.filter(({ href }) => leadsHere(href)).sort((a, b) => b.href.length - a.href.length);
+  return (leading[0] ?? stations.find(({ covers }) => covers?.some(leadsHere)))?.href;
 }

@@ -34,7 +34,7 @@ const COMMA_THREE = /^([+-]?[0-9]*),([0-9]{3})(e.*)?$/i;
 /** One kind of space, minus and micro sign; a power of ten as an exponent. */
 const plainText = (text: string) =>
   text
-    .replace(/[\s\u00a0\u2007\u2009\u202f]+/g, " ")
+    .replace(/[\s\u00a0\u2007\u2009\u202f\u2060]+/g, " ")
     .replace(/[\u2212\u2010-\u2013\ufe63\uff0d]/g, "-")
     .replace(/[\u00b5\u03bc]/g, "u")
     .trim()

@@ -1,12 +1,12 @@
 import type { Actor, Role } from "./actor";
 
-/** A place in the navigation; `segment` is its folder under the employer, `href` an address of its own. */
-export type Station = { label: string } & ({ segment: string } | { href: string });
+/** A place in the navigation: `segment` is its folder under the employer, `covers` others it leads to, `href` an address of its own. */
+export type Station = { label: string } & ({ segment: string; covers?: readonly string[] } | { href: string });
 
 const DESK = { label: "Desk", segment: "desk" };
-const CHECKS = { label: "Checks", segment: "checks" };
+const CHECKS = { label: "Checks", segment: "checks", covers: ["assignments", "sittings", "cases", "records"] };
 const MODULES = { label: "Modules", segment: "modules" };
-const SITTINGS = { label: "Sittings", segment: "sittings" };
+const SITTINGS = { label: "Sittings", segment: "sittings", covers: ["records"] };
 const PEOPLE = { label: "People", segment: "people" };
 const QUEUE = { label: "Queue", segment: "queue" };
 const RECORDS = { label: "Records", segment: "records" };
@@ -32,6 +32,10 @@ export function stationsOf(roles: readonly Role[]): readonly Station[] {
 
 export const stationAddress = (employerSlug: string, station: Station): string =>
   "href" in station ? station.href : `/${employerSlug}/${station.segment}`;
+
+/** Addresses of the pages that belong to a station and do not lie under its own. */
+export const coveredAddresses = (employerSlug: string, station: Station): readonly string[] =>
+  "covers" in station ? (station.covers ?? []).map((segment) => `/${employerSlug}/${segment}`) : [];
 
 /** Where a person begins at an employer. */
 export function homeOf({ employerSlug, roles }: Pick<Actor, "employerSlug" | "roles">): string {

@@ -6,7 +6,7 @@ import { ThemeSwitch } from "@/components/ui/ThemeSwitch";
 import { requireActor } from "@/lib/auth/requireActor";
 import type { Actor } from "@/lib/policies/actor";
 import { can } from "@/lib/policies/can";
-import { homeOf, menuStationsOf, scaleStationsOf, stationAddress } from "@/lib/policies/stations";
+import { coveredAddresses, homeOf, menuStationsOf, scaleStationsOf, stationAddress } from "@/lib/policies/stations";
 import { SignOut } from "./_components/SignOut";
 
 type Props = { children: ReactNode; params: Promise<{ employer: string }> };
@@ -17,6 +17,7 @@ export default async function WorkLayout({ children, params }: Props) {
   const link = (station: Parameters<typeof stationAddress>[1]) => ({
     href: stationAddress(actor.employerSlug, station),
     label: station.label,
+    covers: coveredAddresses(actor.employerSlug, station),
   });
   const stations = scaleStationsOf(actor.roles).map(link);
   const links = [

@@ -21,6 +21,13 @@ test.each([
   ["/elsewhere", undefined],
 ])("at %s the current station is %s", (path, station) => expect(currentStation(STATIONS, path)).toBe(station));
 
+test("a page under no station belongs to the one that covers it, but to its own station first", () => {
+  const checks = { href: "/firm/checks", label: "Checks", covers: ["/firm/cases", "/firm/sittings"] };
+  const sittings = { href: "/firm/sittings", label: "Sittings" };
+  expect(currentStation([checks], "/firm/cases/7")).toBe("/firm/checks");
+  expect(currentStation([checks, sittings], "/firm/sittings/7")).toBe("/firm/sittings");
+});
+
 test("the current station is marked for a screen reader and by a block", () => {
   const { container } = render(<Scale stations={STATIONS} current="/firm/checks" />);
   const marked = [...container.querySelectorAll("[aria-current=page]")].map((element) => element.textContent);

@@ -1,6 +1,7 @@
 import { Gauge } from "@/components/ui/Gauge";
 import { Glyph } from "@/components/ui/Glyph";
 import { ReasonRow, RowHead, Table, Td, Th, Tr } from "@/components/ui/Table";
+import { wholeNumbers } from "@/components/ui/wholeNumbers";
 import type { MarkedRow } from "@/lib/checks/kind";
 import type { MarkingRecordView } from "@/lib/queries/getMarkingRecord";
 import { Fragment } from "react";
@@ -52,7 +53,7 @@ export function RecordTable({ record }: { record: MarkingRecordView }) {
                   </Tr>
                   {row.reason && (
                     <ReasonRow columns={COLUMNS} wash={wash ?? undefined}>
-                      {row.reason}
+                      {wholeNumbers(row.reason)}
                     </ReasonRow>
                   )}
                 </Fragment>
@@ -96,7 +97,7 @@ function PhoneRow({ row }: { row: MarkedRow }) {
       )}
       {row.reason && (
         <p className={`mt-2 text-dense ${row.within ? "text-ink-2" : "text-minus-deep"}`}>
-          <strong className="font-semibold">Reason</strong> {row.reason}
+          <strong className="font-semibold">Reason</strong> {wholeNumbers(row.reason)}
         </p>
       )}
     </li>
