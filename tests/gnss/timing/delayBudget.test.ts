@@ -50,8 +50,8 @@ test("the wrong sign doubles what the right one takes away", () => {
 const overhead: Direction[] = [{ azimuthDeg: 0, elevationDeg: 90 }];
 const ring: Direction[] = [0, 90, 180, 270].map((azimuthDeg) => ({ azimuthDeg, elevationDeg: 30 }));
 
-// Chadsey, "An automated GPS time-transfer receiver's position and its effect", PTTI 1995 (abstract): 3 m can exceed 10 ns, below
-// 1 ns takes 0.2 m. Title from memory.
+// Chadsey, Precise Time and Time Interval meeting 1995, abstract: 3 m can exceed 10 ns, below
+// 1 ns takes 0.2 m.
 test("3 m up are 10 ns overhead, 0.2 m stay below 1 ns", () => {
   const up = (upM: number) => ({ eastM: 0, northM: 0, upM });
   expectNear(heldPositionTimeError(up(3), overhead).meanNs, 10.007, 1e-3, "overhead");
