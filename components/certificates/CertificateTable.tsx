@@ -14,7 +14,7 @@ type CertificateTableProps = {
 
 export function CertificateTable({ rows, base, showHolder }: CertificateTableProps) {
   return (
-    <Table caption="Certificates, newest first">
+    <Table reflow caption="Certificates, newest first">
       <thead>
         <tr>
           <Th>Number</Th>
@@ -30,13 +30,15 @@ export function CertificateTable({ rows, base, showHolder }: CertificateTablePro
         {rows.map((row) => (
           <Tr key={row.number}>
             <RowHead className="whitespace-nowrap font-code">{row.number}</RowHead>
-            {showHolder && <Td>{row.holder}</Td>}
-            <Td>
+            {showHolder && <Td label="Holder">{row.holder}</Td>}
+            <Td label="Competence">
               {row.code} {row.title}, release {row.release}
             </Td>
-            <Td>{row.issuer}</Td>
-            <Td className="whitespace-nowrap">{formatDay(row.lastDay)}</Td>
-            <Td>
+            <Td label="Issuer">{row.issuer}</Td>
+            <Td label="Last day" className="whitespace-nowrap">
+              {formatDay(row.lastDay)}
+            </Td>
+            <Td label="Standing">
               <StandingGlyph standing={row.standing} daysLeft={row.daysLeft} />
             </Td>
             <Td>

@@ -145,7 +145,7 @@ function Pane({ id, current, className, children }: PaneProps) {
     <section
       aria-label={label}
       tabIndex={0}
-      className={`${id === current ? "block" : "hidden"} min-h-0 min-w-0 overflow-y-auto p-4 desk:block desk:px-6 desk:py-5 ${className}`}
+      className={`${id === current ? "block" : "hidden"} relative min-h-0 min-w-0 overflow-y-auto p-4 desk:block desk:px-6 desk:py-5 ${className}`}
     >
       {children}
     </section>

@@ -15,7 +15,7 @@ export function SittingTable({
   showTechnician?: boolean;
 }) {
   return (
-    <Table caption="Sittings">
+    <Table reflow caption="Sittings">
       <thead>
         <tr>
           <Th>{showTechnician ? "Technician" : "Module"}</Th>
@@ -32,18 +32,18 @@ export function SittingTable({
           <Tr key={row.assignmentId}>
             <RowHead>{showTechnician ? row.technician : `${row.code} ${row.title}`}</RowHead>
             {showTechnician && (
-              <Td>
+              <Td label="Module">
                 {row.code} {row.title}, release {row.release}
               </Td>
             )}
-            <Td>{row.number ? `S-${row.number}` : "–"}</Td>
-            <Td>
+            <Td label="Sitting">{row.number ? `S-${row.number}` : "–"}</Td>
+            <Td label="State">
               <SittingStateWord state={row.state} />
             </Td>
-            <Td figure>
+            <Td label="Checks met" figure>
               {row.met} of {row.checks}
             </Td>
-            <Td className="whitespace-nowrap">
+            <Td label="Day" className="whitespace-nowrap">
               {row.lastDay ? `Last day ${formatDay(row.lastDay)}` : `Due ${formatDay(row.dueOn)}`}
             </Td>
             <Td>

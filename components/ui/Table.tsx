@@ -7,11 +7,13 @@ type TableProps = {
   showCaption?: boolean;
   children: ReactNode;
   fixedFirst?: boolean;
+  /** On a phone every row becomes a block: its head, then label and value line by line. Its cells carry labels. */
+  reflow?: boolean;
   className?: string;
 };
 
 /** Words left, figures right, unit in the head or the cell but never in both. Scrolls in its own region when it must. */
-export function Table({ caption, showCaption, fixedFirst, children, className }: TableProps) {
+export function Table({ caption, showCaption, fixedFirst, reflow, children, className }: TableProps) {
   return (
     <div
       className={classNames("table-region", className)}
@@ -20,7 +22,7 @@ export function Table({ caption, showCaption, fixedFirst, children, className }:
       role={fixedFirst ? "region" : undefined}
       aria-label={fixedFirst ? caption : undefined}
     >
-      <table className="table">
+      <table className="table" data-reflow={reflow || undefined}>
         <caption className={showCaption ? "pb-2 text-left text-label" : "sr-only"}>{caption}</caption>
         {children}
       </table>
@@ -86,19 +88,22 @@ export function RowHead({ children, className }: { children: ReactNode; classNam
   );
 }
 
+/** `label` repeats the head of the column where the table reflows. */
 export function Td({
   figure,
+  label,
   colSpan,
   children,
   className,
 }: {
   figure?: boolean;
+  label?: string;
   colSpan?: number;
   children?: ReactNode;
   className?: string;
 }) {
   return (
-    <td colSpan={colSpan} className={classNames(figure && "figure", className)}>
+    <td colSpan={colSpan} data-label={label} className={classNames(figure && "figure", className)}>
       {children}
     </td>
   );

@@ -6,8 +6,6 @@ type WorkBarProps = {
   /** What it belongs to, above the title ("Sitting S-20318, case 1 of 2"). */
   eyebrow?: ReactNode;
   title: ReactNode;
-  /** Quieter words beside the title (state of a draft). */
-  aside?: ReactNode;
   /** Figures with their labels, each behind a rule. */
   facts?: readonly WorkFact[];
   /** Steps, saving state, time left: in the middle. */
@@ -17,7 +15,7 @@ type WorkBarProps = {
 };
 
 /** Second row of a working page: name of the thing, its steps or facts, its state, its keys. */
-export function WorkBar({ eyebrow, title, aside, facts, children, keys }: WorkBarProps) {
+export function WorkBar({ eyebrow, title, facts, children, keys }: WorkBarProps) {
   return (
     <div className="border-b-hair border-rule-strong bg-sheet">
       <div className="page flex min-h-[76px] flex-wrap items-center gap-x-8 gap-y-3 py-2.5">
@@ -25,7 +23,6 @@ export function WorkBar({ eyebrow, title, aside, facts, children, keys }: WorkBa
           {eyebrow && <p className="text-label font-normal text-ink-2">{eyebrow}</p>}
           <h1 className="text-[1.625rem] leading-8">{title}</h1>
         </div>
-        {aside && <div className="border-rule text-dense text-ink-2 tablet:border-l-hair tablet:pl-5">{aside}</div>}
         {children}
         {facts && facts.length > 0 && (
           <dl className="flex flex-wrap gap-x-5 gap-y-2">

@@ -70,7 +70,7 @@ function Employers({ employers }: Pick<AccountView, "employers">) {
           You hold no role at any employer. An administrator of your firm can grant you one.
         </p>
       ) : (
-        <Table caption="Employers at which you hold a role">
+        <Table reflow caption="Employers at which you hold a role">
           <thead>
             <tr>
               <Th>Employer</Th>
@@ -85,7 +85,7 @@ function Employers({ employers }: Pick<AccountView, "employers">) {
                     {employer.name}
                   </Link>
                 </RowHead>
-                <Td>{employer.roles.join(", ")}</Td>
+                <Td label="Roles">{employer.roles.join(", ")}</Td>
               </Tr>
             ))}
           </tbody>
@@ -99,7 +99,7 @@ function Sessions({ sessions }: Pick<AccountView, "sessions">) {
   return (
     <section aria-labelledby="sessions">
       <SectionHead title="Sessions" id="sessions" note="an ended session is refused at its next request" />
-      <Table caption="Your sessions">
+      <Table reflow caption="Your sessions">
         <thead>
           <tr>
             <Th>Started</Th>
@@ -112,8 +112,8 @@ function Sessions({ sessions }: Pick<AccountView, "sessions">) {
           {sessions.map((session) => (
             <Tr key={session.id} wash={session.isThis ? "plus" : null}>
               <RowHead>{formatInstant(session.startedAt)}</RowHead>
-              <Td>{session.passwordAt ? "password" : "mailed link"}</Td>
-              <Td>{formatInstant(session.endsAt)}</Td>
+              <Td label="By">{session.passwordAt ? "password" : "mailed link"}</Td>
+              <Td label="Ends">{formatInstant(session.endsAt)}</Td>
               <Td>
                 {session.isThis ? "this session" : <EndSession sessionId={session.id} action={endSessionAction} />}
               </Td>

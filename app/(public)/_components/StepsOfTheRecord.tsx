@@ -16,7 +16,7 @@ export function StepsOfTheRecord({ prn, delayChips }: { prn: number; delayChips:
       <ol className="mt-10 border-b-line border-rule-strong">
         <StepRow number={1} title="An employer writes the module" exhibit={<ExampleModule />}>
           In plain text, for its own equipment and procedures. Calculators stand inside the text, practical checks at
-          its end; a release is tried a thousand times before it binds anybody.
+          its end; a release is numbered, fingerprinted and never changed.
         </StepRow>
         <StepRow
           number={2}

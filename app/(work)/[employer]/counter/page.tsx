@@ -36,7 +36,7 @@ export default async function CounterPage({ params }: { params: Promise<{ employ
       {settled.length > 0 && (
         <section className="mt-10" aria-labelledby="settled">
           <SectionHead title="Settled" id="settled" note="Refundable only while no case has been drawn" />
-          <Table caption="Settled fees">
+          <Table reflow caption="Settled fees">
             <thead>
               <tr>
                 <Th>Technician</Th>
@@ -50,12 +50,14 @@ export default async function CounterPage({ params }: { params: Promise<{ employ
               {settled.map((fee) => (
                 <Tr key={fee.id}>
                   <RowHead>{fee.technician}</RowHead>
-                  <Td>
+                  <Td label="Sitting of">
                     {fee.code} {fee.title}, release {fee.release}
                   </Td>
-                  <Td>{formatDay(fee.settledAt!)}</Td>
-                  <Td>{fee.caseDrawn ? "drawn" : "none drawn yet"}</Td>
-                  <Td figure>{formatMoney(fee.amountMinor, fee.currency)}</Td>
+                  <Td label="Settled">{formatDay(fee.settledAt!)}</Td>
+                  <Td label="Case">{fee.caseDrawn ? "drawn" : "none drawn yet"}</Td>
+                  <Td label="Fee" figure>
+                    {formatMoney(fee.amountMinor, fee.currency)}
+                  </Td>
                 </Tr>
               ))}
             </tbody>
@@ -70,7 +72,7 @@ function Orders({ employer, orders }: { employer: string; orders: OrderLine[] })
   return (
     <section className="mt-10" aria-labelledby="orders">
       <SectionHead title="Orders" id="orders" />
-      <Table caption="Orders">
+      <Table reflow caption="Orders">
         <thead>
           <tr>
             <Th>Ordered</Th>
@@ -85,8 +87,8 @@ function Orders({ employer, orders }: { employer: string; orders: OrderLine[] })
           {orders.map((order) => (
             <Tr key={order.id}>
               <RowHead>{formatInstant(order.orderedAt)}</RowHead>
-              <Td>{order.orderedBy}</Td>
-              <Td>
+              <Td label="By">{order.orderedBy}</Td>
+              <Td label="State">
                 <span className="inline-flex items-center gap-2">
                   <Glyph name={order.paidAt ? "within" : order.closedAt ? "none" : "awaiting"} />
                   {order.paidAt
@@ -96,8 +98,12 @@ function Orders({ employer, orders }: { employer: string; orders: OrderLine[] })
                       : "Waits for payment"}
                 </span>
               </Td>
-              <Td figure>{order.fees}</Td>
-              <Td figure>{formatMoney(order.amountMinor, order.currency)}</Td>
+              <Td label="Sittings" figure>
+                {order.fees}
+              </Td>
+              <Td label="Amount" figure>
+                {formatMoney(order.amountMinor, order.currency)}
+              </Td>
               <Td>
                 <LinkKey href={`/${employer}/counter/orders/${order.id}`} size="small">
                   Open the order

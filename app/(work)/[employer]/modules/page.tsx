@@ -28,7 +28,7 @@ export default async function ModulesPage({ params }: { params: Promise<{ employ
               Write the first one: what your technicians do, with practical checks attached.
             </Empty>
           ) : (
-            <Table caption="Modules">
+            <Table reflow caption="Modules">
               <thead>
                 <tr>
                   <Th>Code</Th>
@@ -43,8 +43,8 @@ export default async function ModulesPage({ params }: { params: Promise<{ employ
                 {rows.map((row) => (
                   <Tr key={row.id}>
                     <RowHead className="whitespace-nowrap">{row.code}</RowHead>
-                    <Td>{row.title}</Td>
-                    <Td>
+                    <Td label="Title">{row.title}</Td>
+                    <Td label="Last release">
                       {row.number ? (
                         <Link className="link" href={`/${employer}/modules/${row.id}/releases/${row.number}`}>
                           {row.number}, {formatDay(row.releasedAt!)}
@@ -53,13 +53,15 @@ export default async function ModulesPage({ params }: { params: Promise<{ employ
                         "none yet"
                       )}
                     </Td>
-                    <Td>
+                    <Td label="Draft">
                       <span className="inline-flex items-center gap-2 whitespace-nowrap">
                         <Glyph name={row.changed ? "awaiting" : "done"} />
                         {row.changed ? "changed" : "as released"}
                       </span>
                     </Td>
-                    <Td figure>{row.openSittings}</Td>
+                    <Td label="Open sittings" figure>
+                      {row.openSittings}
+                    </Td>
                     <Td>
                       <LinkKey href={`/${employer}/modules/${row.id}`} size="small">
                         Open

@@ -89,7 +89,7 @@ function Roles({ employer, view: { people, may } }: { employer: string; view: Pe
 function Trainings({ trainings }: Pick<PeopleView, "trainings">) {
   if (trainings.length === 0) return <p className="mt-3 text-ink-2">No training is recorded.</p>;
   return (
-    <Table caption="Recorded trainings">
+    <Table reflow caption="Recorded trainings">
       <thead>
         <tr>
           <Th>Technician</Th>
@@ -102,9 +102,9 @@ function Trainings({ trainings }: Pick<PeopleView, "trainings">) {
         {trainings.map((training) => (
           <Tr key={training.id}>
             <RowHead>{training.technician}</RowHead>
-            <Td>{training.trainer}</Td>
-            <Td>{formatDay(training.endedOn)}</Td>
-            <Td>{training.recordedBy}</Td>
+            <Td label="Trained by">{training.trainer}</Td>
+            <Td label="Ended">{formatDay(training.endedOn)}</Td>
+            <Td label="Recorded by">{training.recordedBy}</Td>
           </Tr>
         ))}
       </tbody>

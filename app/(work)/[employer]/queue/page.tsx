@@ -25,7 +25,7 @@ export default async function QueuePage({ params }: { params: Promise<{ employer
             A sitting comes here when every check of it has its marking record, or its last day has passed.
           </Empty>
         ) : (
-          <Table caption="Sittings for decision">
+          <Table reflow caption="Sittings for decision">
             <thead>
               <tr>
                 <Th>Sitting</Th>
@@ -41,15 +41,15 @@ export default async function QueuePage({ params }: { params: Promise<{ employer
               {rows.map((row) => (
                 <Tr key={row.sittingId}>
                   <RowHead>S-{row.number}</RowHead>
-                  <Td>{row.technician}</Td>
-                  <Td>
+                  <Td label="Technician">{row.technician}</Td>
+                  <Td label="Module">
                     {row.code} {row.title}
                   </Td>
-                  <Td figure>
+                  <Td label="Checks met" figure>
                     {row.met} of {row.checks}
                   </Td>
-                  <Td>{row.readyAt ? formatInstant(row.readyAt) : "–"}</Td>
-                  <Td>
+                  <Td label="Last marked">{row.readyAt ? formatInstant(row.readyAt) : "–"}</Td>
+                  <Td label="State">
                     <span className="inline-flex items-center gap-2">
                       <Glyph name="awaiting" /> For decision
                       {row.questions > 0 && (row.questions === 1 ? ", 1 question" : `, ${row.questions} questions`)}

@@ -20,7 +20,7 @@ export default async function RecordsPage({ params }: { params: Promise<{ employ
         {rows.length === 0 ? (
           <Empty title="No record yet">A marking record is made when a technician hands a case in.</Empty>
         ) : (
-          <Table caption="Marking records, newest first">
+          <Table reflow caption="Marking records, newest first">
             <thead>
               <tr>
                 <Th>Technician</Th>
@@ -36,16 +36,16 @@ export default async function RecordsPage({ params }: { params: Promise<{ employ
               {rows.map((row) => (
                 <Tr key={row.caseId}>
                   <RowHead>{row.technician}</RowHead>
-                  <Td>S-{row.sittingNumber}</Td>
-                  <Td>
+                  <Td label="Sitting">S-{row.sittingNumber}</Td>
+                  <Td label="Check">
                     {row.code}, {row.checkTitle}
                     {row.caseNumber > 1 && `, case ${row.caseNumber}`}
                   </Td>
-                  <Td>{formatInstant(row.markedAt)}</Td>
-                  <Td figure>
+                  <Td label="Marked">{formatInstant(row.markedAt)}</Td>
+                  <Td label="Within" figure>
                     {row.withinCount} of {row.quantityCount}
                   </Td>
-                  <Td>
+                  <Td label="Result">
                     <span className="inline-flex items-center gap-2">
                       <Glyph name={row.met ? "within" : "outside"} />
                       {row.met ? "Met" : "Not met"}

@@ -30,7 +30,7 @@ export default async function TrailPage({ params, searchParams }: Props) {
         </div>
       ) : (
         <div className="mt-6">
-          <Table caption="Trail entries, newest first">
+          <Table reflow caption="Trail entries, newest first">
             <thead>
               <tr>
                 <Th figure>Link</Th>
@@ -44,14 +44,16 @@ export default async function TrailPage({ params, searchParams }: Props) {
             <tbody>
               {rows.map((row) => (
                 <Tr key={row.id}>
-                  <Td figure>{row.sequence ?? "–"}</Td>
+                  <Td label="Link" figure>
+                    {row.sequence ?? "–"}
+                  </Td>
                   <RowHead className="whitespace-nowrap">{formatInstant(row.at, { seconds: true })}</RowHead>
-                  <Td>{row.act.replaceAll("_", " ")}</Td>
-                  <Td>{row.actor ?? "the server"}</Td>
-                  <Td>
+                  <Td label="Act">{row.act.replaceAll("_", " ")}</Td>
+                  <Td label="By">{row.actor ?? "the server"}</Td>
+                  <Td label="Row">
                     <code className="font-code text-[0.8125rem]">{row.subjectKey.slice(0, 8)}</code>
                   </Td>
-                  <Td>
+                  <Td label="SHA-256 of the row">
                     <code className="font-code text-[0.8125rem]">{row.rowSha256.slice(0, 16)}</code>
                   </Td>
                 </Tr>

@@ -27,7 +27,7 @@ export function DueFees({ employer, fees, action }: { employer: string; fees: Fe
       <input type="hidden" name="employer" value={employer} />
       <section aria-labelledby="due">
         <SectionHead title="Due now" id="due" />
-        <Table caption="Fees that are due">
+        <Table reflow caption="Fees that are due">
           <thead>
             <tr>
               <Th>Pay</Th>
@@ -40,7 +40,7 @@ export function DueFees({ employer, fees, action }: { employer: string; fees: Fe
           <tbody>
             {fees.map((fee) => (
               <Tr key={fee.id}>
-                <Td>
+                <Td label="Pay">
                   {fee.orderId ? (
                     <Link className="link" href={`/${employer}/counter/orders/${fee.orderId}`}>
                       in an order
@@ -58,11 +58,13 @@ export function DueFees({ employer, fees, action }: { employer: string; fees: Fe
                   )}
                 </Td>
                 <RowHead>{fee.technician}</RowHead>
-                <Td>
+                <Td label="Sitting of">
                   {fee.code} {fee.title}, release {fee.release}
                 </Td>
-                <Td>{formatDay(fee.dueAt)}</Td>
-                <Td figure>{formatMoney(fee.amountMinor, fee.currency)}</Td>
+                <Td label="Assigned">{formatDay(fee.dueAt)}</Td>
+                <Td label="Fee" figure>
+                  {formatMoney(fee.amountMinor, fee.currency)}
+                </Td>
               </Tr>
             ))}
           </tbody>

@@ -50,7 +50,7 @@ export default async function OrderPage({ params, searchParams }: Props) {
         {fees.length > 0 && (
           <section className="mt-8" aria-labelledby="fees">
             <SectionHead title="Sittings in this order" id="fees" />
-            <Table caption="Sittings in this order">
+            <Table reflow caption="Sittings in this order">
               <thead>
                 <tr>
                   <Th>Technician</Th>
@@ -62,10 +62,12 @@ export default async function OrderPage({ params, searchParams }: Props) {
                 {fees.map((fee) => (
                   <Tr key={fee.id}>
                     <RowHead>{fee.technician}</RowHead>
-                    <Td>
+                    <Td label="Sitting of">
                       {fee.code} {fee.title}, release {fee.release}
                     </Td>
-                    <Td figure>{formatMoney(fee.amountMinor, fee.currency)}</Td>
+                    <Td label="Fee" figure>
+                      {formatMoney(fee.amountMinor, fee.currency)}
+                    </Td>
                   </Tr>
                 ))}
               </tbody>

@@ -68,8 +68,8 @@ export function ModuleDesk({ employer, draft, reading: first, release }: ModuleD
   return (
     <div className="flex flex-1 flex-col desk:flex-none desk:h-[calc(100dvh-63px-var(--banner,0px))]">
       <WorkBar
+        eyebrow={last ? `Draft after release ${last.number}` : "Draft, never released"}
         title={`${draft.code} ${reading.title ?? draft.title}`}
-        aside={last ? `Draft after release ${last.number}` : "Draft, never released"}
         keys={
           <Key variant="filled" reason={reason} onClick={() => setReleasing(true)}>
             Release…
@@ -116,7 +116,7 @@ export function ModuleDesk({ employer, draft, reading: first, release }: ModuleD
               <KeyCap>N</KeyCap> next problem
             </span>
           </p>
-          <div className="min-h-[60dvh] flex-1 overflow-auto desk:min-h-0">
+          <div className="relative min-h-[60dvh] flex-1 overflow-auto desk:min-h-0">
             <SourceEditor
               ref={editor}
               source={source}
@@ -137,7 +137,7 @@ export function ModuleDesk({ employer, draft, reading: first, release }: ModuleD
             tabIndex={0}
             role="region"
             aria-label="Preview of the module"
-            className="min-h-0 flex-1 overflow-auto px-6"
+            className="relative min-h-0 flex-1 overflow-auto px-6"
           >
             {reading.tree ? (
               <article className="min-h-full bg-sheet px-6 py-5">

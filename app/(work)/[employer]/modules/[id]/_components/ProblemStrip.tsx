@@ -19,7 +19,7 @@ export function ProblemStrip({ lines, line, problems, checking, onGo, onRepair }
     <section
       aria-label="Problems"
       aria-live="polite"
-      className="max-h-[15rem] overflow-y-auto border-t-strong border-ink bg-sheet px-(--margin) pb-2"
+      className="relative max-h-[15rem] overflow-y-auto border-t-strong border-ink bg-sheet px-(--margin) pb-2"
     >
       <svg width="100%" height="40" className="block overflow-visible" aria-hidden>
         <rect x={place(line)} y="8" width="14" height="10" fill="var(--plus)" />

@@ -10,7 +10,7 @@ export function ReleaseList({ employer, draft }: { employer: string; draft: Modu
     <>
       <WorkBar eyebrow="Module" title={`${draft.code} ${draft.title}`} />
       <div className="page py-8">
-        <Table caption="Releases, newest first">
+        <Table reflow caption="Releases, newest first">
           <thead>
             <tr>
               <Th>Release</Th>
@@ -25,10 +25,10 @@ export function ReleaseList({ employer, draft }: { employer: string; draft: Modu
             {draft.releases.map((release) => (
               <Tr key={release.id}>
                 <RowHead>{release.number}</RowHead>
-                <Td>{release.kind}</Td>
-                <Td>{formatInstant(release.releasedAt)}</Td>
-                <Td>{release.releasedBy}</Td>
-                <Td>{release.reason}</Td>
+                <Td label="Kind">{release.kind}</Td>
+                <Td label="Released">{formatInstant(release.releasedAt)}</Td>
+                <Td label="By">{release.releasedBy}</Td>
+                <Td label="Reason">{release.reason}</Td>
                 <Td>
                   <LinkKey href={`/${employer}/modules/${draft.id}/releases/${release.number}`} size="small">
                     Open

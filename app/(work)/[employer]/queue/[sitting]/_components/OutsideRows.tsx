@@ -12,7 +12,7 @@ export function OutsideRows({ records, checks }: Props) {
   if (lines.length === 0) return <p className="text-dense text-ink-2">Every line is within its tolerance.</p>;
   const title = (id: string) => checks.find((check) => check.plan.id === id)!.plan.title;
   return (
-    <Table caption="Lines outside tolerance">
+    <Table reflow caption="Lines outside tolerance">
       <thead>
         <tr>
           <Th>Line</Th>
@@ -34,10 +34,18 @@ export function OutsideRows({ records, checks }: Props) {
               </span>
               {line.reason && <span className="block max-w-measure text-dense font-normal">{line.reason}</span>}
             </RowHead>
-            <Td figure>{line.understood ?? (line.handedIn || "–")}</Td>
-            <Td figure>{line.computed}</Td>
-            <Td figure>{line.tolerance}</Td>
-            <Td>{line.offByTolerances !== null && <Gauge offByTolerances={line.offByTolerances} within={false} />}</Td>
+            <Td label="Handed in" figure>
+              {line.understood ?? (line.handedIn || "–")}
+            </Td>
+            <Td label="Computed" figure>
+              {line.computed}
+            </Td>
+            <Td label="Tolerance" figure>
+              {line.tolerance}
+            </Td>
+            <Td label="Against tolerance">
+              {line.offByTolerances !== null && <Gauge offByTolerances={line.offByTolerances} within={false} />}
+            </Td>
           </Tr>
         ))}
       </tbody>

@@ -8,7 +8,7 @@ type Props = { records: DecisionDeskView["records"]; checks: DecisionDeskView["s
 export function SittingLog({ records, checks }: Props) {
   if (records.length === 0) return <p className="text-dense text-ink-2">No case was opened.</p>;
   return (
-    <Table caption="Cases of this sitting">
+    <Table reflow caption="Cases of this sitting">
       <thead>
         <tr>
           <Th>Case</Th>
@@ -24,12 +24,12 @@ export function SittingLog({ records, checks }: Props) {
             <RowHead>
               {checks.find((check) => check.plan.id === record.checkId)!.plan.title}, case {record.caseNumber}
             </RowHead>
-            <Td>{formatInstant(record.openedAt)}</Td>
-            <Td>{formatInstant(record.handedInAt)}</Td>
-            <Td figure>
+            <Td label="Opened">{formatInstant(record.openedAt)}</Td>
+            <Td label="Handed in">{formatInstant(record.handedInAt)}</Td>
+            <Td label="Time used" figure>
               {minutes(record.openedAt, record.handedInAt)} of {minutes(record.openedAt, record.endsAt)} min
             </Td>
-            <Td>{record.byClock ? "by the clock" : "by the technician"}</Td>
+            <Td label="How">{record.byClock ? "by the clock" : "by the technician"}</Td>
           </Tr>
         ))}
       </tbody>

@@ -78,7 +78,7 @@ function Assigned({ employer, release }: { employer: string; release: ReleaseVie
   return (
     <section aria-labelledby="assigned">
       <SectionHead title="Assigned" id="assigned" />
-      <Table caption="Assignments of this release">
+      <Table reflow caption="Assignments of this release">
         <thead>
           <tr>
             <Th>Technician</Th>
@@ -91,8 +91,8 @@ function Assigned({ employer, release }: { employer: string; release: ReleaseVie
           {release.assigned.map((line) => (
             <Tr key={line.id}>
               <RowHead>{line.technician}</RowHead>
-              <Td>{formatDay(line.dueOn)}</Td>
-              <Td>
+              <Td label="Due">{formatDay(line.dueOn)}</Td>
+              <Td label="State">
                 <SittingStateWord state={line.state} />
               </Td>
               <Td>
