@@ -31,6 +31,24 @@ export function registerOutput(polynomial: number, selected: number): Levels {
   return levels;
 }
 
+/**
+ * The register from any start, cut short or run on: `length` levels out of the last stage.
+ * @param start content, stage 1 in bit 0
+ */
+export function registerRun(polynomial: number, start: number, length: number): Levels {
+  const stages = stagesOf(polynomial);
+  if (!Number.isInteger(start) || start <= 0 || start >= 1 << stages)
+    throw new RangeError(`registerRun: start that is not all zeros, ${stages} stages, got ${start}`);
+  const taps = polynomial >> 1;
+  const levels = new Uint8Array(length);
+  let state = start;
+  for (let n = 0; n < length; n++) {
+    levels[n] = state >> (stages - 1);
+    state = stepRegister(state, taps, stages);
+  }
+  return levels;
+}
+
 /** One step, stage 1 in bit 0: everything moves up, the tapped sum enters stage 1. */
 export const stepRegister = (state: number, taps: number, stages: number): number =>
   ((state << 1) | parity(state & taps)) & ((1 << stages) - 1);
