@@ -105,6 +105,8 @@ const DATA_AND_LOGIC: Row[] = [
   { files: "scripts/register.mjs", may: [], packages: ["node:", "tsx"] },
   { files: "scripts/fakes/", may: ["scripts"], packages: ["node:", "smtp-server", "mailparser"] },
   { files: "scripts/*.mjs", may: ["scripts"], packages: ["node:"] },
+  // The runner of the benchmarks, which stand with the tests.
+  { files: "scripts/bench", may: ["scripts", "tests/bench"], packages: ["node:"] },
   { files: "scripts/", may: ["lib", "models"], packages: ["node:", "pg", "pg-boss", "sequelize", "asn1js", "pkijs"] },
 ];
 

@@ -1,0 +1,69 @@
+// `npm run bench [-- NAME ...]`: our kernels beside a numpy and scipy reference, in turns within one run, since only their
+// ratio says anything on a machine that others use as well. Exit code 0 when the answers agree, 1 when they differ, 2 when the
+// reference cannot run. A target that is missed is shown and fails nothing: a loaded machine must not turn a build red.
+import { spawnSync } from "node:child_process";
+import { mkdtempSync, readdirSync, rmSync } from "node:fs";
+import { tmpdir } from "node:os";
+import path from "node:path";
+import { pathToFileURL } from "node:url";
+import { parseArgs } from "node:util";
+import { compareWithTwin } from "./bench/compareWithTwin";
+import { printTable } from "./bench/printTable";
+import type { Bench, TableBench } from "@/tests/bench/bench";
+
+const FOLDER = path.resolve(import.meta.dirname, "../tests/bench");
+const { values, positionals } = parseArgs({ allowPositionals: true, options: { rounds: { type: "string" } } });
+const rounds = Number(values.rounds ?? 15);
+const say = (line: string) => process.stdout.write(`${line}\n`);
+
+const names = readdirSync(FOLDER)
+  .filter((file) => file.endsWith(".bench.ts"))
+  .map((file) => file.slice(0, -".bench.ts".length));
+const unknown = positionals.filter((name) => !names.includes(name));
+if (unknown.length > 0 || !(Number.isInteger(rounds) && rounds >= 1)) {
+  say(`bench: ${unknown.join(", ") || values.rounds}? There is ${names.join(", ")}, and --rounds from 1.`);
+  process.exit(2);
+}
+const probe = spawnSync(
+  "python3",
+  ["-c", "import numpy, scipy; print('numpy', numpy.__version__, 'scipy', scipy.__version__)"],
+  {
+    encoding: "utf8",
+  },
+);
+if (probe.status !== 0) {
+  say("bench: the reference needs python3 with numpy and scipy, which are not here. On Debian:");
+  say("  apt-get install python3-numpy python3-scipy");
+  process.exit(2);
+}
+say(`Node ${process.version}, ${probe.stdout.trim()}; medians of ${rounds} rounds, in turns\n`);
+
+let differing = 0;
+for (const name of positionals.length > 0 ? positionals : names) {
+  const { bench } = (await import(pathToFileURL(path.join(FOLDER, `${name}.bench.ts`)).href)) as {
+    bench: Bench | TableBench;
+  };
+  say(`${name}: ${bench.title}`);
+  if ("table" in bench) {
+    printTable(await bench.table(), say);
+    for (const note of (await bench.notes?.()) ?? []) say(`  ${note}`);
+  } else {
+    const folder = mkdtempSync(path.join(tmpdir(), "lagmark-bench-"));
+    try {
+      const { rows, notes, differences } = await compareWithTwin(
+        bench,
+        path.join(FOLDER, "reference", `${name}.py`),
+        folder,
+        rounds,
+      );
+      printTable(rows, say);
+      for (const note of notes) say(`  ${note}`);
+      for (const difference of differences) say(`  DIFFERS: ${difference}`);
+      differing += differences.length;
+    } finally {
+      rmSync(folder, { recursive: true, force: true });
+    }
+  }
+  say("");
+}
+process.exit(differing > 0 ? 1 : 0);

@@ -1,0 +1,51 @@
+import type { Bench } from "@/tests/bench/bench";
+import { startTwin } from "./startTwin";
+
+export type Comparison = { rows: string[][]; notes: string[]; differences: string[] };
+
+/** Runs a bench and its twin in turns and sets the medians side by side. */
+export async function compareWithTwin(
+  bench: Bench,
+  script: string,
+  folder: string,
+  rounds: number,
+): Promise<Comparison> {
+  const contest = await bench.prepare(folder);
+  const twin = await startTwin(script, folder);
+  try {
+    const answers: unknown[] = [];
+    const theirs: number[] = [];
+    const ours = contest.contenders.map((): number[] => []);
+    for (let round = -1; round < rounds; round++) {
+      const seconds = await twin.run();
+      if (round >= 0) theirs.push(seconds); // the first round warms both up
+      for (const [n, contender] of contest.contenders.entries()) {
+        const started = performance.now();
+        answers[n] = await contender.run();
+        if (round >= 0) ours[n].push((performance.now() - started) / 1000);
+      }
+    }
+    const reference = median(theirs);
+    const rows = contest.contenders.map(({ name, target }, n) => {
+      const ratio = median(ours[n]) / reference;
+      const verdict = target === null ? "" : ratio <= target ? `within ${target}` : `MISSED ${target}`;
+      return [name, milliseconds(median(ours[n])), ratio.toFixed(2), verdict];
+    });
+    return {
+      rows: [["", "median ms", "ratio", "target"], ["reference", milliseconds(reference), "1.00", ""], ...rows],
+      notes: (await contest.notes?.()) ?? [],
+      differences: contest.differences(answers, await twin.result()),
+    };
+  } finally {
+    twin.end();
+    await contest.close?.();
+  }
+}
+
+const milliseconds = (seconds: number) => (seconds * 1000).toFixed(seconds < 0.1 ? 2 : 0);
+
+function median(values: readonly number[]): number {
+  const sorted = [...values].sort((a, b) => a - b);
+  const middle = sorted.length >> 1;
+  return sorted.length % 2 === 1 ? sorted[middle] : (sorted[middle - 1] + sorted[middle]) / 2;
+}
