@@ -42,6 +42,11 @@ export function fileAnswer({ file, register, agrees }: PublicFileVerdict): FileA
     case "genuine":
       break;
   }
+  if (!file.number)
+    return refuse(
+      "This register signed the file, but it is no certificate.",
+      "It may be the record of a verification. Verify the certificate's number for its standing today.",
+    );
   if (!register)
     return refuse(
       "The signature is genuine, but the register has no such entry.",

@@ -1,3 +1,5 @@
+import { dayIn } from "@/lib/calendar";
+
 /** "2026-03-14", a day of the calendar. */
 export const isDay = (text: string): boolean =>
   /^\d{4}-\d{2}-\d{2}$/.test(text) && instantText(`${text}T00:00:00.000Z`)?.slice(0, 10) === text;
@@ -24,6 +26,15 @@ export function dayInWords(day: string): string {
 /** "14 March 2026, 10:22:51 UTC" */
 export const instantInWords = (instant: string): string =>
   `${dayInWords(instant.slice(0, 10))}, ${instant.slice(11, 19)} UTC`;
+
+/** "14 March 2026, 11:22:51 UTC+01:00": the same instant on a clock of that zone. */
+export function instantInZone(instant: string, timeZone: string): string {
+  const at = new Date(instant);
+  const clock = new Intl.DateTimeFormat("en-GB", { timeZone, timeStyle: "medium", hourCycle: "h23" }).format(at);
+  const parts = new Intl.DateTimeFormat("en-GB", { timeZone, timeZoneName: "longOffset" }).formatToParts(at);
+  const offset = parts.find(({ type }) => type === "timeZoneName")?.value.replace("GMT", "UTC");
+  return `${dayInWords(dayIn(timeZone, at))}, ${clock} ${offset}`;
+}
 
 function instantText(text: string): string | null {
   const date = new Date(text);

@@ -13,16 +13,24 @@ export type { IssuerKey };
 /** Room for the CMS in bytes; ours takes about 1.3 kB, a time stamp would take 6 kB more. */
 export const SIGNATURE_BYTES = 16_384;
 
+const ISSUED = "Issued and entered in the register";
+
 /**
  * Signs an unsigned PDF over all of its bytes (PAdES baseline, /ETSI.CAdES.detached) and forbids later changes.
  * @param at the signing time claimed in /M; nothing proves it
+ * @param reason what the signature says it is for
  */
-export async function signPdf(pdf: Uint8Array, key: IssuerKey, at: Date = new Date()): Promise<Uint8Array> {
+export async function signPdf(
+  pdf: Uint8Array,
+  key: IssuerKey,
+  at: Date = new Date(),
+  reason = ISSUED,
+): Promise<Uint8Array> {
   if (signatureGaps(pdf).length > 0) throw new RangeError("signPdf: the file is signed already");
   const document = await PDFDocument.load(pdf, { updateMetadata: false });
   pdflibAddPlaceholder({
     pdfDoc: document,
-    reason: "Issued and entered in the register",
+    reason,
     contactInfo: "",
     location: "",
     name: commonName(new X509Certificate(key.certificatePem).subject),

@@ -10,6 +10,11 @@ export const JOBS = {
   "close-case": { payload: z.object({ caseId: z.uuid() }).strict(), expireSeconds: 30, retries: 10 },
   "mark-case": { payload: z.object({ caseId: z.uuid() }).strict(), expireSeconds: 180, retries: 5 },
   "issue-certificate": { payload: z.object({ decisionId: z.uuid() }).strict(), expireSeconds: 60, retries: 10 },
+  "sign-verification": {
+    payload: z.object({ verificationId: z.uuid() }).strict(),
+    expireSeconds: 30,
+    retries: 3,
+  },
   "send-mail": { payload: z.object({ mailId: z.uuid() }).strict(), expireSeconds: 60, retries: 20 },
 } as const;
 

@@ -34,7 +34,7 @@ export type PublicVerification = Pick<
   | "demonstration"
 > & {
   holder: string;
-  issuer: { name: string; standing: string; accreditation: string | null };
+  issuer: { name: string; standing: string; accreditation: string | null; timeZone: string };
   /** A decider's part and place, not the name. */
   decided: { outsideLine: boolean; at: string };
   fingerprint: string;
@@ -59,7 +59,10 @@ export async function getPublicVerification(number: string, now = new Date()): P
   return {
     number: row.number,
     holder: record.holder.name,
-    issuer: { name: record.issuer.name, standing: record.issuer.standing, accreditation: record.issuer.accreditation },
+    issuer: {
+      ...{ name: record.issuer.name, standing: record.issuer.standing, accreditation: record.issuer.accreditation },
+      timeZone: row.timeZone,
+    },
     scheme: record.scheme,
     scope: record.scope,
     limits: record.limits,

@@ -4,6 +4,7 @@ import { closeCase } from "@/lib/commands/closeCase";
 import { issueCertificate, type IssueTools } from "@/lib/commands/issueCertificate";
 import { markCase } from "@/lib/commands/markCase";
 import { sendMail, type Outgoing } from "@/lib/commands/sendMail";
+import { signVerification } from "@/lib/commands/signVerification";
 import type { Storage } from "@/lib/storage/storage";
 import { engineFor } from "./engineFor";
 import type { EngineThreads } from "./EngineThreads";
@@ -24,5 +25,6 @@ export const workerTasks = (tools: WorkTools): Tasks => ({
   "mark-case": ({ caseId }, signal) =>
     markCase(caseId, { ...tools, engine: engineFor(tools.threads, caseId, "mark-case", signal) }),
   "issue-certificate": ({ decisionId }) => issueCertificate(decisionId, tools),
+  "sign-verification": ({ verificationId }) => signVerification(verificationId, tools),
   "send-mail": ({ mailId }) => sendMail(mailId, tools.deliver),
 });

@@ -109,6 +109,10 @@ const firmRoute = (path: (ids: Ids) => string, answers: Answers): Addressed => (
 
 export const READING_ROUTES: Readonly<Record<string, Addressed>> = {
   "GET /api/trail/heads": open("/api/trail/heads"),
+  "GET /api/verify/records/[id]": {
+    address: (ids) => `/api/verify/records/${ids.verification}`,
+    answers: everybody(200),
+  },
   "GET /issuer/[file]": open("/issuer/root.pem"),
   "GET /api/employers/[employer]/cases/[id]/files/[name]": firmRoute(
     (ids) => `cases/${ids.openCase}/files/${ids.file}`,
@@ -146,9 +150,10 @@ export const WRITING_ROUTES: Readonly<Record<string, Crossed & { address?: (ids:
     address: (ids) => `/api/employers/${ids.employer}/modules/${ids.module}/draft`,
     ...crossedIn("commands/saveDraft", "saveDraft"),
   },
-  // Open to anyone: the one is believed by its signature only, the other stores nothing.
+  // Open to anyone: believed by its signature only; stores nothing; stores nothing of who asked.
   "POST /api/stripe/webhook": crossedIn("payments/webhook-signature", "POST"),
   "POST /api/verify/file": crossedIn("routes/verifyFile", "POST"),
+  "POST /api/verify/records": crossedIn("routes/verificationRecords", "POST"),
 };
 
 export const ACTIONS: Readonly<Record<string, Crossed>> = {
@@ -183,5 +188,6 @@ export const JOB_ROWS: Readonly<Record<string, Crossed>> = {
   "close-case": crossedIn("worker/closeCase", "closeCase"),
   "mark-case": crossedIn("worker/markCase", "markCase"),
   "issue-certificate": crossedIn("worker/issueCertificate", "issueCertificate"),
+  "sign-verification": crossedIn("worker/signVerification", "signVerification"),
   "send-mail": crossedIn("worker/sendMail", "sendMail"),
 };

@@ -25,7 +25,8 @@ export type Ids = Readonly<
     | "sitting"
     | "undecided"
     | "record"
-    | "certificate",
+    | "certificate"
+    | "verification",
     string
   >
 >;

@@ -55,10 +55,21 @@ export async function makeWorld() {
     undecided: undecided.id,
     record: marked.caseId,
     certificate: certificate.number,
+    verification: await signedVerification(certificate.id),
   };
   return { firm, ids, cookies: await cookiesOf(people) };
 }
 export type World = Awaited<ReturnType<typeof makeWorld>>;
+
+/** Answered to anybody; what a real one holds is tried with the task that signs it. */
+async function signedVerification(certificateId: string): Promise<string> {
+  const [{ id }] = (await ownerRows<{ id: string }>(SIGNED_VERIFICATION, [certificateId])) as [{ id: string }];
+  return id;
+}
+
+const SIGNED_VERIFICATION = `
+  INSERT INTO verifications (certificate_id, asked_at, pdf, signed_at) VALUES ($1, now(), '%PDF-1.7', now())
+  RETURNING id`;
 
 /** A file of the case, put where the running product looks for it. */
 async function storedFile(caseId: string): Promise<string> {

@@ -43,6 +43,8 @@ const TABLES: Record<string, { web: Rights; worker: Rights }> = {
   decisions: EVERY,
   certificates: { web: rights("read", "id"), worker: rights("read add") },
   standings: EVERY,
+  // The web process may ask for one (columns of its own), and never put a file in.
+  verifications: { web: rights("read"), worker: rights("read remove", "pdf", "signed_at") },
   mails: { ...EVERY, worker: rights("read add", "body", "sent_at") },
   trail_entries: { web: rights("read"), worker: rights("read") },
   trail_unsealed: { web: rights("read"), worker: rights("read remove") },

@@ -44,6 +44,8 @@ const DATA_AND_LOGIC: Row[] = [
       "lib/mdx",
       // The one read that a decision needs inside its own transaction.
       "lib/queries/separationFacts",
+      // A record of a verification says what the public page says, read in the same way.
+      "lib/queries/getPublicVerification",
     ],
     packages: ["server-only", "sequelize", "node:crypto"],
   },
@@ -126,7 +128,7 @@ const SCREENS_AND_ENTRANCES: Row[] = [
       // How large a file may be is said once, where it is read.
       ...["lib/certificates/verifyPdf", "lib/env", "lib/log"],
     ],
-    packages: ["zod", "next"],
+    packages: ["zod", "next", "node:timers/promises"],
   },
   {
     files: "app/*/_components/",

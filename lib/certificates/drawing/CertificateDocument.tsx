@@ -17,15 +17,19 @@ export type CertificateFace = { record: CertificateRecord; fingerprint: string; 
 
 /** The certificate as one A4 page; set too loosely it flows on to a second, which the caller looks for. */
 export function CertificateDocument({ face, density }: { face: CertificateFace; density: Density }) {
-  const { record, fingerprint } = face;
+  const { record, fingerprint, verifyAddress } = face;
   const parts = [
-    <Head key="head" record={record} />,
+    <Head key="head" title="Certificate of competence" number={record.number} demonstration={record.demonstration} />,
     <Holder key="holder" name={record.holder.name} density={density} />,
     <Competence key="competence" record={record} density={density} />,
     <Facts key="facts" record={record} density={density} />,
     <Particulars key="particulars" record={record} density={density} />,
     <Quantities key="quantities" quantities={record.quantities} density={density} />,
-    <StripAndCode key="strip" face={face} density={density} />,
+    <StripAndCode
+      key="strip"
+      {...{ number: record.number, fingerprint, verifyAddress, density }}
+      words="Hold this page beside the screen: name, module, number and every chip must agree. A forger can copy chips. Only the register tells whether the certificate holds today: read it on the day you rely on it."
+    />,
     <Cautions key="cautions" cautions={record.cautions} density={density} />,
     <SignaturePanel key="panel" face={face} density={density} />,
   ];

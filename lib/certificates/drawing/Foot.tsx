@@ -12,7 +12,7 @@ export function Foot({ fingerprint }: { fingerprint: string }) {
   const band = chipBand(fingerprint);
   const u = PAGE.width / band.width;
   return (
-    <View style={{ position: "absolute", left: PAGE.side, bottom: PAGE.foot, width: PAGE.width }}>
+    <View fixed style={{ position: "absolute", left: PAGE.side, bottom: PAGE.foot, width: PAGE.width }}>
       <Svg width={PAGE.width} height={band.height * u} viewBox={`0 0 ${PAGE.width} ${band.height * u}`}>
         {band.chips.map((chip) => (
           <Rect
@@ -29,7 +29,7 @@ export function Foot({ fingerprint }: { fingerprint: string }) {
       <View style={{ flexDirection: "row", justifyContent: "space-between", marginTop: 3 }}>
         <Text style={code}>SHA-256</Text>
         <Text style={code}>{(fingerprint.toUpperCase().match(/.{8}/g) ?? []).join(" ")}</Text>
-        <Text style={{ fontSize: 7 }}>Page 1 of 1</Text>
+        <Text style={{ fontSize: 7 }} render={({ pageNumber, totalPages }) => `Page ${pageNumber} of ${totalPages}`} />
       </View>
     </View>
   );

@@ -1,13 +1,14 @@
 import { Path, Svg, Text, View } from "@react-pdf/renderer";
 import { CODE_FACE, PLATE_FACE } from "../pdfFonts";
-import type { CertificateRecord } from "../record";
 import { INK } from "./page";
 
 const MARK_PT = 26;
 const NAME_PT = 19;
 
+type HeadProps = { title: string; number: string; demonstration: boolean };
+
 /** Mark and name at the left, what the paper is and its number at the right, and whether it is a demonstration. */
-export function Head({ record }: { record: CertificateRecord }) {
+export function Head({ title, number, demonstration }: HeadProps) {
   return (
     <View>
       <View style={{ flexDirection: "row", justifyContent: "space-between" }}>
@@ -27,11 +28,11 @@ export function Head({ record }: { record: CertificateRecord }) {
           </Text>
         </View>
         <View style={{ alignItems: "flex-end" }}>
-          <Text style={{ fontSize: 10 }}>Certificate of competence</Text>
-          <Text style={{ fontFamily: CODE_FACE, fontWeight: 600, fontSize: 11, marginTop: 3 }}>{record.number}</Text>
+          <Text style={{ fontSize: 10 }}>{title}</Text>
+          <Text style={{ fontFamily: CODE_FACE, fontWeight: 600, fontSize: 11, marginTop: 3 }}>{number}</Text>
         </View>
       </View>
-      {record.demonstration && <Demonstration />}
+      {demonstration && <Demonstration />}
     </View>
   );
 }

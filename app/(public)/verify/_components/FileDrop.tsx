@@ -14,7 +14,8 @@ const TOO_MANY: FileAnswer = {
   number: null,
 };
 
-type State = { at: "idle" } | { at: "reading" } | { at: "answered"; answer: FileAnswer } | { at: "not-sent" };
+type State =
+  { at: "idle" } | { at: "reading" } | { at: "answered"; answer: FileAnswer; file: File } | { at: "not-sent" };
 
 /** Drop the PDF itself: its signature is verified and the register is read for the number it carries. */
 export function FileDrop() {
@@ -26,14 +27,10 @@ export function FileDrop() {
     if (!file) return;
     setState({ at: "reading" });
     try {
-      const response = await fetch("/api/verify/file", {
-        method: "POST",
-        body: file,
-        headers: { "content-type": "application/pdf" },
-      });
-      if (response.status === 429) return setState({ at: "answered", answer: TOO_MANY });
+      const response = await send("/api/verify/file", file);
+      if (response.status === 429) return setState({ at: "answered", answer: TOO_MANY, file });
       if (!response.ok) throw new Error(response.statusText);
-      setState({ at: "answered", answer: fileAnswer((await response.json()) as PublicFileVerdict) });
+      setState({ at: "answered", answer: fileAnswer((await response.json()) as PublicFileVerdict), file });
     } catch {
       setState({ at: "not-sent" });
     }
@@ -78,12 +75,15 @@ export function FileDrop() {
           The file could not be sent or the register not be reached, so nothing was verified. Try again in a minute.
         </Notice>
       )}
-      {state.at === "answered" && <Answer answer={state.answer} />}
+      {state.at === "answered" && <Answer answer={state.answer} file={state.file} />}
     </div>
   );
 }
 
-function Answer({ answer }: { answer: FileAnswer }) {
+const send = (address: string, file: File) =>
+  fetch(address, { method: "POST", body: file, headers: { "content-type": "application/pdf" } });
+
+function Answer({ answer, file }: { answer: FileAnswer; file: File }) {
   return (
     <Notice
       tone={answer.tone}
@@ -91,13 +91,40 @@ function Answer({ answer }: { answer: FileAnswer }) {
       live
       action={
         answer.number && (
-          <LinkKey href={`/verify/${answer.number}`} size="small">
-            Open the register&rsquo;s entry
-          </LinkKey>
+          <span className="flex flex-wrap gap-3">
+            <LinkKey href={`/verify/${answer.number}`} size="small">
+              Open the register&rsquo;s entry
+            </LinkKey>
+            <SaveFileRecord file={file} />
+          </span>
         )
       }
     >
       {answer.detail}
     </Notice>
+  );
+}
+
+/** The file is sent once more, so that the record says what the server itself found. */
+function SaveFileRecord({ file }: { file: File }) {
+  const [state, setState] = useState<"idle" | "signing" | "failed">("idle");
+  const save = async () => {
+    setState("signing");
+    try {
+      const response = await send("/api/verify/records", file);
+      if (!response.ok) throw new Error(response.statusText);
+      window.location.assign(((await response.json()) as { address: string }).address);
+      setState("idle");
+    } catch {
+      setState("failed");
+    }
+  };
+  return (
+    <>
+      <Key size="small" onClick={() => void save()} busy={state === "signing"}>
+        Save a record of this verification
+      </Key>
+      {state === "failed" && <span role="status">Not saved. Try again in a minute.</span>}
+    </>
   );
 }

@@ -9,8 +9,10 @@ import { LinkKey } from "@/components/ui/LinkKey";
 import { Notice } from "@/components/ui/Notice";
 import { StatusHead, type Standing } from "@/components/ui/StatusHead";
 import type { PublicVerification } from "@/lib/queries/getPublicVerification";
+import type { PublicVerificationRecord } from "@/lib/queries/getPublicVerificationRecord";
 import { MeasuredQuantities } from "./MeasuredQuantities";
 import { RegisterSentence } from "./RegisterSentence";
+import { SaveRecord } from "./SaveRecord";
 
 const HEADS: Record<PublicVerification["standing"], Standing> = {
   Valid: "valid",
@@ -26,8 +28,10 @@ const SUPERVISION = {
   "on-site": "Supervised on site",
 };
 
+type RegisterAnswerProps = { entry: PublicVerification; record: PublicVerificationRecord | null };
+
 /** The register's entry as the public may see it: answer first, evidence beside it. */
-export function RegisterAnswer({ entry }: { entry: PublicVerification }) {
+export function RegisterAnswer({ entry, record }: RegisterAnswerProps) {
   const broken = ["Suspended", "Withdrawn", "Superseded"].includes(entry.standing) ? entry.standingSince : null;
   return (
     <div className="desk:grid desk:min-h-full desk:grid-cols-[56fr_44fr]">
@@ -84,6 +88,9 @@ export function RegisterAnswer({ entry }: { entry: PublicVerification }) {
             Verify the PDF file
           </LinkKey>
           <LinkKey href="/verify">Verify another number</LinkKey>
+        </div>
+        <div className="mt-4">
+          <SaveRecord number={entry.number} record={record} />
         </div>
         <p className="mt-4 text-label font-normal text-ink-2">
           Only the file can show that its signature is genuine.{" "}
