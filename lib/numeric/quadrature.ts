@@ -16,14 +16,29 @@ const WEIGHTS = [
  * @param panels whole number from 1
  */
 export function integrate(of: (x: number) => number, from: number, to: number, panels = 1): number {
+  const { places, weights } = quadraturePoints(from, to, panels);
+  let sum = 0;
+  for (let n = 0; n < places.length; n++) sum += weights[n] * of(places[n]);
+  return sum;
+}
+
+/** Places and weights of that rule, for functions that are needed at the same places again and again. */
+export function quadraturePoints(
+  from: number,
+  to: number,
+  panels: number,
+): { places: Float64Array; weights: Float64Array } {
   if (!(Number.isInteger(panels) && panels >= 1))
     throw new RangeError(`integrate: whole number of panels from 1, got ${panels}`);
   const half = (to - from) / (2 * panels);
-  let sum = 0;
-  for (let panel = 0; panel < panels; panel++) {
-    const middle = from + (2 * panel + 1) * half;
-    for (let n = 0; n < NODES.length; n++)
-      sum += WEIGHTS[n] * (of(middle - half * NODES[n]) + of(middle + half * NODES[n]));
+  const perPanel = 2 * NODES.length;
+  const places = new Float64Array(panels * perPanel);
+  const weights = new Float64Array(panels * perPanel);
+  for (let n = 0; n < places.length; n++) {
+    const middle = from + (2 * Math.floor(n / perPanel) + 1) * half;
+    const pair = (n % perPanel) >> 1;
+    places[n] = middle + (n % 2 === 0 ? -half : half) * NODES[pair];
+    weights[n] = half * WEIGHTS[pair];
   }
-  return sum * half;
+  return { places, weights };
 }
