@@ -5,6 +5,7 @@ export * from "./CaseAnswers";
 export * from "./CaseSecret";
 export * from "./CaseView";
 export * from "./Certificate";
+export * from "./Closing";
 export * from "./Decision";
 export * from "./Draft";
 export * from "./Employer";

@@ -10,10 +10,15 @@ import { writeMail } from "./writeMail";
 
 type Decider = { personId: string; email: string };
 
-/** A sitting has run its course: a mail to every decider of the employer whom nothing bars from deciding on it. */
+const RUN = "It has run its course: every check has its marking record.";
+
+/**
+ * A sitting is there to be decided: a mail to every decider of the employer whom nothing bars from deciding on it.
+ * @param why a sentence for the mail; that it has run its course, when left out
+ */
 export async function tellDeciders(
   { sitting, release, employer }: Pick<FoundCase, "sitting" | "release" | "employer">,
-  { publicOrigin, now }: { publicOrigin: string; now: Date },
+  { publicOrigin, now, why = RUN }: { publicOrigin: string; now: Date; why?: string },
   transaction: Transaction,
 ): Promise<void> {
   const technician = await Person.findByPk(sitting.technicianId, { transaction, rejectOnEmpty: true });
@@ -21,7 +26,7 @@ export async function tellDeciders(
   for (const { personId, email } of await select<Decider>(DECIDERS, { employerId: employer.id }, transaction)) {
     if (barsToDeciding(await separationFacts({ personId }, sitting, today, transaction)).length) continue;
     const subject = `For decision: ${technician.name}, ${release.title}`;
-    const body = `Sitting S-${sitting.number} of ${technician.name} on "${release.title}", release ${release.number}, has run its course: every check has its marking record.\nYou sign in again to sign.\n\n${publicOrigin}/${employer.slug}/queue/${sitting.id}\n`;
+    const body = `Sitting S-${sitting.number} of ${technician.name} on "${release.title}", release ${release.number}, is there to be decided. ${why}\nYou sign in again to sign.\n\n${publicOrigin}/${employer.slug}/queue/${sitting.id}\n`;
     await writeMail({ to: email, subject, body }, transaction);
   }
 }

@@ -15,6 +15,7 @@ export const RECORD_TABLES = [
   "certificates",
   "standings",
   "trainings",
+  "closings",
 ] as const;
 
 /** Tables whose rows may change, with an entry for every change. */

@@ -1,6 +1,7 @@
 import "server-only";
 import { availableParallelism } from "node:os";
 import PgBoss from "pg-boss";
+import { closeSittings } from "@/lib/commands/closeSittings";
 import { reportFaults } from "@/lib/commands/reportFaults";
 import { sealTrail, SEAL_BATCH } from "@/lib/commands/sealTrail";
 import { db } from "@/lib/db";
@@ -19,6 +20,8 @@ import { workerTasks } from "./tasks";
 const ENGINE_THREADS = Math.min(2, availableParallelism());
 const SEAL_EVERY_MS = 2000;
 const FAULTS_EVERY_MS = 5000;
+/** Last days pass at midnight of many time zones, and a decider need not hear of it to the minute. */
+const CLOSE_EVERY_MS = 60_000;
 /** Less than the ten seconds after which whoever stops a process kills it (common practice, no source). */
 const GRACE_MS = 6000;
 
@@ -45,6 +48,7 @@ export async function startWorker(env: ReturnType<typeof workerEnv>): Promise<{ 
   const repeated = [
     repeat("seal the trail", SEAL_EVERY_MS, () => sealAll(issuer.issuerKey.keyPem)),
     repeat("report faults", FAULTS_EVERY_MS, reportFaults),
+    repeat("close sittings", CLOSE_EVERY_MS, () => closeSittings(env.PUBLIC_ORIGIN)),
   ];
   log.info({ threads: ENGINE_THREADS }, "worker ready");
   return {

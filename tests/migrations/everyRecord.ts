@@ -14,6 +14,7 @@ export const RECORDS = [
   "case_views",
   "cases",
   "certificates",
+  "closings",
   "decisions",
   "hand_ins",
   "marking_records",
@@ -45,6 +46,7 @@ export async function makeEveryRecord(): Promise<void> {
     ...{ employerId: firm.employer.id, trainerId: firm.lead.personId, technicianId: askedBy, endedOn: "2026-06-01" },
     recordedBy: firm.lead.personId,
   });
+  await insert("closings", { sittingId: sitting.id, unfinished: true, closedAt: NOW });
   const [entry] = await ownerRows<{ id: string }>("SELECT min(id)::text AS id FROM trail_entries");
   await insert("trail_links", { sequence: 1, entryId: entry!.id, entrySha256: HASH, linkSha256: HASH });
   await insert("trail_heads", { sequence: 1, linkSha256: HASH, signedAt: NOW, signature: "none" });

@@ -36,6 +36,7 @@ const TABLES: Record<string, { web: Rights; worker: Rights }> = {
   hand_ins: EVERY,
   marking_records: { ...EVERY, web: rights("read") },
   questions: EVERY,
+  closings: { ...EVERY, web: rights("read") },
   progress: {
     web: rights("read"),
     worker: rights("read add remove", "done", "fault", "job", "step", "subject_id", "total", "updated_at"),
