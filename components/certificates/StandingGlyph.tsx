@@ -13,7 +13,7 @@ const GLYPHS: Record<string, GlyphName> = {
 export function StandingGlyph({ standing, daysLeft }: { standing: string; daysLeft?: number }) {
   const lapsing = standing === "Valid" && daysLeft !== undefined && daysLeft <= 90;
   return (
-    <span className="inline-flex items-center gap-2.5 whitespace-nowrap font-semibold">
+    <span className="flex items-center gap-2.5 whitespace-nowrap font-semibold">
       <Glyph name={lapsing ? "expiring" : (GLYPHS[standing] ?? "none")} />
       {standing}
       {lapsing && <span className="font-normal">, {daysLeft === 1 ? "last day" : `${daysLeft} days left`}</span>}

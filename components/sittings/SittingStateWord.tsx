@@ -15,7 +15,7 @@ const WORDS: Record<SittingState, { glyph: GlyphName; word: string }> = {
 export function SittingStateWord({ state }: { state: SittingState }) {
   const { glyph, word } = WORDS[state];
   return (
-    <span className="inline-flex items-center gap-2.5 whitespace-nowrap">
+    <span className="flex items-center gap-2.5 whitespace-nowrap">
       <Glyph name={glyph} />
       {word}
     </span>

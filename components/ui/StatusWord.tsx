@@ -4,7 +4,7 @@ import { Glyph, type GlyphName } from "./Glyph";
 /** Glyph and word, as a status stands in a row of a table. */
 export function StatusWord({ glyph, strong, children }: { glyph: GlyphName; strong?: boolean; children: ReactNode }) {
   return (
-    <span className={strong ? "inline-flex items-center gap-2 font-semibold" : "inline-flex items-center gap-2"}>
+    <span className={strong ? "flex items-center gap-2 font-semibold" : "inline-flex items-center gap-2"}>
       <Glyph name={glyph} />
       <span>{children}</span>
     </span>

@@ -1,6 +1,7 @@
 import "server-only";
 import { select } from "@/lib/db";
 import type { Actor } from "@/lib/policies/actor";
+import { completions, type Completions } from "@/lib/mdx/completions";
 import { authorize } from "@/lib/policies/authorize";
 import { can } from "@/lib/policies/can";
 import { iso, isId } from "./findOwn";
@@ -25,7 +26,12 @@ export type ReleaseLine = {
   releasedAt: string;
   isDraft: boolean;
 };
-export type ModuleView = Omit<Row, "savedAt"> & { savedAt: string; releases: ReleaseLine[] };
+export type ModuleView = Omit<Row, "savedAt"> & {
+  savedAt: string;
+  releases: ReleaseLine[];
+  /** What the module language has, for whoever writes. */
+  completions: Completions;
+};
 
 /** A module's draft and its releases, newest first; null when the employer has no such module. */
 export async function getModule(actor: Actor, id: string): Promise<ModuleView | null> {
@@ -37,6 +43,7 @@ export async function getModule(actor: Actor, id: string): Promise<ModuleView | 
   return {
     ...row,
     savedAt: iso(row.savedAt),
+    completions: completions(),
     releases: releases.map((release) => ({ ...release, releasedAt: iso(release.releasedAt) })),
   };
 }

@@ -29,6 +29,8 @@ function halvesOf(modulation: Modulation): number {
   switch (modulation.kind) {
     case "BPSK-R":
       return 1;
+    case "BPSK-R in turns":
+      throw new RangeError("searchSignalOf: a code whose chips take turns with another's is not searched yet");
     case "BOC":
     case "TMBOC":
       return (2 * modulation.m) / modulation.n;

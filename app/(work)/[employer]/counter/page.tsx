@@ -89,7 +89,7 @@ function Orders({ employer, orders }: { employer: string; orders: OrderLine[] })
               <RowHead>{formatInstant(order.orderedAt)}</RowHead>
               <Td label="By">{order.orderedBy}</Td>
               <Td label="State">
-                <span className="inline-flex items-center gap-2">
+                <span className="flex items-center gap-2">
                   <Glyph name={order.paidAt ? "within" : order.closedAt ? "none" : "awaiting"} />
                   {order.paidAt
                     ? `Paid ${formatDay(order.paidAt)}`

@@ -54,7 +54,7 @@ export default async function ModulesPage({ params }: { params: Promise<{ employ
                       )}
                     </Td>
                     <Td label="Draft">
-                      <span className="inline-flex items-center gap-2 whitespace-nowrap">
+                      <span className="flex items-center gap-2 whitespace-nowrap">
                         <Glyph name={row.changed ? "awaiting" : "done"} />
                         {row.changed ? "changed" : "as released"}
                       </span>

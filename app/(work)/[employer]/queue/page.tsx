@@ -50,7 +50,7 @@ export default async function QueuePage({ params }: { params: Promise<{ employer
                   </Td>
                   <Td label="Last marked">{row.readyAt ? formatInstant(row.readyAt) : "–"}</Td>
                   <Td label="State">
-                    <span className="inline-flex items-center gap-2">
+                    <span className="flex items-center gap-2">
                       <Glyph name="awaiting" /> For decision
                       {row.questions > 0 && (row.questions === 1 ? ", 1 question" : `, ${row.questions} questions`)}
                     </span>

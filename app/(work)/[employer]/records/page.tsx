@@ -46,7 +46,7 @@ export default async function RecordsPage({ params }: { params: Promise<{ employ
                     {row.withinCount} of {row.quantityCount}
                   </Td>
                   <Td label="Result">
-                    <span className="inline-flex items-center gap-2">
+                    <span className="flex items-center gap-2">
                       <Glyph name={row.met ? "within" : "outside"} />
                       {row.met ? "Met" : "Not met"}
                       {row.questions > 0 && (row.questions === 1 ? ", 1 question" : `, ${row.questions} questions`)}

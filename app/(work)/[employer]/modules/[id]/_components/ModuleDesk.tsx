@@ -114,6 +114,10 @@ export function ModuleDesk({ employer, draft, reading: first, release }: ModuleD
             <span className="flex items-center gap-2 text-ink-2">
               <KeyCap>Alt</KeyCap>
               <KeyCap>N</KeyCap> next problem
+              <span className="hidden items-center gap-2 pl-3 tablet:flex">
+                <KeyCap>Ctrl</KeyCap>
+                <KeyCap>Space</KeyCap> names and units
+              </span>
             </span>
           </p>
           <div className="relative min-h-[60dvh] flex-1 overflow-auto desk:min-h-0">
@@ -121,6 +125,7 @@ export function ModuleDesk({ employer, draft, reading: first, release }: ModuleD
               ref={editor}
               source={source}
               problems={reading.problems}
+              completions={draft.completions}
               onChange={change}
               onCursor={(line, column) => setCursor({ line, column })}
             />

@@ -1,34 +1,39 @@
 "use client";
-import { markdown } from "@codemirror/lang-markdown";
+import type { CompletionContext, CompletionResult } from "@codemirror/autocomplete";
 import { linter, type Diagnostic } from "@codemirror/lint";
 import { EditorView } from "@codemirror/view";
 import CodeMirror, { type ReactCodeMirrorRef } from "@uiw/react-codemirror";
 import { forwardRef, useMemo } from "react";
+import type { Completions } from "@/lib/mdx/completions";
 import type { Problem } from "@/lib/mdx/problem";
+import { moduleLanguage } from "./moduleLanguage";
+import { offersAt } from "./offersAt";
 import { sourceLook } from "./sourceLook";
 
 type SourceEditorProps = {
   source: string;
   problems: readonly Problem[];
+  completions: Completions;
   onChange: (source: string) => void;
   onCursor: (line: number, column: number) => void;
 };
 
 /** The module's source, with its problems waved under where they are. */
 export const SourceEditor = forwardRef<ReactCodeMirrorRef, SourceEditorProps>(function SourceEditor(
-  { source, problems, onChange, onCursor },
+  { source, problems, completions, onChange, onCursor },
   ref,
 ) {
   const extensions = useMemo(
     () => [
-      markdown(),
+      moduleLanguage,
+      moduleLanguage.language.data.of({ autocomplete: (at: CompletionContext) => offered(completions, at) }),
       sourceLook,
       EditorView.lineWrapping,
       EditorView.cspNonce.of(documentNonce()),
       EditorView.contentAttributes.of({ "aria-label": "Source of the module", spellcheck: "false" }),
       linter((view) => problems.map((problem) => diagnostic(view, problem)), { delay: 0 }),
     ],
-    [problems],
+    [problems, completions],
   );
   return (
     <CodeMirror
@@ -36,7 +41,7 @@ export const SourceEditor = forwardRef<ReactCodeMirrorRef, SourceEditorProps>(fu
       value={source}
       height="100%"
       theme="none"
-      basicSetup={{ foldGutter: false, highlightActiveLine: true, autocompletion: false, searchKeymap: true }}
+      basicSetup={{ foldGutter: false, highlightActiveLine: true, autocompletion: true, searchKeymap: true }}
       extensions={extensions}
       onChange={onChange}
       onUpdate={(update) => {
@@ -57,6 +62,16 @@ export const SourceEditor = forwardRef<ReactCodeMirrorRef, SourceEditorProps>(fu
 function documentNonce(): string {
   if (typeof document === "undefined") return "";
   return [...document.scripts].find((script) => script.nonce)?.nonce ?? "";
+}
+
+function offered(completions: Completions, at: CompletionContext): CompletionResult | null {
+  const offers = offersAt(completions, at.state.sliceDoc(0, at.pos));
+  if (!offers || (!at.explicit && offers.from === at.pos)) return null;
+  return {
+    from: offers.from,
+    options: offers.rows.map(({ label, detail, insert }) => ({ label, detail, apply: insert })),
+    filter: true,
+  };
 }
 
 function diagnostic(view: EditorView, problem: Problem): Diagnostic {

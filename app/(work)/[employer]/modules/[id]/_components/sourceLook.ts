@@ -4,6 +4,7 @@ import { EditorView } from "@codemirror/view";
 import { tags } from "@lezer/highlight";
 
 const style = HighlightStyle.define([
+  { tag: tags.meta, color: "var(--ink-2)" },
   { tag: tags.heading, fontWeight: "700" },
   { tag: tags.strong, fontWeight: "700" },
   { tag: tags.emphasis, fontStyle: "italic" },
@@ -34,6 +35,13 @@ export const sourceLook = [
       backgroundColor: "var(--minus-wash)",
     },
     ".cm-lintRange-warning": { backgroundImage: "none", textDecoration: "underline wavy var(--caution-deep)" },
+    ".cm-tooltip-autocomplete ul": { fontFamily: "var(--f-code)", maxHeight: "16rem" },
+    ".cm-tooltip-autocomplete ul li": { padding: "6px 12px !important" },
+    ".cm-tooltip-autocomplete ul li[aria-selected]": {
+      backgroundColor: "var(--plus-wash) !important",
+      color: "var(--ink) !important",
+    },
+    ".cm-completionDetail": { fontFamily: "var(--f-text)", fontStyle: "normal", color: "var(--ink-2)" },
     ".cm-tooltip": { backgroundColor: "var(--sheet)", border: "2px solid var(--rule-strong)", color: "var(--ink)" },
   }),
 ];

@@ -130,7 +130,7 @@ function HandedIn({ row }: { row: MarkedRow }) {
 
 function Result({ row }: { row: MarkedRow }) {
   return (
-    <span className="inline-flex items-center gap-2.5 whitespace-nowrap">
+    <span className="flex items-center gap-2.5 whitespace-nowrap">
       <Glyph name={row.within ? "within" : "outside"} />
       {row.within ? "Within" : <strong className="font-bold">Outside</strong>}
     </span>
