@@ -71,8 +71,10 @@ const greek = localFont({
 
 // The Greek file lacks the micro sign; of the Latin one nothing else is wanted.
 const micro = localFont({
-  src: "../node_modules/@fontsource/fira-sans/files/fira-sans-latin-500-normal.woff2",
-  weight: "400 600",
+  src: [
+    { path: "../node_modules/@fontsource/fira-sans/files/fira-sans-latin-400-normal.woff2", weight: "400" },
+    { path: "../node_modules/@fontsource/fira-sans/files/fira-sans-latin-600-normal.woff2", weight: "600" },
+  ],
   declarations: [{ prop: "unicode-range", value: "U+00B5" }],
   variable: "--font-micro",
   display: "swap",
