@@ -134,5 +134,7 @@ export interface CheckKind<P = unknown, T = unknown> {
 
 export interface WrongMethod<P = unknown, T = unknown> {
   readonly label: string;
+  /** Quantities that it gets outside in every case; others it may get outside as well. */
+  readonly misses: readonly string[];
   solve(built: BuiltCase<T>, plan: CheckPlan<P>): Answers;
 }

@@ -1,4 +1,5 @@
 import type { CheckKind, CheckPlan } from "@/lib/checks/kind";
+import { leastNeeds, type LeastNeeds } from "@/lib/checks/leastNeeds";
 import { LIMITS } from "@/lib/mdx/limits";
 import { planParameters } from "@/lib/mdx/planParameters";
 import { planQuantities } from "@/lib/mdx/planQuantities";
@@ -48,6 +49,7 @@ function planCheck(check: WrittenCheck, kinds: readonly CheckKind[]): PlanReadin
   const parameters = planParameters(
     kind,
     check.attributes.filter(({ name }) => !own.has(name)),
+    check.range,
   );
   const quantities = planQuantities(kind, check);
   const problems = [...parameters.problems, ...quantities.problems];
@@ -56,6 +58,11 @@ function planCheck(check: WrittenCheck, kinds: readonly CheckKind[]): PlanReadin
   if (typeof needs === "number" && needs > count) {
     const message = `This check has ${count} ${count === 1 ? "quantity" : "quantities"}, so needs={${needs}} could never be met. Write ${count} or fewer.`;
     problems.push(problemAt(rangeOfAttribute(check, "needs"), "check", message));
+  }
+  const faulty = quantities.problems.some(({ severity }) => severity === "error");
+  const least = faulty ? null : leastNeeds(kind, quantities.quantities);
+  if (typeof needs === "number" && least && needs < least.needs) {
+    problems.push(problemAt(rangeOfAttribute(check, "needs"), "check", tooFew(needs, least)));
   }
   const id = plainAttribute(check, "Check", "id");
   const minutes = plainAttribute(check, "Check", "minutes");
@@ -71,6 +78,11 @@ function planCheck(check: WrittenCheck, kinds: readonly CheckKind[]): PlanReadin
     quantities: quantities.quantities,
   };
   return { plans: [plan], problems };
+}
+
+function tooFew(needs: number, { needs: least, method, misses }: LeastNeeds): string {
+  const names = misses.map((name) => `"${name}"`).join(" or ");
+  return `With needs={${needs}} this check would be met by a known wrong method: ${method}. Write ${least} or more, or make ${names} critical.`;
 }
 
 function kindFault(id: string, kinds: readonly CheckKind[]): string {

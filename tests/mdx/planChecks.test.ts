@@ -1,4 +1,5 @@
-import { expect, test } from "vitest";
+import { describe, expect, test } from "vitest";
+import { KINDS } from "@/lib/checks/registry";
 import { parseModule } from "@/lib/mdx/parseModule";
 import { planChecks } from "@/lib/mdx/planChecks";
 import { SAMPLE_KIND } from "./kinds";
@@ -113,6 +114,42 @@ test("more needed than there are could never be met", () => {
   expect(faults(check(" needs={5}"))).toEqual([
     [1, 29, "check", "This check has 4 quantities, so needs={5} could never be met. Write 4 or fewer."],
   ]);
+});
+
+describe("a check of a real kind", () => {
+  const written = (kind: string, attributes: string, inside = "Text.") =>
+    planChecks(parseModule(`<Check id="a" kind="${kind}"${attributes}>\n${inside}\n</Check>`).checks, KINDS).problems;
+  const METHOD = "Sky plot and report believed, capture not searched";
+
+  test("is refused when it needs so few that a known wrong method meets it", () => {
+    const message = `With needs={4} this check would be met by a known wrong method: ${METHOD}. Write 6 or more, or make "falseDoppler" critical.`;
+    expect(written("false-lock", " needs={4}")).toMatchObject([{ line: 1, column: 33, rule: "check", message }]);
+    expect(written("false-lock", " needs={6}")).toEqual([]);
+    expect(written("false-lock", "")).toEqual([]);
+  });
+
+  test("may need fewer where what the wrong methods miss is critical", () => {
+    const all = ["verdict", "parent", "falseDoppler", "falseCn0", "test", "remedy"];
+    const tags = (critical: string[]) =>
+      all.map((of) => `<Quantity of="${of}"${critical.includes(of) ? " critical" : ""} />`).join("\n");
+    const attributes = " needs={4}";
+    expect(written("false-lock", attributes, tags(["verdict", "falseDoppler", "test"]))).toEqual([]);
+    const [fault] = written("false-lock", attributes, tags(["verdict", "falseDoppler"]));
+    expect(fault?.message).toContain('Called multipath. Write 5 or more, or make "test" or "remedy" critical.');
+  });
+
+  // Satellites must be found from 36 dB-Hz on unless the lead says otherwise; the range has to reach 1 dB above.
+  test.each([
+    [' cn0="32 to 36.5 dB-Hz"', 1],
+    [' foundFrom="42 dB-Hz" cn0="34 to 42 dB-Hz"', 33],
+  ])("is refused with parameters that no case can be drawn from:%s", (attributes, column) => {
+    const [fault, ...more] = written("satellites", attributes);
+    expect(more).toEqual([]);
+    expect(fault).toMatchObject({ line: 1, rule: "attribute-value", severity: "error" });
+    expect(fault?.message).toBe("C/N0 must reach at least 1 dB above the level from which satellites must be found.");
+    // At the attribute that is named, or at the tag where it is not written.
+    expect(fault?.column).toBe(column);
+  });
 });
 
 test.each([

@@ -11,6 +11,7 @@ type Wrong = WrongMethod<CorrelatorReadingParameters, CorrelatorReadingTruth>;
 export const wrongMethods: Readonly<Record<string, Wrong>> = {
   "mirrored-delay": {
     label: "Replica shifted the wrong way: 1 023 minus the delay",
+    misses: ["lag"],
     solve({ publicCase }) {
       const right = solve(publicCase);
       const lagChips = CA_LENGTH_CHIPS - Number(right["reading.lag"]);
@@ -19,6 +20,7 @@ export const wrongMethods: Readonly<Record<string, Wrong>> = {
   },
   "chip-of-300-m": {
     label: "300 m taken for a chip",
+    misses: ["lagLength"],
     solve({ publicCase }) {
       const right = solve(publicCase);
       return { ...right, "reading.lagLength": (300 * Number(right["reading.lag"])).toFixed(0) };
@@ -26,6 +28,7 @@ export const wrongMethods: Readonly<Record<string, Wrong>> = {
   },
   "side-lobe": {
     label: "A side lobe read as the peak",
+    misses: ["lag"],
     solve({ publicCase }) {
       const { trace, falseAlarmPerCell } = publicCase.data;
       const { secondLagChips } = readTrace(trace as number[], falseAlarmPerCell as number);
@@ -35,12 +38,14 @@ export const wrongMethods: Readonly<Record<string, Wrong>> = {
   },
   "always-detected": {
     label: "The highest cell taken for a signal, whatever the threshold",
+    misses: ["threshold"],
     solve({ publicCase }) {
       return { ...solve(publicCase), "reading.detection": "yes", "reading.threshold": "" };
     },
   },
   "three-sigma": {
     label: "Threshold three standard deviations above the mean",
+    misses: ["threshold"],
     solve({ publicCase }) {
       const { trace, falseAlarmPerCell } = publicCase.data;
       const { noiseMean, noiseRms } = readTrace(trace as number[], falseAlarmPerCell as number);

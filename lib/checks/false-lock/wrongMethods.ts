@@ -10,10 +10,12 @@ type Wrong = WrongMethod<FalseLockParameters, FalseLockTruth>;
 export const wrongMethods: Readonly<Record<string, Wrong>> = {
   "highest-peak-wins": {
     label: "What passes the threshold is there",
+    misses: ["verdict", "test"],
     solve: ({ truth }) => ({ ...answersFor(truth, () => "genuine"), "falseLock.test": "highest-peak" }),
   },
   "threshold-raised": {
     label: "Threshold raised until the false lock and every weak satellite are gone",
+    misses: ["verdict", "test", "remedy"],
     solve: ({ truth }) => ({
       ...answersFor(truth, ({ reportedCn0DbHz }) => ((reportedCn0DbHz ?? 0) >= 36 ? "genuine" : "absent")),
       "falseLock.test": "threshold",
@@ -22,6 +24,7 @@ export const wrongMethods: Readonly<Record<string, Wrong>> = {
   },
   multipath: {
     label: "Called multipath",
+    misses: ["test", "remedy"],
     solve: ({ truth }) => ({
       ...answersFor(truth, ({ verdict }) => verdict),
       "falseLock.test": "second-path",
@@ -30,6 +33,7 @@ export const wrongMethods: Readonly<Record<string, Wrong>> = {
   },
   "sky-plot-alone": {
     label: "Sky plot and report believed, capture not searched",
+    misses: ["falseDoppler"],
     solve: ({ truth }) => ({
       ...answersFor(truth, ({ verdict, reportedCn0DbHz }) => (reportedCn0DbHz === null ? "absent" : verdict)),
       "falseLock.doppler": "",

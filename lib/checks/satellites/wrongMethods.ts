@@ -11,11 +11,13 @@ type Wrong = WrongMethod<SatellitesParameters, SatellitesTruth>;
 export const wrongMethods: Readonly<Record<string, Wrong>> = {
   "swapped-iq": {
     label: "I and Q swapped: every Doppler negated",
+    misses: ["doppler"],
     solve: ({ truth }) =>
       answersFor(truth.scene.satellites.map((found) => ({ ...found, dopplerHz: -found.dopplerHz }))),
   },
   "mirrored-delay": {
     label: "Delay of the replica for code phase: 1 023 minus the phase",
+    misses: ["codePhase"],
     solve: ({ truth }) =>
       answersFor(
         truth.scene.satellites.map((found) => ({ ...found, codePhaseChips: CA_LENGTH_CHIPS - found.codePhaseChips })),
@@ -23,10 +25,12 @@ export const wrongMethods: Readonly<Record<string, Wrong>> = {
   },
   "nothing-found": {
     label: "Nothing found: samples read as unsigned",
+    misses: ["found", "invented", "codePhase", "doppler", "cn0"],
     solve: () => answersFor([]),
   },
   "ghost-listed": {
     label: "A false peak of the strongest satellite listed as one more",
+    misses: ["invented"],
     solve({ truth }) {
       const { satellites } = truth.scene;
       const strongest = satellites.reduce((a, b) => (b.cn0DbHz > a.cn0DbHz ? b : a));
@@ -42,6 +46,7 @@ export const wrongMethods: Readonly<Record<string, Wrong>> = {
   },
   "snr-for-cn0": {
     label: "Signal-to-noise ratio in 1 kHz for C/N0",
+    misses: ["cn0"],
     solve: ({ truth }) =>
       answersFor(truth.scene.satellites.map((found) => ({ ...found, cn0DbHz: found.cn0DbHz - 30 }))),
   },

@@ -11,10 +11,12 @@ type Wrong = WrongMethod<SearchPlanParameters, SearchPlanTruth>;
 export const wrongMethods: Readonly<Record<string, Wrong>> = {
   "bin-not-shrunk": {
     label: "Bins of 500 Hz kept while the coherent time grows to 10 ms",
+    misses: ["detection", "ownDetection"],
     solve: (built) => planWithoutLosses(built, { coherentMs: 10, dopplerBinHz: 500, codeStepChips: 0.5 }),
   },
   "per-cell": {
     label: "False-alarm probability of a search taken for that of a cell",
+    misses: ["falseAlarm", "ownFalseAlarm"],
     solve({ publicCase }) {
       const { falseAlarmPerSearch } = requirementOf(publicCase);
       const right = solve(publicCase);
@@ -24,10 +26,12 @@ export const wrongMethods: Readonly<Record<string, Wrong>> = {
   },
   "bit-edges-ignored": {
     label: "Coherent sums of 20 ms as if the bit edges were known",
+    misses: ["detection", "ownDetection"],
     solve: (built) => planWithoutLosses(built, { coherentMs: 20, dopplerBinHz: 33, codeStepChips: 0.5 }),
   },
   "no-mid-bin-loss": {
     label: "Losses between bins and code steps left out",
+    misses: ["detection", "ownDetection"],
     solve: (built) => planWithoutLosses(built, { coherentMs: 4, dopplerBinHz: 250, codeStepChips: 1 }),
   },
 };
