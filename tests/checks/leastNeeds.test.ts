@@ -27,10 +27,10 @@ const SEEDS = seeds(12);
 const quantitiesOf = (kind: CheckKind): CheckPlan["quantities"] =>
   kind.quantities.map(({ id, tolerance, critical }) => ({ of: id, tolerance, critical }));
 
-type Attempt = { needs: number | null; method: string; seed: string };
+type Tried = { needs: number | null; method: string; seed: string };
 
 /** What each kind's marking says of a wrong method, without making a capture. */
-const MARKED: Readonly<Record<string, (one: Attempt) => Marking>> = {
+const MARKED: Readonly<Record<string, (one: Tried) => Marking>> = {
   "correlator-reading": ({ needs, method, seed }) => {
     const plan = { ...planOf(correlatorReading), needs };
     const { truth } = drawCase(seed, plan.parameters);
