@@ -7,6 +7,7 @@ import { UsageError } from "./engine/UsageError";
 // Loaded when asked for, so that one subcommand does not wait for the code of another.
 const SUBCOMMANDS: Readonly<Record<string, () => Promise<Subcommand>>> = {
   codes: async () => (await import("./engine/codes")).codes,
+  search: async () => (await import("./engine/search")).search,
 };
 
 // A reader such as `head` that has seen enough closes the pipe; that is no failure.
