@@ -17,7 +17,7 @@ const WIDE_CHIPS = 200; // product of two densities beyond +-100 chip rates: bel
 /**
  * Spectral separation coefficient in 1/Hz: kappa = int G_i G_s df over the receiver's band, both of power 1 over all
  * frequencies. Betz, "Effect of partial-band interference on receiver estimation of C/N0" (2001). For two BPSK signals alike it
- * is 2/(3 Rc).
+ * is 2/(3 Rc). Codes are taken as random; one pair of short codes, whose spectra are lines, may differ by several dB.
  * @param bandwidthHz two-sided, centred on the signal; null for no limit
  */
 export function spectralSeparation(
