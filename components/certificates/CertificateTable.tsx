@@ -8,11 +8,13 @@ type CertificateTableProps = {
   rows: readonly CertificateRow[];
   /** Address of one certificate is this and its number. */
   base: string;
+  /** Where the signed file of each is, if it can be had from here. */
+  fileOf?: (number: string) => string;
   /** Left out of a person's own list, where it would be the same in every row. */
   showHolder?: boolean;
 };
 
-export function CertificateTable({ rows, base, showHolder }: CertificateTableProps) {
+export function CertificateTable({ rows, base, fileOf, showHolder }: CertificateTableProps) {
   return (
     <Table reflow caption="Certificates, newest first">
       <thead>
@@ -42,9 +44,16 @@ export function CertificateTable({ rows, base, showHolder }: CertificateTablePro
               <StandingGlyph standing={row.standing} daysLeft={row.daysLeft} />
             </Td>
             <Td>
-              <LinkKey href={`${base}/${row.number}`} size="small">
-                Open
-              </LinkKey>
+              <span className="flex flex-wrap gap-2">
+                <LinkKey href={`${base}/${row.number}`} size="small">
+                  Open
+                </LinkKey>
+                {fileOf && (
+                  <LinkKey href={fileOf(row.number)} size="small" aria-label={`Download ${row.number} as PDF`}>
+                    PDF
+                  </LinkKey>
+                )}
+              </span>
             </Td>
           </Tr>
         ))}

@@ -65,6 +65,15 @@ export async function getCertificatePdf(actor: Actor, number: string): Promise<B
   return row && can.readCertificate(actor, row) ? row.pdf : null;
 }
 
+/** The same for the holder, who keeps it when no role is left at the issuer. */
+export async function getOwnCertificatePdf(
+  { personId }: Pick<Actor, "personId">,
+  number: string,
+): Promise<Buffer | null> {
+  const [row] = await select<PdfRow>(PDF, { number });
+  return row?.holderId === personId ? row.pdf : null;
+}
+
 const SQL = `
   SELECT c.number, c.employer_id AS "employerId", c.holder_id AS "holderId", p.name AS holder, c.sitting_id AS "sittingId", c.record,
     c.fingerprint, c.effective_on::text AS "effectiveOn", c.last_day::text AS "lastDay", c.issued_at AS "issuedAt",

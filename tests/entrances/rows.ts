@@ -109,6 +109,11 @@ const firmRoute = (path: (ids: Ids) => string, answers: Answers): Addressed => (
 
 export const READING_ROUTES: Readonly<Record<string, Addressed>> = {
   "GET /api/trail/heads": open("/api/trail/heads"),
+  // The holder's own alone, whatever roles are left.
+  "GET /api/account/certificates/[number]/pdf": {
+    address: (ids) => `/api/account/certificates/${ids.certificate}/pdf`,
+    answers: { ...everybody(404), "the technician": 200, "signed out": 401 },
+  },
   "GET /api/verify/records/[id]": {
     address: (ids) => `/api/verify/records/${ids.verification}`,
     answers: everybody(200),

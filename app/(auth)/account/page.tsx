@@ -36,7 +36,11 @@ export default async function AccountPage() {
           {certificates.length > 0 && (
             <section aria-labelledby="certificates">
               <SectionHead title="Certificates" id="certificates" note="yours for life, whoever employs you" />
-              <CertificateTable rows={certificates} base="/verify" />
+              <CertificateTable
+                rows={certificates}
+                base="/verify"
+                fileOf={(number) => `/api/account/certificates/${number}/pdf`}
+              />
             </section>
           )}
           <Sessions sessions={account.sessions} />

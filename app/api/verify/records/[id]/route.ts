@@ -1,3 +1,4 @@
+import { pdfDownload } from "@/lib/auth/pdfDownload";
 import { throttlePublic } from "@/lib/auth/throttlePublic";
 import { getPublicVerificationFile } from "@/lib/queries/getPublicVerificationRecord";
 
@@ -6,11 +7,5 @@ export async function GET(request: Request, { params }: { params: Promise<{ id: 
   if (!(await throttlePublic(request.headers))) return new Response("too many look-ups", { status: 429 });
   const file = await getPublicVerificationFile((await params).id);
   if (!file) return new Response("No such record, or not signed yet", { status: 404 });
-  return new Response(new Uint8Array(file.pdf), {
-    headers: {
-      "content-type": "application/pdf",
-      "content-disposition": `attachment; filename="verification-${file.number}-${file.signedAt.slice(0, 10)}.pdf"`,
-      "cache-control": "private, no-store",
-    },
-  });
+  return pdfDownload(file.pdf, `verification-${file.number}-${file.signedAt.slice(0, 10)}.pdf`);
 }

@@ -1,3 +1,4 @@
+import { pdfDownload } from "@/lib/auth/pdfDownload";
 import { route } from "@/lib/auth/route";
 import { NotFoundError } from "@/lib/errors";
 import { getCertificatePdf } from "@/lib/queries/getCertificate";
@@ -6,11 +7,5 @@ import { getCertificatePdf } from "@/lib/queries/getCertificate";
 export const GET = route<{ employer: string; number: string }>(async ({ params, actor }) => {
   const pdf = await getCertificatePdf(actor, params.number);
   if (!pdf) throw new NotFoundError("certificate");
-  return new Response(new Uint8Array(pdf), {
-    headers: {
-      "content-type": "application/pdf",
-      "content-disposition": `attachment; filename="${params.number}.pdf"`,
-      "cache-control": "private, no-store",
-    },
-  });
+  return pdfDownload(pdf, `${params.number}.pdf`);
 });
