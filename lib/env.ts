@@ -32,6 +32,10 @@ export const SETTINGS = z.object({
     .describe("where captures and certificates are kept"),
   AWS_ACCESS_KEY_ID: text.optional().describe("key of the S3 storage, unless the machine itself is trusted"),
   AWS_SECRET_ACCESS_KEY: text.optional().describe("secret of the S3 storage"),
+  TRUSTED_PROXIES: text
+    .regex(/^[0-9]$/, "is not a number from 0 to 9")
+    .optional()
+    .describe("how many of your own proxies stand in front and add the sender's address; 0"),
   LOG_LEVEL: z.enum(["trace", "debug", "info", "warn", "error"]).optional().describe("how much is logged; info"),
   DEMONSTRATION: z.literal("1").optional().describe("set by npm start alone: every page says Demonstration"),
   DEMONSTRATION_MAIL_URL: origin.optional().describe("set by npm start alone: where its mails can be read"),
@@ -45,7 +49,14 @@ const STRIPE = { STRIPE_SECRET_KEY: true, STRIPE_WEBHOOK_SECRET: true, STRIPE_AP
 /** What each process reads, and nothing beyond: the web process cannot leak a key it never had. */
 const READS = {
   owner: SETTINGS.pick({ OWNER_DATABASE_URL: true }),
-  web: SETTINGS.pick({ ...BOTH, ...STRIPE, DATABASE_URL: true, NEXTAUTH_SECRET: true, DEMONSTRATION_MAIL_URL: true }),
+  web: SETTINGS.pick({
+    ...BOTH,
+    ...STRIPE,
+    DATABASE_URL: true,
+    NEXTAUTH_SECRET: true,
+    TRUSTED_PROXIES: true,
+    DEMONSTRATION_MAIL_URL: true,
+  }),
   worker: SETTINGS.pick({
     ...BOTH,
     WORKER_DATABASE_URL: true,

@@ -2,7 +2,7 @@ import "server-only";
 import { verifyPassword } from "@/lib/passwords";
 import { signInInput } from "@/lib/schemas/people";
 import { Person } from "@/models";
-import { clientAddress } from "./clientAddress";
+import { fromAddress } from "./fromAddress";
 import { forgive, throttle, type Limit } from "./throttle";
 
 const QUARTER_HOUR = 900;
@@ -23,10 +23,9 @@ export async function signInWithPassword(
 ): Promise<{ id: string } | null> {
   const { data } = signInInput.safeParse(given);
   if (!data) return null;
-  const from = clientAddress(headers);
   const counts: [string, Limit][] = [
-    [`sign-in ${data.email} from ${from}`, FROM_ONE_PLACE],
-    [`sign-in from ${from}`, FROM_THE_MACHINE],
+    fromAddress(`sign-in ${data.email}`, headers, FROM_ONE_PLACE),
+    fromAddress("sign-in", headers, FROM_THE_MACHINE),
     [`sign-in ${data.email}`, AT_THE_ACCOUNT],
   ];
   // Counted before the password is looked at, so that guesses made at once do not slip through together.

@@ -1,5 +1,5 @@
 import "server-only";
-import { clientAddress } from "./clientAddress";
+import { fromAddress } from "./fromAddress";
 import { throttle } from "./throttle";
 
 const HOUR = 3600;
@@ -9,6 +9,6 @@ const FROM_THE_MACHINE = { points: 30, seconds: HOUR };
 
 /** @throws ThrottledError whether or not there is an account */
 export async function throttleMailedLink(email: string, headers: Pick<Headers, "get">): Promise<void> {
-  await throttle(`link from ${clientAddress(headers)}`, FROM_THE_MACHINE);
+  await throttle(...fromAddress("link", headers, FROM_THE_MACHINE));
   await throttle(`link to ${email}`, TO_ONE_ADDRESS);
 }

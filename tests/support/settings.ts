@@ -4,6 +4,8 @@ const WEB_SETTINGS = {
   NEXTAUTH_SECRET: "a secret of tests, long enough for the rule",
   STRIPE_SECRET_KEY: "sk_test_of_tests",
   STRIPE_WEBHOOK_SECRET: "whsec_of_tests",
+  // Tests say an address as a proxy would.
+  TRUSTED_PROXIES: "1",
   STORAGE_URL: "file:///nowhere",
   ISSUER_CERTIFICATE_FILE: "/nowhere/certificate.pem",
   ISSUER_ROOT_FILE: "/nowhere/root.pem",
