@@ -1,5 +1,6 @@
 import type { Components } from "hast-util-to-jsx-runtime";
 import { classNames } from "@/components/ui/classNames";
+import { ScrollRegion } from "@/components/ui/ScrollRegion";
 
 /** How the Markdown of a module looks. The page has the one h1, so that headings of the text begin at h2. */
 export const elements: Components = {
@@ -19,9 +20,9 @@ export const elements: Components = {
   // A scrolling region can be reached with the keys alone.
   pre: (props) => <pre {...props} tabIndex={0} className="my-4 overflow-x-auto bg-well p-3 text-code" />,
   table: (props) => (
-    <div className="table-region my-4" tabIndex={0} role="region" aria-label="Table">
+    <ScrollRegion label="Table" className="my-4">
       <table {...props} className="table" />
-    </div>
+    </ScrollRegion>
   ),
   a: (props) => <a {...props} className="link" rel={isElsewhere(props.href) ? "noopener noreferrer" : undefined} />,
   // Task lists are read here, not ticked.

@@ -1,6 +1,7 @@
 import Link from "next/link";
 import type { ReactNode } from "react";
 import { classNames } from "./classNames";
+import { ScrollRegion } from "./ScrollRegion";
 
 type TableProps = {
   caption: string;
@@ -15,18 +16,12 @@ type TableProps = {
 /** Words left, figures right, unit in the head or the cell but never in both. Scrolls in its own region when it must. */
 export function Table({ caption, showCaption, fixedFirst, reflow, children, className }: TableProps) {
   return (
-    <div
-      className={classNames("table-region", className)}
-      data-first={fixedFirst ? "fixed" : undefined}
-      tabIndex={fixedFirst ? 0 : undefined}
-      role={fixedFirst ? "region" : undefined}
-      aria-label={fixedFirst ? caption : undefined}
-    >
+    <ScrollRegion label={caption} fixedFirst={fixedFirst} className={className}>
       <table className="table" data-reflow={reflow || undefined}>
         <caption className={showCaption ? "pb-2 text-left text-label" : "sr-only"}>{caption}</caption>
         {children}
       </table>
-    </div>
+    </ScrollRegion>
   );
 }
 

@@ -30,7 +30,8 @@ export const SourceEditor = forwardRef<ReactCodeMirrorRef, SourceEditorProps>(fu
       sourceLook,
       EditorView.lineWrapping,
       EditorView.cspNonce.of(documentNonce()),
-      EditorView.contentAttributes.of({ "aria-label": "Source of the module", spellcheck: "false" }),
+      // What is edited is a tab stop without the attribute, but tools that look for one do not know it.
+      EditorView.contentAttributes.of({ "aria-label": "Source of the module", spellcheck: "false", tabindex: "0" }),
       linter((view) => problems.map((problem) => diagnostic(view, problem)), { delay: 0 }),
     ],
     [problems, completions],
@@ -42,6 +43,8 @@ export const SourceEditor = forwardRef<ReactCodeMirrorRef, SourceEditorProps>(fu
       height="100%"
       theme="none"
       basicSetup={{ foldGutter: false, highlightActiveLine: true, autocompletion: true, searchKeymap: true }}
+      // The Tab key leads on to the preview: a key that indents would keep people without a mouse in here.
+      indentWithTab={false}
       extensions={extensions}
       onChange={onChange}
       onUpdate={(update) => {
