@@ -26,8 +26,12 @@ export function GivenPane({ open, filesAddress }: GivenPaneProps) {
           <SectionHead title="Files" />
           <ul className="mt-2 grid gap-1 text-dense">
             {files.map((file) => (
-              <li key={file.name} className="flex justify-between gap-3">
-                <a className="link break-all" href={`${filesAddress}/${file.name}`} download={file.name}>
+              <li key={file.name} className="flex items-center justify-between gap-3">
+                <a
+                  className="link py-1 break-all pointer-coarse:py-3"
+                  href={`${filesAddress}/${file.name}`}
+                  download={file.name}
+                >
                   {file.name}
                 </a>
                 <span className="whitespace-nowrap text-ink-2 figures">{size(file.sizeBytes)}</span>

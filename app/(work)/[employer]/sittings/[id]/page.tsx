@@ -52,7 +52,9 @@ export default async function SittingPage({ params }: { params: Promise<{ employ
             </ul>
           </section>
           <details className="mt-8 border-t-hair border-rule-strong pt-4">
-            <summary className="plate cursor-pointer text-h3">The module&rsquo;s text</summary>
+            <summary className="plate cursor-pointer py-1 text-h3 pointer-coarse:py-2.5">
+              The module&rsquo;s text
+            </summary>
             <article className="mt-4 bg-sheet px-6 py-6 tablet:px-10">
               <ModuleTree tree={sitting.tree} checkCards={sitting.checkCards} />
             </article>

@@ -44,7 +44,7 @@ export function RecordSide({
         />
         {record.sequence > 1 && <p className="mt-3 text-dense">Marked again: {record.reason}</p>}
         <details className="mt-3">
-          <summary className="cursor-pointer text-dense font-semibold">Workings</summary>
+          <summary className="cursor-pointer py-1 text-dense font-semibold pointer-coarse:py-3">Workings</summary>
           <dl className="mt-2">
             {record.workings.map((line, index) => (
               <div key={index} className="border-b-hair border-rule py-1.5 text-dense figures">

@@ -42,7 +42,7 @@ export default async function ReleasePage({ params }: Props) {
           )}
           <Assigned employer={employer} release={release} />
           <details className="border-t-hair border-rule-strong pt-4" open={release.assigned.length === 0}>
-            <summary className="plate cursor-pointer text-h3">The released text</summary>
+            <summary className="plate cursor-pointer py-1 text-h3 pointer-coarse:py-2.5">The released text</summary>
             <article className="mt-4 bg-sheet px-6 py-6 tablet:px-10">
               <ModuleTree tree={release.tree} checkCards={release.checkCards} />
             </article>
