@@ -3,11 +3,11 @@ import { readFile } from "node:fs/promises";
 import type { Browser, Page } from "playwright-core";
 import { afterAll, beforeAll, describe, expect, test } from "vitest";
 import { drawCertificateNumber } from "@/lib/certificates/number";
-import type { Answers } from "@/lib/checks/kind";
 import { ownerRows } from "@/tests/support/owner";
 import { demoPerson, launch, ORIGIN, phoneOf, signedIn, stranger } from "./browser";
 import { brokenRules, phoneFindings } from "./pageFindings";
 import { rightAnswers } from "./rightAnswers";
+import { eachStepFits, losesTheSignal, readsASatellite, sendsAnswers } from "./technician";
 
 type Opened = Awaited<ReturnType<typeof stranger>>;
 
@@ -109,7 +109,7 @@ describe("from a draft to a stranger's verification", () => {
         await readsASatellite(own, answers["satellites.1.prn"]!);
         await eachStepFits(own);
       }
-      await type(own, caseId, answers);
+      await sendsAnswers(own, caseId, answers);
       if (own === page) expect.soft(await brokenRules(own)).toEqual([]);
       await own.getByRole("button", { name: /^(Review and hand in|Hand in)$/ }).click();
       if (own === phone.page) expect.soft(await phoneFindings(own)).toEqual([]);
@@ -236,53 +236,6 @@ async function issuedNumber(): Promise<string | null> {
      ORDER BY c.issued_at DESC LIMIT 1`,
   );
   return row?.number ?? null;
-}
-
-/** The first number is typed without a signal; after a reload with one it is there, and at the server. */
-async function losesTheSignal(page: Page, answers: Answers) {
-  const lag = page.getByLabel("Lag of the highest cell");
-  await page.context().setOffline(true);
-  await lag.fill(answers["reading.lag"]!);
-  await page.getByText("Kept on this device").waitFor();
-  await page.context().setOffline(false);
-  await page.reload();
-  await page.getByText(/^Saved \d\d:\d\d:\d\d/).waitFor();
-  expect(await page.getByLabel("Lag of the highest cell").inputValue()).toBe(answers["reading.lag"]);
-}
-
-/** A satellite searched with a finger; what the crosshair reads goes into the answers, and from there to the server. */
-async function readsASatellite(page: Page, prn: string) {
-  await page.getByLabel("Satellite", { exact: true }).selectOption(prn);
-  await page.getByRole("button", { name: `Search PRN ${prn}`, exact: true }).tap();
-  await page.getByRole("heading", { name: `Search grid, satellite ${prn}` }).waitFor();
-  await page.getByRole("button", { name: "Next peak" }).tap();
-  await page.getByRole("button", { name: /^Take .* for satellite/ }).tap();
-  await page.getByText(/^Saved \d\d:\d\d:\d\d/).waitFor();
-  await page.getByRole("button", { name: "Answers" }).tap();
-  expect(await page.getByLabel("PRN, row 1").inputValue()).toBe(prn);
-}
-
-/** Each step of a case on a phone, which shows one at a time. */
-async function eachStepFits(page: Page) {
-  for (const step of ["Brief", "Work", "Answers"]) {
-    await page.getByRole("button", { name: step, exact: true }).tap();
-    expect.soft(await phoneFindings(page)).toEqual([]);
-  }
-}
-
-/** Long forms go in the way the form itself sends them; the page is then reloaded and shows them. */
-async function type(page: Page, caseId: string, answers: Answers) {
-  const response = await page.request.put(`${ORIGIN}/api/employers/saltmarsh/cases/${caseId}/answers`, {
-    data: { answers, revision: 1000 },
-    headers: { origin: ORIGIN },
-  });
-  expect(response.ok()).toBe(true);
-  await page.evaluate(() => localStorage.clear());
-  await page.reload();
-  await page
-    .getByText(/given$/)
-    .first()
-    .waitFor({ state: "attached" });
 }
 
 /** The register's public answer, and that it names nobody but the holder. */
