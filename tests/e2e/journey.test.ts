@@ -42,7 +42,12 @@ describe("from a draft to a stranger's verification", () => {
     expect.soft(await brokenRules(page)).toEqual([]);
     for (let line = 0; line < 2; line++) await page.keyboard.press("Shift+ArrowUp");
     await page.keyboard.press("Delete");
+    // The key waits for what is being saved; before the last save begins it would still take the click.
+    const stored = page.waitForResponse(
+      (response) => response.url().endsWith("/draft") && /before you leave/.test(response.request().postData() ?? ""),
+    );
     await end("\nWrite the hash of the capture into the site record before you leave.\n");
+    await stored;
     await page.getByText("No problem. The draft can be released.").waitFor();
     await page.getByRole("button", { name: "Release…" }).click();
     await page.getByLabel("Why now").fill("First release after the boom case.");
