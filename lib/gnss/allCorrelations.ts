@@ -1,0 +1,139 @@
+import { createFft } from "@/lib/numeric/fft";
+import { timesConjugate, transformSize } from "./exactCorrelation";
+import type { Chips } from "./shiftRegister";
+
+const MANTISSA_BITS = 52;
+/** Bits kept free above the rounding of the transforms, which grows with the highest digit. */
+const SPARE_BITS = 8;
+const CLEAR = 0.25; // as in `exactCorrelation`
+const LAST_BIT_IS_ONE = 6_755_399_441_055_744; // 1.5 * 2^52
+
+/**
+ * Periodic correlations of every code of a set with every other, itself included, in whole numbers: the sum over n of
+ * c_i[n] * c_j[(n + k) mod N] stands at (i * M + j) * N + k.
+ *
+ * One transform serves up to eight pairs. Two codes i stand as the real and the imaginary part of one signal; some codes j,
+ * weighted by 1, B, B^2 ..., are summed up in the other. The correlation of the two then holds those of all the pairs as
+ * digits to the base B, which is large enough for every value from -N to N. Adding a large constant brings the digits
+ * into fixed bits of the number, where they are read off; a rounding that is not clear throws. The pair (j, i) is the pair
+ * (i, j) with its lags reversed.
+ * How a length of 1023 gets along with transforms of powers of two: see `exactCorrelation`.
+ * @param codes M codes, M >= 1, +1 or -1, all of length N, 2 to 16,383
+ * @param result where to write, M * M * N values; fresh memory takes longer than the sums when this is done again and again
+ */
+export function allCorrelations(
+  codes: readonly Chips[],
+  result = new Int16Array(codes.length * codes.length * (codes[0]?.length ?? 0)),
+): Int16Array {
+  const count = codes.length;
+  const length = codes[0]?.length ?? 0;
+  if (length < 2 || length > 16_383 || codes.some((code) => code.length !== length))
+    throw new RangeError(`allCorrelations: one length from 2 to 16383, got ${codes.map((code) => code.length).join()}`);
+  if (result.length !== count * count * length)
+    throw new RangeError(`allCorrelations: ${count * count * length} places for the result, got ${result.length}`);
+  const size = transformSize(length);
+  const fft = createFft(size);
+  const bits = 32 - Math.clz32(2 * length); // a digit from -N to N
+  const digits = Math.floor((MANTISSA_BITS - SPARE_BITS) / bits);
+  const pairs = Array.from({ length: Math.ceil(count / 2) }, (_, n) => pairSpectrum(codes, 2 * n, size));
+  const product = new Float64Array(2 * size);
+  const lags = new Float64Array(2 * size);
+  const words = new Int32Array(lags.buffer);
+  for (let first = 0; first < count; first += digits) {
+    const block = codes.slice(first, first + digits);
+    const spectrum = blockSpectrum(block, 1 << bits, size);
+    for (let even = 0; even < first + block.length; even += 2) {
+      timesConjugate(product, pairs[even / 2], spectrum);
+      fft.transform(lags, product);
+      intoFixedBits(lags, length, bits, digits);
+      for (let i = even; i < Math.min(even + 2, count); i++)
+        for (let j = Math.max(i, first); j < first + block.length; j++) {
+          readDigit(
+            result,
+            words,
+            { row: i * count + j, mirrored: j * count + i, length },
+            {
+              word: 2 * (i - even),
+              shift: bits * (j - first),
+              bits,
+            },
+          );
+        }
+    }
+  }
+  return result;
+}
+
+function pairSpectrum(codes: readonly Chips[], even: number, size: number): Float64Array {
+  const padded = new Float64Array(2 * size);
+  for (let part = 0; part < 2 && even + part < codes.length; part++) {
+    const code = codes[even + part];
+    for (let n = 0; n < code.length; n++) padded[2 * n + part] = code[n];
+  }
+  const spectrum = new Float64Array(2 * size);
+  createFft(size).transform(spectrum, padded);
+  return spectrum;
+}
+
+/** Spectrum of the weighted sum of the codes, each laid down twice. */
+function blockSpectrum(block: readonly Chips[], base: number, size: number): Float64Array {
+  const twice = new Float64Array(2 * size);
+  const length = block[0].length;
+  let weight = 1 / size;
+  for (const code of block) {
+    for (let n = 0; n < length; n++) twice[2 * n] += weight * code[n];
+    weight *= base;
+  }
+  twice.copyWithin(2 * length, 0, 2 * length - 2);
+  const spectrum = new Float64Array(2 * size);
+  createFft(size).transform(spectrum, twice);
+  return spectrum;
+}
+
+/**
+ * Adds to every lag a constant that makes its last bit count 1, and half the base to every digit, so that none is
+ * negative: the digits now lie in the low bits of the number.
+ */
+function intoFixedBits(lags: Float64Array, length: number, bits: number, digits: number): void {
+  let constant = LAST_BIT_IS_ONE;
+  let weight = 1 << (bits - 1);
+  for (let digit = 0; digit < digits; digit++) {
+    constant += weight;
+    weight *= 1 << bits;
+  }
+  let unclear = 0;
+  for (let n = 0; n < 2 * length; n++) {
+    const fixed = lags[n] + constant;
+    unclear = Math.max(unclear, Math.abs(fixed - constant - lags[n]));
+    lags[n] = fixed;
+  }
+  if (!(unclear < CLEAR)) throw new RangeError(`allCorrelations: ${unclear} off a whole number, codes too long`);
+}
+
+/**
+ * Copies one digit of all lags into a row of the result, and with the lags reversed into another.
+ * @param words the lags as words of 32 bits, the lower one of each number first, as all machines in use have it
+ */
+function readDigit(
+  result: Int16Array,
+  words: Int32Array,
+  { row, mirrored, length }: { row: number; mirrored: number; length: number },
+  { word, shift, bits }: { word: number; shift: number; bits: number },
+): void {
+  const mask = (1 << bits) - 1;
+  const half = 1 << (bits - 1);
+  // A digit may lie across both words; where it does not, 31 keeps the higher one out of the mask.
+  const low = word + (shift >> 5);
+  const high = word + 1;
+  const down = shift & 31;
+  const up = shift > 0 && shift < 32 ? 32 - shift : 31;
+  const forth = row * length;
+  const back = (mirrored + 1) * length;
+  let at = back - length;
+  for (let k = 0; k < length; k++) {
+    const value = (((words[4 * k + low] >>> down) | (words[4 * k + high] << up)) & mask) - half;
+    result[forth + k] = value;
+    result[at] = value;
+    at = back - k - 1;
+  }
+}
