@@ -6,7 +6,7 @@ import time
 
 
 def serve(prepare):
-    """prepare(folder) returns a function that does the work once and returns something JSON can hold."""
+    """prepare(folder) returns a function that does the work once and returns something JSON can hold, or an array."""
     work = prepare(sys.argv[1])
     result = None
     print(json.dumps({"ready": True}), flush=True)
@@ -17,4 +17,4 @@ def serve(prepare):
             answer = {"seconds": time.perf_counter() - started}
         else:
             answer = {"result": result}
-        print(json.dumps(answer), flush=True)
+        print(json.dumps(answer, default=lambda array: array.tolist()), flush=True)
