@@ -2,11 +2,22 @@
 import { BlockMath } from "react-katex";
 import "katex/dist/katex.min.css";
 
-/** The formula a calculator uses, and where it is published. */
-export function Formula({ tex, source }: { tex: string; source: string }) {
+type FormulaProps = {
+  tex: string;
+  /** Where it is published. */
+  source: string;
+  /** The same with the numbers put in, a line each. */
+  worked?: readonly string[];
+};
+
+/** The formula a calculator uses, where it is published, and the formula with the numbers put in. */
+export function Formula({ tex, source, worked = [] }: FormulaProps) {
   return (
-    <figure className="overflow-x-auto border-t-hair border-rule pt-3 text-dense" tabIndex={0} aria-label="Formula">
+    <figure className="working-out text-dense" tabIndex={0} aria-label="Formula">
       <BlockMath math={tex} />
+      {worked.map((line, at) => (
+        <BlockMath key={at} math={line} />
+      ))}
       <figcaption className="text-label font-normal text-ink-2">{source}</figcaption>
     </figure>
   );

@@ -2,123 +2,98 @@
 import { useEffect, useRef, useState } from "react";
 import { LinePlot } from "@/components/plots/LinePlot";
 import { formatNumber } from "@/components/ui/formatNumber";
-import { Ledger } from "@/components/ui/Ledger";
-import { Value } from "@/components/ui/Value";
 import { Working } from "@/components/ui/Working";
+import { SEARCH_PLAN } from "@/lib/calculators/searchPlan";
+import { CalculatorFields } from "./CalculatorFields";
+import { CalculatorFrame } from "./CalculatorFrame";
+import type { CalculatorProps } from "./calculatorProps";
 import { Formula } from "./Formula";
-import { NumberInput } from "./NumberInput";
+import { Reading } from "./Reading";
+import { texNumber } from "./texNumber";
 import type { PlanAnswer, PlanInputs } from "./workers/plan.worker";
 
-export type SearchPlanProps = Partial<PlanInputs>;
-
-const START: PlanInputs = {
-  cn0DbHz: 34,
-  coherentMs: 4,
-  sums: 10,
-  dopplerBinHz: 125,
-  codeStepChips: 0.5,
-  windowHz: 5000,
-  falseAlarmPerSearch: 1e-3,
-  correlators: 1000,
-};
-
-const INPUTS = [
-  { key: "cn0DbHz", label: "C/N0", unit: "dB-Hz", from: 20, to: 55, decimals: 1 },
-  { key: "coherentMs", label: "Coherent time", unit: "ms", from: 1, to: 20, whole: true },
-  { key: "sums", label: "Sums", from: 1, to: 500, whole: true },
-  { key: "dopplerBinHz", label: "Doppler bin", unit: "Hz", from: 10, to: 1000 },
-  { key: "codeStepChips", label: "Code step", unit: "chip", from: 0.1, to: 1, decimals: 2 },
-  { key: "windowHz", label: "Window ±", unit: "Hz", from: 0, to: 20_000 },
-  { key: "falseAlarmPerSearch", label: "False alarms per search", from: 1e-9, to: 0.1, scientific: true },
-  { key: "correlators", label: "Correlators", from: 1, to: 1_000_000, whole: true },
-] as const;
-
 /** Will this search find it, and when? Detection with all losses averaged, cells, threshold and time. */
-export function SearchPlan(props: SearchPlanProps) {
-  const [inputs, setInputs] = useState<PlanInputs>(() => ({ ...START, ...given(props) }));
-  const answer = usePlan(inputs);
-  const [cn0Index, setCn0Index] = useState<number | null>(null);
-  const busy = answer === null || answer.inputs !== inputs;
+export function SearchPlan({ values, onChange }: CalculatorProps<typeof SEARCH_PLAN>) {
+  const answer = usePlan(values);
   return (
-    <div className="@container">
-      <div className="grid gap-x-8 gap-y-5 @3xl:grid-cols-[1fr_15rem]">
-        <div className="min-w-0" aria-busy={busy}>
-          {answer === null ? (
-            <Working label="Averaging over code offset, Doppler offset and bit edges" />
-          ) : (
-            <>
-              <div className="flex flex-wrap items-end gap-x-10 gap-y-3">
-                <div>
-                  <p className="text-label font-normal text-ink-2">Detection probability</p>
-                  <p>
-                    <Value value={100 * answer.performance.detection} decimals={1} unit="%" size="l" />
-                  </p>
-                </div>
-                <p className="pb-1 text-dense text-ink-2 figures">
-                  at {formatNumber(answer.inputs.cn0DbHz, 1)} dB-Hz, standard error{" "}
-                  {formatNumber(100 * answer.performance.detectionStandardError, 2)} point
-                </p>
-              </div>
-              <LinePlot
-                x={{ name: "C/N0, dB-Hz", from: answer.curve[0]!.cn0DbHz, to: answer.curve.at(-1)!.cn0DbHz }}
-                y={{ name: "detection probability, %", from: 0, to: 100 }}
-                curves={[
-                  {
-                    name: "this plan",
-                    role: "subject",
-                    x: answer.curve.map(({ cn0DbHz }) => cn0DbHz),
-                    y: answer.curve.map(({ detection }) => 100 * detection),
-                  },
-                ]}
-                limits={[{ y: 90, name: "90 %" }]}
-                summary={`Detection probability against C/N0; ${formatNumber(100 * answer.performance.detection, 1)} % at ${formatNumber(answer.inputs.cn0DbHz, 1)} dB-Hz.`}
-                cursor={{
-                  index: cn0Index ?? Math.round(answer.inputs.cn0DbHz) - answer.curve[0]!.cn0DbHz,
-                  onMove: setCn0Index,
-                  lines: (index) => [
-                    `${answer.curve[index]?.cn0DbHz} dB-Hz`,
-                    `${formatNumber(100 * (answer.curve[index]?.detection ?? 0), 1)} %`,
-                  ],
-                }}
-                height={240}
-              />
-              <Ledger
-                className="mt-4"
-                rows={[
-                  { label: "Cells", value: formatNumber(answer.performance.cells) },
-                  {
-                    label: "Threshold",
-                    value: `${formatNumber(answer.performance.thresholdSigma2, 2)} sigma²`,
-                    detail: "on the sum of all squares, noise power per component = 1",
-                  },
-                  { label: "False alarms per cell", value: answer.performance.falseAlarmPerCell.toExponential(2) },
-                  { label: "Time of the whole search", value: `${formatNumber(answer.performance.searchTimeS, 3)} s` },
-                ]}
-              />
-            </>
-          )}
-          <Formula
-            tex={String.raw`P_D=\overline{Q_K\!\left(\sqrt{2K\rho},\sqrt{\gamma}\right)},\qquad 1-(1-p)^{N}=P_{FA},\qquad p=Q_{\chi^2_{2K}}(\gamma)`}
-            source="Kaplan and Hegarty, Understanding GPS, 2nd edition, 5.8; the bar is the mean over code offset, Doppler offset and bit edges (common practice, no source)."
-          />
-        </div>
-        <div className="grid grid-cols-2 content-start gap-4 @xl:grid-cols-4 @3xl:grid-cols-1">
-          {INPUTS.map(({ key, ...input }) => (
-            <NumberInput
-              key={key}
-              {...input}
-              value={inputs[key]}
-              onChange={(value) => setInputs({ ...inputs, [key]: value })}
-            />
-          ))}
-        </div>
-      </div>
-    </div>
+    <CalculatorFrame
+      busy={answer === null || answer.inputs !== values}
+      reading={<PlanReading answer={answer} />}
+      fields={<CalculatorFields of={SEARCH_PLAN} values={values} onChange={onChange} />}
+      working={
+        <Formula
+          tex={String.raw`P_D=\overline{Q_K\!\left(\sqrt{2K\rho},\sqrt{\gamma}\right)},\qquad 1-(1-p)^{N}=P_{FA},\qquad p=Q_{\chi^2_{2K}}(\gamma)`}
+          worked={answer ? [worked(answer)] : []}
+          source="Kaplan and Hegarty, Understanding GPS, 2nd edition, 5.8; the bar is the mean over code offset, Doppler offset and bit edges (common practice, no source)."
+        />
+      }
+    >
+      {answer ? (
+        <PlanCurve answer={answer} />
+      ) : (
+        <Working label="Averaging over code offset, Doppler offset and bit edges" />
+      )}
+    </CalculatorFrame>
   );
 }
 
-const given = (props: SearchPlanProps): Partial<PlanInputs> =>
-  Object.fromEntries(Object.entries(props).filter(([, value]) => value !== undefined));
+function PlanReading({ answer }: { answer: PlanAnswer | null }) {
+  const performance = answer?.performance;
+  return (
+    <>
+      <Reading
+        label="Detection probability"
+        value={performance ? 100 * performance.detection : null}
+        decimals={1}
+        unit="%"
+        deciding
+      >
+        {answer &&
+          `at ${formatNumber(answer.inputs.cn0DbHz, 1)} dB-Hz, standard error ${formatNumber(100 * answer.performance.detectionStandardError, 2)} point`}
+      </Reading>
+      <Reading label="Time of the whole search" value={performance?.searchTimeS ?? null} decimals={3} unit="s" />
+      <Reading label="Cells" value={performance?.cells ?? null} />
+      <Reading label="Threshold" value={performance?.thresholdSigma2 ?? null} decimals={2} unit="sigma²">
+        on the sum of all squares, noise power per component = 1
+      </Reading>
+      <Reading label="False alarms per cell" value={performance ? powerOfTen(performance.falseAlarmPerCell) : null} />
+    </>
+  );
+}
+
+const powerOfTen = (value: number) => value.toExponential(2).replace("e-", "e\u2212");
+
+function PlanCurve({ answer: { curve, inputs, performance } }: { answer: PlanAnswer }) {
+  const [index, setIndex] = useState<number | null>(null);
+  return (
+    <LinePlot
+      x={{ name: "C/N0, dB-Hz", from: curve[0].cn0DbHz, to: curve.at(-1)!.cn0DbHz }}
+      y={{ name: "detection probability, %", from: 0, to: 100 }}
+      curves={[
+        {
+          name: "this plan",
+          role: "subject",
+          x: curve.map(({ cn0DbHz }) => cn0DbHz),
+          y: curve.map(({ detection }) => 100 * detection),
+        },
+      ]}
+      limits={[
+        { y: 90, name: "90 %" },
+        { x: inputs.cn0DbHz, name: `${formatNumber(inputs.cn0DbHz, 1)} dB-Hz`, tone: "plus" },
+      ]}
+      summary={`Detection probability against C/N0; ${formatNumber(100 * performance.detection, 1)} % at ${formatNumber(inputs.cn0DbHz, 1)} dB-Hz.`}
+      cursor={{
+        index: index ?? Math.round(inputs.cn0DbHz) - curve[0].cn0DbHz,
+        onMove: setIndex,
+        lines: (at) => [`${curve[at]?.cn0DbHz} dB-Hz`, `${formatNumber(100 * (curve[at]?.detection ?? 0), 1)} %`],
+      }}
+      height={320}
+    />
+  );
+}
+
+const worked = ({ inputs, performance }: PlanAnswer) =>
+  String.raw`N=${texNumber(performance.cells)},\quad p=${texNumber(performance.falseAlarmPerCell, 6)},\quad \gamma=${texNumber(performance.thresholdSigma2, 2)},\quad K=${texNumber(inputs.sums)},\quad P_D=${texNumber(performance.detection, 3)}`;
 
 /** The newest answer of the worker; an older one stays until it comes. */
 function usePlan(inputs: PlanInputs): PlanAnswer | null {

@@ -1,7 +1,7 @@
 "use client";
 import { CaptureSearch } from "@/components/calculators/CaptureSearch";
 import type { Reading } from "@/components/calculators/reading";
-import { SearchPlan } from "@/components/calculators/SearchPlan";
+import { StandingCalculator } from "@/components/calculators/StandingCalculator";
 import { TraceReader } from "@/components/calculators/TraceReader";
 import { SectionHead } from "@/components/ui/SectionHead";
 import type { PublicCase } from "@/lib/checks/kind";
@@ -49,7 +49,7 @@ export function Workspace({ view, filesAddress, onTake }: WorkspaceProps) {
             note="the bench's own, to try plans on; your answers are typed at the right"
           />
           <div className="mt-4">
-            <SearchPlan />
+            <StandingCalculator tag="SearchPlan" />
           </div>
         </>
       );

@@ -6,7 +6,16 @@ export function formatQuantity(value: number, unit: Unit, decimals: number): str
   return name === "" ? formatNumber(value, decimals) : `${formatNumber(value, decimals)}\u00a0${name}`;
 }
 
-const PRINTED: Partial<Record<Unit, string>> = { "1": "", us: "µs", sigma: "σ", sigma2: "σ²", deg: "°" };
+const PRINTED: Partial<Record<Unit, string>> = {
+  "1": "",
+  us: "µs",
+  sigma: "σ",
+  sigma2: "σ²",
+  deg: "°",
+  "dB/100m": "dB/100 m",
+  ohm: "Ω",
+  "ohm/km": "Ω/km",
+};
 
 /** Unit as printed: µs for us, nothing for a plain number. */
 export const formatUnit = (unit: Unit): string => PRINTED[unit] ?? unit;

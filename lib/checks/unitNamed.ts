@@ -30,6 +30,11 @@ const OTHER_NAMES: Readonly<Record<string, Unit>> = {
   "sigma²": "sigma2",
   "°": "deg",
   degrees: "deg",
+  hours: "h",
+  hour: "h",
+  "db/100 m": "dB/100m",
+  ω: "ohm",
+  "ω/km": "ohm/km",
 };
 
 const LETTERS: readonly (readonly [string, Unit])[] = (Object.keys(UNITS) as Unit[])

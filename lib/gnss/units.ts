@@ -9,6 +9,7 @@ export type Unit =
   | "ms"
   | "s"
   | "min"
+  | "h"
   | "mm"
   | "m"
   | "km"
@@ -16,13 +17,19 @@ export type Unit =
   | "kHz"
   | "MHz"
   | "dB"
+  | "dB/100m"
   | "dB-Hz"
   | "dBm"
   | "dBW"
   | "sigma"
   | "sigma2"
   | "deg"
-  | "K";
+  | "K"
+  | "V"
+  | "mA"
+  | "ohm"
+  | "ohm/km"
+  | "g/s";
 
 export type Dimension =
   | "ratio"
@@ -36,7 +43,13 @@ export type Dimension =
   | "noise amplitude"
   | "noise power"
   | "angle"
-  | "temperature";
+  | "temperature"
+  | "loss per length"
+  | "voltage"
+  | "current"
+  | "resistance"
+  | "resistance per length"
+  | "jerk";
 
 /** One unit: value in base units = value * toBase + offset. */
 export type UnitDefinition = { readonly dimension: Dimension; readonly toBase: number; readonly offset: number };
@@ -54,6 +67,7 @@ export const UNITS: Readonly<Record<Unit, UnitDefinition>> = {
   ms: unit("time", 1e-3),
   s: unit("time", 1),
   min: unit("time", 60),
+  h: unit("time", 3600),
   mm: unit("length", 1e-3),
   m: unit("length", 1),
   km: unit("length", 1e3),
@@ -61,6 +75,7 @@ export const UNITS: Readonly<Record<Unit, UnitDefinition>> = {
   kHz: unit("frequency", 1e3),
   MHz: unit("frequency", 1e6),
   dB: unit("level", 1),
+  "dB/100m": unit("loss per length", 1),
   "dB-Hz": unit("density ratio", 1),
   dBm: unit("power level", 1, -30),
   dBW: unit("power level", 1),
@@ -68,6 +83,11 @@ export const UNITS: Readonly<Record<Unit, UnitDefinition>> = {
   sigma2: unit("noise power", 1),
   deg: unit("angle", 1),
   K: unit("temperature", 1),
+  V: unit("voltage", 1),
+  mA: unit("current", 1e-3),
+  ohm: unit("resistance", 1),
+  "ohm/km": unit("resistance per length", 1),
+  "g/s": unit("jerk", 1),
 };
 
 /** Whether a quantity in one unit can be stated in the other. */

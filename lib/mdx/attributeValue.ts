@@ -1,4 +1,6 @@
 import { formatNumber, formatUnit } from "@/lib/checks/formatQuantity";
+import { inputText } from "@/lib/calculators/inputText";
+import { readInput } from "@/lib/calculators/readInput";
 import { parseQuantity } from "@/lib/checks/parseQuantity";
 import type { Unit } from "@/lib/gnss/units";
 import type { Literal } from "@/lib/mdx/literal";
@@ -21,6 +23,13 @@ export function attributeValue(spec: AttributeSpec, written: Literal): Attribute
       return { problem: `${spec.name} is letters, figures and hyphens in quotes, such as ${spec.sample}.` };
     case "topics":
       return topics(spec, written);
+    case "described": {
+      const read = typeof written === "string" ? readInput(spec.of, written) : { problem: "" };
+      if ("value" in read) return { value: inputText(spec.of, read.value) };
+      return {
+        problem: `${spec.name} cannot be read. ${read.problem || `It is a text in quotes, such as ${spec.sample}.`}`,
+      };
+    }
     case "text":
       if (typeof written === "number") return { value: String(written) };
       if (typeof written === "string" && written.trim() !== "") return { value: written.trim() };

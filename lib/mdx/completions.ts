@@ -2,7 +2,7 @@ import { formatUnderstood } from "@/lib/checks/formatUnderstood";
 import type { CheckKind, ParameterSpec, QuantityDefinition } from "@/lib/checks/kind";
 import { KINDS } from "@/lib/checks/registry";
 import { FRONT_MATTER_EXAMPLES } from "@/lib/mdx/frontMatter";
-import { TAGS, type TagName } from "@/lib/mdx/tags";
+import { TAGS, type TagName, type TagSpec } from "@/lib/mdx/tags";
 import { toleranceText } from "@/lib/mdx/toleranceText";
 
 /** One offer of the editor: `insert` is what is typed for the lead. */
@@ -20,14 +20,14 @@ export type Completions = {
 };
 
 export function completions(kinds: readonly CheckKind[] = KINDS): Completions {
-  const specs = Object.values(TAGS);
+  const specs: readonly TagSpec[] = Object.values(TAGS);
   // Newest of a kind first: that is the version a module gets.
   const newest = kinds.filter((kind, at) => kinds.findIndex(({ id }) => id === kind.id) === at);
   return {
     frontMatter: Object.entries(FRONT_MATTER_EXAMPLES)
       .filter(([path]) => !path.includes("."))
       .map(([label, insert]) => ({ label, detail: "front matter", insert })),
-    tags: specs.map(({ name, help }) => ({ label: name, detail: help, insert: example(name) })),
+    tags: specs.map((spec) => ({ label: spec.name, detail: spec.help, insert: example(spec) })),
     attributes: Object.fromEntries(
       specs.map(({ name, attributes }) => [
         name,
@@ -40,8 +40,7 @@ export function completions(kinds: readonly CheckKind[] = KINDS): Completions {
   };
 }
 
-function example(name: TagName): string {
-  const { attributes, inside } = TAGS[name];
+function example({ name, attributes, inside }: TagSpec): string {
   const needed = attributes.filter((one) => "required" in one);
   const written = (needed.length > 0 ? needed : attributes).map((one) => ` ${one.name}=${one.sample}`).join("");
   return inside === "text" && name === "Check" ? `<${name}${written}>\n\n</${name}>` : `<${name}${written} />`;

@@ -1,10 +1,14 @@
 import type { CautionTopic } from "@/lib/checks/kind";
+import type { ChoiceInput, RowsInput } from "@/lib/calculators/calculator";
 import type { Unit } from "@/lib/gnss/units";
+import { CALCULATOR_TAGS } from "@/lib/mdx/calculatorTags";
 
 /** How the value of an attribute is read. A number may be bare, in the unit given, or in quotes with a unit of its own. */
 export type AttributeSpec = { name: string; help: string; sample: string; required?: true } & (
   | { input: "number"; unit: Unit; from: number; to: number; whole?: true }
   | { input: "name" | "text" | "flag" | "topics" }
+  // A word of a list or the rows of a table: the calculator's own description says how it is read.
+  | { input: "described"; of: ChoiceInput | RowsInput }
 );
 
 export type TagSpec = {
@@ -27,116 +31,8 @@ export const CAUTION_TOPICS = [
   "life",
 ] as const satisfies readonly CautionTopic[];
 
-const prn = (name: string, help: string): AttributeSpec => ({
-  name,
-  help,
-  sample: "{5}",
-  input: "number",
-  unit: "1",
-  from: 1,
-  to: 32,
-  whole: true,
-});
-
-const coherent: AttributeSpec = {
-  name: "coherent",
-  help: "coherent integration time",
-  sample: '"1 ms"',
-  input: "number",
-  unit: "ms",
-  from: 1,
-  to: 20,
-  whole: true,
-};
-
 export const TAGS = {
-  TwoCodes: {
-    name: "TwoCodes",
-    help: "Two-code correlator: one C/A code slid over another",
-    inside: "nothing",
-    place: "block",
-    attributes: [
-      prn("a", "satellite whose code stands still"),
-      prn("b", "satellite whose code is slid"),
-      {
-        name: "doppler",
-        help: "Doppler difference",
-        sample: '"1 kHz"',
-        input: "number",
-        unit: "Hz",
-        from: -10_000,
-        to: 10_000,
-      },
-      {
-        name: "lag",
-        help: "lag of the cursor",
-        sample: '"0 chip"',
-        input: "number",
-        unit: "chip",
-        from: 0,
-        to: 1022.9,
-      },
-      coherent,
-    ],
-  },
-  SearchPlan: {
-    name: "SearchPlan",
-    help: "Search planner: detection, false alarms and time of a plan",
-    inside: "nothing",
-    place: "block",
-    attributes: [
-      {
-        name: "cn0",
-        help: "carrier to noise density",
-        sample: '"31 dB-Hz"',
-        input: "number",
-        unit: "dB-Hz",
-        from: 20,
-        to: 55,
-      },
-      coherent,
-      {
-        name: "sums",
-        help: "non-coherent sums",
-        sample: "{20}",
-        input: "number",
-        unit: "1",
-        from: 1,
-        to: 500,
-        whole: true,
-      },
-      { name: "bin", help: "Doppler bin", sample: '"100 Hz"', input: "number", unit: "Hz", from: 10, to: 1000 },
-      { name: "step", help: "code step", sample: '"0.5 chip"', input: "number", unit: "chip", from: 0.1, to: 1 },
-      {
-        name: "window",
-        help: "half width of the Doppler window",
-        sample: '"5 kHz"',
-        input: "number",
-        unit: "Hz",
-        from: 0,
-        to: 20_000,
-      },
-      {
-        name: "falseAlarm",
-        help: "false-alarm probability of one search",
-        sample: "{1e-3}",
-        input: "number",
-        unit: "1",
-        from: 1e-9,
-        to: 0.1,
-      },
-      {
-        name: "correlators",
-        help: "cells searched at a time",
-        sample: "{2046}",
-        input: "number",
-        unit: "1",
-        from: 1,
-        to: 1_000_000,
-        whole: true,
-      },
-    ],
-  },
+  ...CALCULATOR_TAGS,
   Check: {
     name: "Check",
     help: "A practical check; the text inside is its brief",

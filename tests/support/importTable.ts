@@ -23,6 +23,14 @@ const DATA_AND_LOGIC: Row[] = [
   // The metadata of a capture carry the hash of its samples; only the worker runs this file.
   { files: "lib/checks/captureFiles.ts", may: ["lib/checks", "lib/gnss"], packages: ["node:crypto"] },
   { files: "lib/checks/", may: ["lib/gnss", "lib/numeric", "lib/formats", "lib/schemas"], packages: [] },
+  // What may be typed into a calculator is described once, for its fields, its link and its tag in modules. It is read as
+  // answers are read.
+  {
+    files: "lib/calculators/",
+    may: ["lib/checks/parseQuantity", "lib/checks/formatQuantity"],
+    types: ["lib/gnss/units"],
+    packages: [],
+  },
   // Lists that a schema must not repeat: roles, lengths of passwords.
   { files: "lib/schemas/", may: ["lib/gnss/constants", "lib/policies"], packages: ["zod"] },
   { files: "lib/policies/", may: ["lib/errors", "lib/calendar"], packages: [] },
@@ -83,7 +91,7 @@ const DATA_AND_LOGIC: Row[] = [
   { files: "lib/storage/", may: ["lib/env"], packages: ["server-only", "@aws-sdk/client-s3", "node:"] },
   {
     files: "lib/mdx/",
-    may: ["lib/schemas", "lib/checks", "lib/gnss/units", "lib/errors"],
+    may: ["lib/schemas", "lib/checks", "lib/calculators", "lib/gnss/units", "lib/errors"],
     packages: [
       ...["acorn", "hast", "mdast", "mdast-util-mdx", "unified", "vfile", "yaml", "zod", "tsx", "unist-util-visit"],
       ...["rehype-katex", "remark-frontmatter", "remark-gfm", "remark-math", "remark-mdx", "remark-parse"],
@@ -133,7 +141,8 @@ const SCREENS_AND_ENTRANCES: Row[] = [
   {
     files: "app/*/_components/",
     // Actions arrive by their route; signing out is every route's.
-    may: ["app", "components", "lib/auth/actions", "lib/policies"],
+    // The bench's list is made of the calculators' descriptions.
+    may: ["app", "components", "lib/auth/actions", "lib/policies", "lib/calculators"],
     types: [...VIEWS, "lib/checks", "lib/mdx"],
     packages: ["react", "next", "node:crypto", "@codemirror/", "@lezer/highlight", "@uiw/react-codemirror"],
   },
@@ -143,6 +152,7 @@ const SCREENS_AND_ENTRANCES: Row[] = [
     may: [
       "components",
       "lib/queries",
+      "lib/calculators",
       "lib/auth/throttlePublic",
       "lib/certificates/number",
       "lib/price",
@@ -166,12 +176,12 @@ const SCREENS_AND_ENTRANCES: Row[] = [
   { files: "components/plots/", may: ["lib/numeric", ...UI], packages: ["react"] },
   {
     files: "components/calculators/",
-    may: ["lib/gnss", "lib/numeric", "lib/formats", "components/plots", ...UI],
+    may: ["lib/calculators", "lib/gnss", "lib/numeric", "lib/formats", "components/plots", ...UI],
     packages: ["react", "react-katex", "katex"],
   },
   {
     files: "components/mdx/",
-    may: ["components/calculators", ...UI],
+    may: ["components/calculators", "lib/calculators", ...UI],
     types: ["lib/mdx"],
     packages: ["react", "katex", "hast-util-to-jsx-runtime"],
   },

@@ -1,0 +1,11 @@
+import type { ComponentType } from "react";
+import type { BenchCalculator, CalculatorTag } from "@/lib/calculators/calculators";
+import type { CalculatorProps } from "./calculatorProps";
+import { SearchPlan } from "./SearchPlan";
+import { TwoCodes } from "./TwoCodes";
+
+/** What each calculator of the bench shows and computes. */
+export const BODIES: { [T in CalculatorTag]: ComponentType<CalculatorProps<Extract<BenchCalculator, { tag: T }>>> } = {
+  TwoCodes,
+  SearchPlan,
+};

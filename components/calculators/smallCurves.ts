@@ -1,0 +1,29 @@
+import type { CalculatorTag } from "@/lib/calculators/calculators";
+import { caCode } from "@/lib/gnss/caCode";
+import { circularCorrelation } from "@/lib/gnss/correlation";
+import { erfc } from "@/lib/numeric/erfc";
+
+export type Small = { x: number[]; y: number[]; bars?: boolean };
+
+const range = (from: number, to: number, steps: number) =>
+  Array.from({ length: steps + 1 }, (_, at) => from + ((to - from) * at) / steps);
+const over = (x: number[], of: (value: number) => number): Small => ({ x, y: x.map(of) });
+
+const DRAWN: Record<CalculatorTag, () => Small> = {
+  TwoCodes: () => {
+    const values = circularCorrelation(caCode(7), caCode(19));
+    return over(range(0, 44, 44), (lag) => values[lag]);
+  },
+  SearchPlan: () => over(range(-3, 3, 32), (sigmas) => erfc(-sigmas) / 2),
+};
+
+const kept = new Map<CalculatorTag, Small>();
+
+/** Points of a calculator's small drawing, computed once. */
+export function smallCurve(tag: CalculatorTag): Small {
+  const known = kept.get(tag);
+  if (known) return known;
+  const drawn = DRAWN[tag]();
+  kept.set(tag, drawn);
+  return drawn;
+}
