@@ -107,7 +107,7 @@ describe("a run of the usual stages", () => {
   test("finds the bit edge and sums over parts of bits", () => {
     // the first whole period is the one after the period in progress at the first sample
     expect(tracking.bitEdge).toBe(satellite.bitEdgeMs - 1);
-    expect(tracking.records.at(-1)!.lengthS).toBeCloseTo(0.01, 6);
+    expectNear(tracking.records.at(-1)!.lengthS, 0.01, 5e-7, "coherent time");
     const bits = bitsOfPrompts(tracking.prompts.subarray(2 * 600), tracking.bitEdge!);
     const sent = Array.from(satellite.dataBits.subarray(31, 31 + bits.length), (bit) => (bit > 0 ? 0 : 1));
     const wrong = bits.filter((bit, n) => bit !== sent[n]).length;
