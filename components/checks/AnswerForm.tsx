@@ -14,10 +14,12 @@ type AnswerFormProps = {
   sections: readonly FormSection[];
   answers: Readonly<Record<string, string>>;
   onChange: (fields: Readonly<Record<string, string>>) => void;
+  /** A field was entered: it stays the open one until another is. */
+  onEnter?: (id: string) => void;
 };
 
 /** The fields of a case, section by section; a repeating section grows by one row as the last is filled. */
-export function AnswerForm({ sections, answers, onChange }: AnswerFormProps) {
+export function AnswerForm({ sections, answers, onChange, onEnter }: AnswerFormProps) {
   return sections.map((section) => (
     <section key={section.id} className="bg-sheet px-3 py-4" aria-labelledby={`section-${section.id}`}>
       <SectionHead title={section.title} id={`section-${section.id}`} level={3} />
@@ -29,13 +31,14 @@ export function AnswerForm({ sections, answers, onChange }: AnswerFormProps) {
           }
         >
           {fieldsOfRow(section, index + 1).map(({ id, spec }) => (
-            <AnswerField
-              key={id}
-              spec={spec}
-              row={section.repeat ? index + 1 : null}
-              value={answers[id] ?? ""}
-              onChange={(value) => onChange({ [id]: value })}
-            />
+            <div key={id} className="contents" onFocus={() => onEnter?.(id)}>
+              <AnswerField
+                spec={spec}
+                row={section.repeat ? index + 1 : null}
+                value={answers[id] ?? ""}
+                onChange={(value) => onChange({ [id]: value })}
+              />
+            </div>
           ))}
         </div>
       ))}

@@ -14,7 +14,8 @@ import { AnswerForm } from "./AnswerForm";
 import { askedFields, countGiven } from "./formFields";
 import { GivenPane } from "./GivenPane";
 import { HandInDialog } from "./HandInDialog";
-import { takeReading } from "./takeReading";
+import { TakenLine } from "./TakenLine";
+import { takeReading, type Taken } from "./takeReading";
 import { useAnswers, type Saved } from "./useAnswers";
 import { Workspace } from "./Workspace";
 
@@ -44,13 +45,19 @@ export function CaseDesk({
   });
   const [step, setStep] = useState<StepId>("search");
   const [handing, setHanding] = useState(false);
+  const [openField, setOpenField] = useState<string | null>(null);
+  const [taken, setTaken] = useState<readonly Taken[] | null>(null);
   const fields = askedFields(open.view.sections, answers);
   const given = countGiven(fields, answers);
   const missing = fields.length - given;
 
   const take = useCallback(
-    (reading: Reading) => change(takeReading(open.view.sections, answers, reading)),
-    [answers, change, open.view.sections],
+    (reading: Reading) => {
+      const written = takeReading(open.view.sections, answers, reading, openField);
+      setTaken(written);
+      if (written.length > 0) change(Object.fromEntries(written.map(({ id, value }) => [id, value])));
+    },
+    [answers, change, open.view.sections, openField],
   );
   const end = useCallback(() => {
     void send();
@@ -87,6 +94,7 @@ export function CaseDesk({
         </Pane>
         <Pane id="search" current={step} className="border-rule bg-sheet desk:border-x-hair">
           <Workspace view={open.view} filesAddress={`${base}/files`} onTake={over ? undefined : take} />
+          <TakenLine taken={taken} />
         </Pane>
         <Pane id="answers" current={step} className="bg-ground">
           <div className="flex items-baseline justify-between gap-4 border-b-strong border-ink pb-2">
@@ -101,7 +109,7 @@ export function CaseDesk({
             </Notice>
           )}
           <fieldset disabled={over} className="grid gap-px">
-            <AnswerForm sections={open.view.sections} answers={answers} onChange={change} />
+            <AnswerForm sections={open.view.sections} answers={answers} onChange={change} onEnter={setOpenField} />
           </fieldset>
         </Pane>
       </div>

@@ -1,39 +1,69 @@
 import type { Reading } from "@/components/calculators/reading";
-import type { FormSection } from "@/lib/checks/kind";
+import type { FieldSpec, FormSection } from "@/lib/checks/kind";
 import { fieldsOfRow, rowsShown } from "./formFields";
+
+type Answers = Readonly<Record<string, string>>;
+export type Taken = { id: string; label: string; value: string };
 
 /** Which part of a reading belongs into a field of this name, written as a person would type it. */
 const PARTS: Readonly<Record<string, (reading: Reading) => string | null>> = {
   prn: ({ prn }) => (prn === undefined ? null : String(prn)),
   codePhase: ({ codePhaseChips }) => text(codePhaseChips, 2),
   doppler: ({ dopplerHz }) => text(dopplerHz, 0),
-  falseDoppler: ({ dopplerHz }) => text(dopplerHz, 0),
   cn0: ({ cn0DbHz }) => text(cn0DbHz, 1),
-  falseCn0: ({ cn0DbHz }) => text(cn0DbHz, 1),
   lag: ({ lagChips }) => text(lagChips, 3),
 };
+/** These are taken only while they are open: which satellite stands behind another is for the person to say. */
+const WHEN_OPEN: typeof PARTS = { ...PARTS, parent: PARTS.prn! };
 
-/** The answers a reading fills in: into its satellite's row, the first empty row, or the section that asks for it. */
+/** The verdict that makes a satellite the one whose false lock is asked about. */
+const CALLED_FALSE = "cross-correlation";
+
+/**
+ * What a reading fills in: the open field alone, where the reading has something for it. Else its satellite's row, the
+ * first empty row, or the section that asks for it; of one satellite among many only when the person has named it.
+ * @param open id of the answer field that was entered last, null when none was
+ */
 export function takeReading(
   sections: readonly FormSection[],
-  answers: Readonly<Record<string, string>>,
+  answers: Answers,
   reading: Reading,
-): Readonly<Record<string, string>> {
-  const taken: Record<string, string> = {};
-  for (const section of sections) {
-    for (const { id, spec } of fieldsOfRow(section, rowFor(section, answers, reading))) {
-      const value = PARTS[spec.id]?.(reading) ?? null;
-      if (value !== null) taken[id] = value;
-    }
-    if (section.fields.some(({ id }) => id === "bin") && reading.binHz !== undefined) {
-      const id = `${section.id}.bin`;
-      if (!(answers[id] ?? "").trim()) taken[id] = text(reading.binHz, 0)!;
-    }
-  }
-  return taken;
+  open: string | null,
+): Taken[] {
+  const fields = sections.flatMap((section) =>
+    Array.from({ length: rowsShown(section, answers) }, (_, index) => fieldsOfRow(section, index + 1)).flat(),
+  );
+  const opened = fields.find(({ id }) => id === open);
+  const repeats = sections.some((section) => section.repeat && open?.startsWith(`${section.id}.`));
+  const wanted = opened && !repeats ? taken(opened.id, opened.spec, reading, WHEN_OPEN) : null;
+  if (wanted) return [wanted];
+  return sections.flatMap((section) => [
+    ...(isAbout(section, answers, reading)
+      ? fieldsOfRow(section, rowFor(section, answers, reading)).flatMap(
+          ({ id, spec }) => taken(id, spec, reading, PARTS) ?? [],
+        )
+      : []),
+    ...binOf(section, answers, reading),
+  ]);
 }
 
-function rowFor(section: FormSection, answers: Readonly<Record<string, string>>, { prn }: Reading): number {
+/** Rows are found by their satellite. Fields that stand once are about the one satellite that the person called false. */
+const isAbout = (section: FormSection, answers: Answers, { prn }: Reading): boolean =>
+  Boolean(section.repeat) || prn === undefined || answers[`verdicts.prn${prn}`] === CALLED_FALSE;
+
+function taken(id: string, spec: FieldSpec, reading: Reading, parts: typeof PARTS): Taken | null {
+  const value = Object.hasOwn(parts, spec.id) ? parts[spec.id]!(reading) : null;
+  return value === null ? null : { id, label: spec.label, value };
+}
+
+function binOf(section: FormSection, answers: Answers, { binHz }: Reading): Taken[] {
+  const id = `${section.id}.bin`;
+  const spec = section.fields.find((field) => field.id === "bin");
+  if (!spec || binHz === undefined || (answers[id] ?? "").trim()) return [];
+  return [{ id, label: spec.label, value: text(binHz, 0)! }];
+}
+
+function rowFor(section: FormSection, answers: Answers, { prn }: Reading): number {
   const rows = rowsShown(section, answers);
   for (let row = 1; row <= rows; row++) if (answers[`${section.id}.${row}.prn`]?.trim() === String(prn)) return row;
   return rows;
