@@ -1,6 +1,7 @@
 import { expect, test } from "vitest";
 import { echoes, reflectionOf, type Line } from "@/lib/gnss/chain/echoes";
 import { echoTrace } from "@/lib/gnss/chain/echoTrace";
+import { readEchoTrace } from "@/lib/gnss/chain/readEchoTrace";
 import { seededRandom } from "@/lib/numeric/random";
 import { expectNear } from "@/tests/support/expectNear";
 
@@ -78,4 +79,35 @@ test("noise is the seed's alone", () => {
     echoTrace([], { points: 50, stepNs: 1, riseNs: 1 }, { sigma: 0.01, random: seededRandom("7".repeat(64), "trace") });
   expect(noisy()).toEqual(noisy());
   expect(Math.max(...noisy())).toBeGreaterThan(0);
+});
+
+test("a reading of the trace gives back each echo of a line with two faults and an open end", () => {
+  const line: Line = {
+    ...LINE,
+    lossDbPer100M: 8,
+    faults: [
+      { distanceM: 12, kind: "series", ohm: 15 },
+      { distanceM: 31, kind: "across", ohm: 200 },
+      { distanceM: 55, kind: "end", ohm: Infinity },
+    ],
+  };
+  const sent = echoes(line).filter(({ ghost }) => !ghost);
+  const noise = { sigma: 0.005, random: seededRandom("4".repeat(64), "trace") };
+  const trace = echoTrace(sent, { points: 1400, stepNs: 0.5, riseNs: 4 }, noise);
+  const read = readEchoTrace(trace, { stepNs: 0.5, window: 16, edge: 10, leastHeight: 0.01 });
+  expect(read).toHaveLength(3);
+  read.forEach(({ delayNs, height }, n) => {
+    expectNear(delayNs, sent[n].delayNs, 0.8, "time");
+    expectNear(height, sent[n].height, 0.02, "height");
+  });
+  expect(read.map(({ height }) => Math.sign(height))).toEqual([1, -1, 1]);
+});
+
+test("a trace of noise holds no echo, and a window that does not fit is refused", () => {
+  const noise = { sigma: 0.01, random: seededRandom("9".repeat(64), "trace") };
+  const reading = { stepNs: 0.5, window: 10, edge: 8, leastHeight: 0.01 };
+  expect(readEchoTrace(echoTrace([], { points: 4000, stepNs: 0.5, riseNs: 4 }, noise), reading)).toEqual([]);
+  expect(() => readEchoTrace(new Float64Array(100), { ...reading, window: 1 })).toThrow(RangeError);
+  expect(() => readEchoTrace(new Float64Array(100), { ...reading, edge: -1 })).toThrow(RangeError);
+  expect(() => readEchoTrace(new Float64Array(30), reading)).toThrow(RangeError);
 });
