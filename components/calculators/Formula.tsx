@@ -3,7 +3,8 @@ import { BlockMath } from "react-katex";
 import "katex/dist/katex.min.css";
 
 type FormulaProps = {
-  tex: string;
+  /** One formula a line: long ones do not fit a phone side by side. */
+  tex: string | readonly string[];
   /** Where it is published. */
   source: string;
   /** The same with the numbers put in, a line each. */
@@ -14,8 +15,7 @@ type FormulaProps = {
 export function Formula({ tex, source, worked = [] }: FormulaProps) {
   return (
     <figure className="working-out text-dense" tabIndex={0} aria-label="Formula">
-      <BlockMath math={tex} />
-      {worked.map((line, at) => (
+      {[tex, worked].flat().map((line, at) => (
         <BlockMath key={at} math={line} />
       ))}
       <figcaption className="text-label font-normal text-ink-2">{source}</figcaption>

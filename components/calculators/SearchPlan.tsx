@@ -18,7 +18,8 @@ export function SearchPlan({ values, onChange }: CalculatorProps<typeof SEARCH_P
   return (
     <CalculatorFrame
       busy={answer === null || answer.inputs !== values}
-      reading={<PlanReading answer={answer} />}
+      reading={<Detection answer={answer} />}
+      more={<PlanReadings answer={answer} />}
       fields={<CalculatorFields of={SEARCH_PLAN} values={values} onChange={onChange} />}
       working={
         <Formula
@@ -37,20 +38,25 @@ export function SearchPlan({ values, onChange }: CalculatorProps<typeof SEARCH_P
   );
 }
 
-function PlanReading({ answer }: { answer: PlanAnswer | null }) {
+function Detection({ answer }: { answer: PlanAnswer | null }) {
+  return (
+    <Reading
+      label="Detection probability"
+      value={answer ? 100 * answer.performance.detection : null}
+      decimals={1}
+      unit="%"
+      deciding
+    >
+      {answer &&
+        `at ${formatNumber(answer.inputs.cn0DbHz, 1)} dB-Hz, standard error ${formatNumber(100 * answer.performance.detectionStandardError, 2)} point`}
+    </Reading>
+  );
+}
+
+function PlanReadings({ answer }: { answer: PlanAnswer | null }) {
   const performance = answer?.performance;
   return (
     <>
-      <Reading
-        label="Detection probability"
-        value={performance ? 100 * performance.detection : null}
-        decimals={1}
-        unit="%"
-        deciding
-      >
-        {answer &&
-          `at ${formatNumber(answer.inputs.cn0DbHz, 1)} dB-Hz, standard error ${formatNumber(100 * answer.performance.detectionStandardError, 2)} point`}
-      </Reading>
       <Reading label="Time of the whole search" value={performance?.searchTimeS ?? null} decimals={3} unit="s" />
       <Reading label="Cells" value={performance?.cells ?? null} />
       <Reading label="Threshold" value={performance?.thresholdSigma2 ?? null} decimals={2} unit="sigma²">

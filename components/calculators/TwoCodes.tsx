@@ -31,14 +31,14 @@ export function TwoCodes({ values: inputs, onChange }: CalculatorProps<typeof TW
   return (
     <CalculatorFrame
       reading={
-        <>
-          <Reading label="Highest agreement" value={values[top]} decimals={decimals} unit="chip" deciding>
-            {level(values[top])} at lag {top} chip
-          </Reading>
-          <Reading label={`At lag ${lag} chip`} value={values[lag]} decimals={decimals} unit="chip">
-            {level(values[lag])}
-          </Reading>
-        </>
+        <Reading label="Highest agreement" value={values[top]} decimals={decimals} unit="chip" deciding>
+          {level(values[top])} at lag {top} chip
+        </Reading>
+      }
+      more={
+        <Reading label={`At lag ${lag} chip`} value={values[lag]} decimals={decimals} unit="chip">
+          {level(values[lag])}
+        </Reading>
       }
       fields={<CalculatorFields of={TWO_CODES} values={inputs} onChange={onChange} />}
       working={

@@ -1,6 +1,7 @@
 import type { ComponentType } from "react";
 import type { BenchCalculator, CalculatorTag } from "@/lib/calculators/calculators";
 import type { CalculatorProps } from "./calculatorProps";
+import { CableEcho } from "./CableEcho";
 import { SearchPlan } from "./SearchPlan";
 import { TwoCodes } from "./TwoCodes";
 
@@ -8,4 +9,5 @@ import { TwoCodes } from "./TwoCodes";
 export const BODIES: { [T in CalculatorTag]: ComponentType<CalculatorProps<Extract<BenchCalculator, { tag: T }>>> } = {
   TwoCodes,
   SearchPlan,
+  CableEcho,
 };

@@ -1,6 +1,7 @@
 import type { CalculatorTag } from "@/lib/calculators/calculators";
 import { caCode } from "@/lib/gnss/caCode";
 import { circularCorrelation } from "@/lib/gnss/correlation";
+import { exp } from "@/lib/numeric/elementary";
 import { erfc } from "@/lib/numeric/erfc";
 
 export type Small = { x: number[]; y: number[]; bars?: boolean };
@@ -15,6 +16,8 @@ const DRAWN: Record<CalculatorTag, () => Small> = {
     return over(range(0, 44, 44), (lag) => values[lag]);
   },
   SearchPlan: () => over(range(-3, 3, 32), (sigmas) => erfc(-sigmas) / 2),
+  // The loss of a run, and the echo that stands up from it.
+  CableEcho: () => over(range(0, 40, 40), (metres) => metres / 4 + 9 * exp(-((metres - 26) * (metres - 26)) / 2)),
 };
 
 const kept = new Map<CalculatorTag, Small>();

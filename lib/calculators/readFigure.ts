@@ -24,12 +24,12 @@ export function readFigure(bounds: Bounded, unit: Unit, text: string): ReadInput
 
 const withReason = (rule: string, { why }: Bounded) => (why ? `${rule} ${why}` : rule);
 
-/** "20.0 to 55.0 dB-Hz". */
+/** "20 to 55 dB-Hz". */
 export function rangeText(bounds: Bounded, unit: Unit): string {
   const name = formatUnit(unit);
   return `${unbroken(bounds, bounds.from)} to ${unbroken(bounds, bounds.to)}${name === "" ? "" : `\u00a0${name}`}`;
 }
 
-/** A line may not end at the thin space between thousands. */
+/** No more figures than the bound has; a line may not end at the thin space between thousands. */
 const unbroken = (bounds: Bounded, value: number) =>
-  shownFigure(bounds, value).replaceAll("\u2009", "\u2060\u2009\u2060");
+  shownFigure({ ...bounds, decimals: 0 }, value).replaceAll("\u2009", "\u2060\u2009\u2060");

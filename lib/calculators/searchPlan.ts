@@ -89,7 +89,7 @@ export const SEARCH_PLAN = {
       input: "number",
       key: "falseAlarmPerSearch",
       attribute: "falseAlarm",
-      label: "False alarms per search",
+      label: "False alarms",
       help: "false-alarm probability of one search",
       unit: "1",
       from: 1e-9,

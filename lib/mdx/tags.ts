@@ -111,7 +111,6 @@ export const LATER_TAGS: readonly string[] = [
   "ExpectedCn0",
   "PromptCn0",
   "ChainLevels",
-  "CableEcho",
   "EffectiveCn0",
   "StandOff",
   "MixProducts",
