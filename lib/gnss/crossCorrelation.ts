@@ -10,17 +10,23 @@ import type { Chips } from "./shiftRegister";
  * @param a chips, length N
  * @param b chips, length N
  * @param dopplerHz Doppler of a minus Doppler of b
- * @param coherentS a whole number of code periods, N / 1.023 MHz each
+ * @param coherentS a whole number of code periods, N / chip rate each
  * @returns length N, in chips, N for a full match; index is the lag k in chips
  */
-export function dopplerCorrelation(a: Chips, b: Chips, dopplerHz: number, coherentS: number): Float64Array {
+export function dopplerCorrelation(
+  a: Chips,
+  b: Chips,
+  dopplerHz: number,
+  coherentS: number,
+  chipRateHz = CA_CHIP_RATE_HZ,
+): Float64Array {
   const length = a.length;
   if (length < 2 || b.length !== length)
     throw new RangeError(`dopplerCorrelation: equal lengths from 2, got ${a.length}, ${b.length}`);
-  const periods = Math.round((coherentS * CA_CHIP_RATE_HZ) / length);
-  if (!(periods >= 1) || Math.abs((coherentS * CA_CHIP_RATE_HZ) / length - periods) > 1e-6)
+  const periods = Math.round((coherentS * chipRateHz) / length);
+  if (!(periods >= 1) || Math.abs((coherentS * chipRateHz) / length - periods) > 1e-6)
     throw new RangeError(`dopplerCorrelation: whole code periods from 1, got ${coherentS} s`);
-  const turnsPerChip = dopplerHz / CA_CHIP_RATE_HZ;
+  const turnsPerChip = dopplerHz / chipRateHz;
   const scale = periodFactor(turnsPerChip * length, periods);
   return Float64Array.from(onePeriod(a, b, turnsPerChip), (magnitude) => magnitude * scale);
 }

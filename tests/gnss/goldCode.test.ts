@@ -1,7 +1,7 @@
 import { createHash } from "node:crypto";
 import { describe, expect, test } from "vitest";
 import { circularCorrelation } from "@/lib/gnss/correlation";
-import { goldCode } from "@/lib/gnss/goldCode";
+import { goldBound, goldCode } from "@/lib/gnss/goldCode";
 import { chipsOf, registerSequence, type Chips } from "@/lib/gnss/shiftRegister";
 import reference from "@/tests/reference/gold-families.json";
 
@@ -50,6 +50,8 @@ describe.each(families)("pair $pair_octal of length $N", (family) => {
     ).toEqual([-t, -1, t - 2]);
   });
 
+  test("the bound is the published one", () => expect(goldBound(family.n)).toBe(family["t(n)"]));
+
   test("so does the rest of the family", () => {
     const t = family["t(n)"];
     const [one, other] = [goldCode(first, second, 1), goldCode(first, second, Math.floor(family.N / 2))];
@@ -75,3 +77,7 @@ test("refuses polynomials without both end terms, unequal lengths and shifts out
   expect(() => goldCode(0o45, 0o103, 0)).toThrow(RangeError);
   for (const shift of [-1, 31, 0.5]) expect(() => goldCode(0o45, 0o75, shift)).toThrow(RangeError);
 });
+
+test.each([2, 4, 8, 31, 5.5, NaN])("there is no bound for %d stages", (stages) =>
+  expect(() => goldBound(stages)).toThrow(RangeError),
+);
