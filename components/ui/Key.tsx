@@ -1,4 +1,5 @@
 import { useId, type ButtonHTMLAttributes, type ReactNode } from "react";
+import { classNames } from "./classNames";
 import { keyClass, type KeyLook } from "./keyClass";
 
 export type KeyProps = Omit<ButtonHTMLAttributes<HTMLButtonElement>, "disabled"> &
@@ -38,13 +39,16 @@ export function Key({
       {children}
     </button>
   );
-  if (!reason) return key;
+  // A key that may have a reason stays in one place of the tree, so that a press is not lost when the reason goes.
+  if (reason === undefined) return key;
   return (
-    <span className="inline-flex flex-wrap items-center gap-x-3 gap-y-1">
+    <span className={classNames(wide ? "flex" : "inline-flex", "flex-wrap items-center gap-x-3 gap-y-1")}>
       {key}
-      <span id={reasonId} className="key-reason">
-        {reason}
-      </span>
+      {reason && (
+        <span id={reasonId} className="key-reason">
+          {reason}
+        </span>
+      )}
     </span>
   );
 }

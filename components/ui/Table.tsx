@@ -13,11 +13,14 @@ type TableProps = {
   className?: string;
 };
 
-/** Words left, figures right, unit in the head or the cell but never in both. Scrolls in its own region when it must. */
+/**
+ * Words left, figures right, unit in the head or the cell but never in both. Scrolls in its own region when it must.
+ * Roles are written out: a table that reflows is no table to a browser that goes by how it is drawn.
+ */
 export function Table({ caption, showCaption, fixedFirst, reflow, children, className }: TableProps) {
   return (
     <ScrollRegion label={caption} fixedFirst={fixedFirst} className={className}>
-      <table className="table" data-reflow={reflow || undefined}>
+      <table role="table" className="table" data-reflow={reflow || undefined}>
         <caption className={showCaption ? "pb-2 text-left text-label" : "sr-only"}>{caption}</caption>
         {children}
       </table>
@@ -39,7 +42,12 @@ export function Th({
 }) {
   const order = sort?.order === "up" ? "ascending" : sort?.order === "down" ? "descending" : "none";
   return (
-    <th scope="col" className={classNames(figure && "figure", className)} aria-sort={sort ? order : undefined}>
+    <th
+      scope="col"
+      role="columnheader"
+      className={classNames(figure && "figure", className)}
+      aria-sort={sort ? order : undefined}
+    >
       {sort ? (
         <Link
           href={sort.href}
@@ -68,7 +76,7 @@ export function Tr({
   children: ReactNode;
 }) {
   return (
-    <tr data-wash={wash ?? undefined} data-joined={joined || undefined}>
+    <tr role="row" data-wash={wash ?? undefined} data-joined={joined || undefined}>
       {children}
     </tr>
   );
@@ -77,7 +85,7 @@ export function Tr({
 /** First cell of a row, which names it. */
 export function RowHead({ children, className }: { children: ReactNode; className?: string }) {
   return (
-    <th scope="row" className={className}>
+    <th scope="row" role="rowheader" className={className}>
       {children}
     </th>
   );
@@ -98,7 +106,7 @@ export function Td({
   className?: string;
 }) {
   return (
-    <td colSpan={colSpan} data-label={label} className={classNames(figure && "figure", className)}>
+    <td role="cell" colSpan={colSpan} data-label={label} className={classNames(figure && "figure", className)}>
       {children}
     </td>
   );

@@ -94,6 +94,8 @@ export function useDraft(options: Options) {
     (text: string) => {
       state.current.source = text;
       setSource(text);
+      const now = text === state.current.stored ? "saved" : "saving";
+      setSaved((before) => (before.state === now ? before : { ...before, state: now }));
       clearTimeout(timers.current.save);
       clearTimeout(timers.current.check);
       timers.current.save = setTimeout(() => void saveRef.current(), SAVE_MS);
