@@ -1,5 +1,5 @@
-import { createFft } from "@/lib/numeric/fft";
 import { codeHarmonics } from "./codeHarmonics";
+import { codeWave } from "./codeWave";
 import { CA_LENGTH_CHIPS } from "./constants";
 
 /** Points of one code period in the table, 32 per chip. */
@@ -22,21 +22,7 @@ export function bandLimitedCode(prn: number, highestLine: number): Float64Array 
   const key = `${prn}/${highestLine}`;
   const known = made.get(key);
   if (known) return known;
-  const harmonics = codeHarmonics(prn, highestLine);
-  const lines = new Float64Array(2 * CODE_TABLE_POINTS);
-  let power = harmonics[0] * harmonics[0];
-  for (let k = 1; k <= highestLine; k++)
-    power += 2 * (harmonics[2 * k] * harmonics[2 * k] + harmonics[2 * k + 1] * harmonics[2 * k + 1]);
-  const scale = 1 / Math.sqrt(power);
-  // The code is real: the conjugates of twice the positive lines, transformed forwards, have it as their real part.
-  for (let k = 0; k <= highestLine; k++) {
-    const weight = k === 0 ? scale : 2 * scale;
-    lines[2 * k] = weight * harmonics[2 * k];
-    lines[2 * k + 1] = -weight * harmonics[2 * k + 1];
-  }
-  const wave = new Float64Array(2 * CODE_TABLE_POINTS);
-  createFft(CODE_TABLE_POINTS).transform(wave, lines);
-  const table = Float64Array.from({ length: CODE_TABLE_POINTS + 1 }, (_, n) => wave[2 * (n % CODE_TABLE_POINTS)]);
+  const table = codeWave(codeHarmonics(prn, highestLine), highestLine, CODE_TABLE_POINTS);
   if (made.size >= 64) made.clear(); // 256 kB each
   made.set(key, table);
   return table;

@@ -46,5 +46,18 @@ export function takeOffSawtooth(series: TimeErrorSeries, saidNs: Float64Array, s
   return { ...series, valuesNs: series.valuesNs.map((value, n) => value - sign * saidNs[n]) };
 }
 
+/**
+ * The sign with which the stated values take the sawtooth off: the one that leaves the smaller robust deviation from reading to reading,
+ * in which slow changes do not count. Where a receiver's own word on it is at hand, that wins.
+ */
+export function likelySawtoothSign(series: TimeErrorSeries, saidNs: Float64Array): 1 | -1 {
+  const roughness = (sign: 1 | -1) => {
+    const { valuesNs } = takeOffSawtooth(series, saidNs, sign);
+    const steps = valuesNs.subarray(1).map((value, n) => value - valuesNs[n]);
+    return robustDeviation(steps.filter((step) => !Number.isNaN(step)));
+  };
+  return roughness(1) <= roughness(-1) ? 1 : -1;
+}
+
 /** Standard deviation in ns of a sawtooth that fills a clock period evenly, period/sqrt(12); textbook. */
 export const sawtoothDeviationNs = (clockHz: number): number => 1e9 / clockHz / Math.sqrt(12);

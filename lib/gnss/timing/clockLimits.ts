@@ -50,8 +50,18 @@ export function holdoverLimitNs(holdoverS: number, learningDays: number): number
   return 30 + (70 * holdoverS) / lastS;
 }
 
-/** Corners of the MTIE mask of the network limit at reference point C, [s, ns]. ITU-T G.8271.1. */
-export const NETWORK_LIMIT_MTIE: ReadonlyArray<readonly [number, number]> = [
-  [2.4, 280],
-  [275, 580],
-];
+/**
+ * Corners of the MTIE masks for the network limit at reference point C and its enhanced form, [s, ns]. ITU-T G.8271.1, read in a public
+ * copy of the figures; what runs between the corners stands in the recommendation and is not given here.
+ */
+export const NETWORK_LIMIT_MTIE: Readonly<Record<"plain" | "enhanced", ReadonlyArray<readonly [number, number]>>> = {
+  plain: [
+    [2.4, 280],
+    [275, 580],
+  ],
+  enhanced: [
+    [2.4, 60.67],
+    [20.2, 100.72],
+    [211.11, 200],
+  ],
+};

@@ -1,4 +1,4 @@
-import { createFft } from "@/lib/numeric/fft";
+import { codeWave } from "../codeWave";
 import { lineSpacingHz, type SearchSignal } from "../search/searchSignal";
 import { signalLines } from "../signalLines";
 
@@ -25,20 +25,7 @@ export function replicaTable(signal: SearchSignal, prn: number, halfBandHz: numb
   if (points > LARGEST_TABLE) throw new RangeError(`replicaTable: code of at most 32768 chips, got ${lengthChips}`);
   const highest = Math.min(points / 2 - 1, Math.floor(halfBandHz / lineSpacingHz(signal)));
   if (!(highest >= 1)) throw new RangeError(`replicaTable: a band that holds a line of the code, got ${halfBandHz} Hz`);
-  const harmonics = signalLines(signal.chips(prn), halvesPerChip, highest);
-  // The code is real: the conjugates of twice the positive lines, transformed forwards, have it as their real part.
-  const lines = new Float64Array(2 * points);
-  let power = 0;
-  for (let k = 0; k <= highest; k++) {
-    const weight = k === 0 ? 1 : 2;
-    lines[2 * k] = weight * harmonics[2 * k];
-    lines[2 * k + 1] = -weight * harmonics[2 * k + 1];
-    power += weight * (harmonics[2 * k] * harmonics[2 * k] + harmonics[2 * k + 1] * harmonics[2 * k + 1]);
-  }
-  const wave = new Float64Array(2 * points);
-  createFft(points).transform(wave, lines);
-  const scale = 1 / Math.sqrt(power);
-  const values = Float64Array.from({ length: points + 1 }, (_, n) => scale * wave[2 * (n % points)]);
+  const values = codeWave(signalLines(signal.chips(prn), halvesPerChip, highest), highest, points);
   return { values, pointsPerChip: points / lengthChips, lengthChips };
 }
 

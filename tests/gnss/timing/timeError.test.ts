@@ -6,10 +6,18 @@ import {
   tdevLimitNs,
   type ClockClass,
 } from "@/lib/gnss/timing/clockLimits";
-import { findOutliers, leaveOut, sawtoothDeviationNs, takeOffSawtooth } from "@/lib/gnss/timing/cleanTimeError";
+import {
+  findOutliers,
+  leaveOut,
+  likelySawtoothSign,
+  sawtoothDeviationNs,
+  takeOffSawtooth,
+} from "@/lib/gnss/timing/cleanTimeError";
 import { allanDeviation, modifiedAllanDeviation, timeDeviationNs, usualIntervals } from "@/lib/gnss/timing/deviations";
 import { largestStep } from "@/lib/gnss/timing/largestStep";
+import { maskMargin } from "@/lib/gnss/timing/maskMargin";
 import { mtieNs } from "@/lib/gnss/timing/mtie";
+import { seriesOfLog } from "@/lib/gnss/timing/seriesOfLog";
 import { summarizeTimeError, type TimeErrorSeries } from "@/lib/gnss/timing/timeError";
 import { seededRandom } from "@/lib/numeric/random";
 import { formulaCases } from "@/tests/reference/formulaCases";
@@ -151,5 +159,45 @@ describe("a log", () => {
     expectNear(deviation(takeOffSawtooth(seen, saw, 1)), 0, 1e-9, "right sign");
     expectNear(deviation(takeOffSawtooth(seen, saw, -1)), 2 * sawtoothDeviationNs(50e6), 0.02, "wrong sign");
     expect(() => takeOffSawtooth(seen, new Float64Array(3), 1)).toThrow(RangeError);
+    const opposite = series(Array.from(saw, (value, n) => 5 + 0.01 * n - value));
+    expect([likelySawtoothSign(seen, saw), likelySawtoothSign(opposite, saw)]).toEqual([1, -1]);
+  });
+
+  test("becomes a series at even intervals, holes and all", () => {
+    const kept = [0, 10.2, 20, 50, 59.9, 70].map((timeS, n) => ({ timeS, ns: n }));
+    expectNear(seriesOfLog(kept).intervalS, 10.1, 1e-9, "interval");
+    const even = seriesOfLog([0, 10, 20, 50, 60, 70].map((timeS, n) => ({ timeS: 1000 + timeS, ns: n })));
+    expect(even).toEqual({ intervalS: 10, valuesNs: Float64Array.from([0, 1, 2, NaN, NaN, 3, 4, 5]) });
+    expect(() => seriesOfLog([kept[0]])).toThrow(RangeError);
+    expect(() => seriesOfLog([kept[1], kept[0]])).toThrow(/reading 2/);
+    expect(() => seriesOfLog([...kept, { timeS: 1e9, ns: 0 }])).toThrow(RangeError);
+  });
+});
+
+describe("a curve against its mask", () => {
+  // PRTC-B: 40 ns from 54.5 s on, ITU-T G.8272.
+  const limit = (tauS: number) => mtieLimitNs("PRTC-B", tauS);
+
+  test("is judged by the point that comes nearest", () => {
+    const near = maskMargin(
+      [
+        { tauS: 1, ns: 20 },
+        { tauS: 100, ns: 39 },
+        { tauS: 1000, ns: NaN },
+      ],
+      limit,
+    )!;
+    expect(near).toMatchObject({ within: true, tauS: 100, ns: 39, limitNs: 40 });
+    expectNear(near.margin, 1 / 39, 1e-12, "margin");
+    expect(
+      maskMargin(
+        [
+          { tauS: 1, ns: 26 },
+          { tauS: 100, ns: 30 },
+        ],
+        limit,
+      ),
+    ).toMatchObject({ within: false, tauS: 1 });
+    expect(maskMargin([{ tauS: 1, ns: NaN }], limit)).toBeNull();
   });
 });
