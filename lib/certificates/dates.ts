@@ -27,13 +27,18 @@ export function dayInWords(day: string): string {
 export const instantInWords = (instant: string): string =>
   `${dayInWords(instant.slice(0, 10))}, ${instant.slice(11, 19)} UTC`;
 
-/** "14 March 2026, 11:22:51 UTC+01:00": the same instant on a clock of that zone. */
+/** "14 March 2026, 11:22:51": an instant as a clock of that zone shows it. */
 export function instantInZone(instant: string, timeZone: string): string {
   const at = new Date(instant);
   const clock = new Intl.DateTimeFormat("en-GB", { timeZone, timeStyle: "medium", hourCycle: "h23" }).format(at);
-  const parts = new Intl.DateTimeFormat("en-GB", { timeZone, timeZoneName: "longOffset" }).formatToParts(at);
-  const offset = parts.find(({ type }) => type === "timeZoneName")?.value.replace("GMT", "UTC");
-  return `${dayInWords(dayIn(timeZone, at))}, ${clock} ${offset}`;
+  return `${dayInWords(dayIn(timeZone, at))}, ${clock}`;
+}
+
+/** "UTC+01:00": how far that zone's clock is ahead at an instant. */
+export function offsetInZone(instant: string, timeZone: string): string {
+  const format = new Intl.DateTimeFormat("en-GB", { timeZone, timeZoneName: "longOffset" });
+  const name = format.formatToParts(new Date(instant)).find(({ type }) => type === "timeZoneName")!.value;
+  return name.replace("GMT", "UTC");
 }
 
 function instantText(text: string): string | null {

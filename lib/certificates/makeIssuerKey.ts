@@ -100,9 +100,9 @@ function distinguishedName(
   return new RelativeDistinguishedNames({ schema: result });
 }
 
-/** RFC 5280, 4.1.2.5: two figures for the year until 2049, four from 2050. */
+/** RFC 5280, 4.1.2.5: two figures for the year until 2049, four from 2050; whole seconds, which readers insist on. */
 function time(from: Date, years: number): Time {
-  const value = new Date(from.getTime());
+  const value = new Date(1000 * Math.floor(from.getTime() / 1000));
   value.setUTCFullYear(from.getUTCFullYear() + years);
   return new Time({ type: value.getUTCFullYear() < 2050 ? TimeType.UTCTime : TimeType.GeneralizedTime, value });
 }

@@ -44,8 +44,8 @@ describe("what the page says", () => {
       "SBW-R2, 3.1",
       "A decider, outside the candidate's line, 14 March 2026",
       // The time zone database: London keeps summer time, UTC+1, in July.
-      "2 July 2026, 00:30:05 UTC+01:00",
-      "Europe/London",
+      "2 July 2026, 00:30:05",
+      "Europe/London, UTC+01:00",
       "lagmark.example",
       "none was compared",
       "Standing can change on any later day",

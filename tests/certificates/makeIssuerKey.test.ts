@@ -1,6 +1,8 @@
+import { execFileSync } from "node:child_process";
 import { createPrivateKey, X509Certificate } from "node:crypto";
 import { beforeAll, describe, expect, test } from "vitest";
 import { makeIssuerKey, type IssuerKeyFiles } from "@/lib/certificates/makeIssuerKey";
+import { PdfTools } from "./pdfTools";
 
 const from = new Date("2026-01-01T00:00:00.000Z");
 let files: IssuerKeyFiles;
@@ -60,4 +62,20 @@ test("no two are alike", async () => {
   const again = await makeIssuerKey({ organisation: "Saltmarsh Register", country: "GB", demonstration: false, from });
   expect(again.keyPem).not.toBe(files.keyPem);
   expect(new X509Certificate(again.certificatePem).verify(root.publicKey)).toBe(false);
+});
+
+// RFC 5280, 4.1.2.5.2: a time from 2050 on has no fraction of a second; such a root is no root to a reader that obeys it.
+test("made in the middle of a second, the certificates are good to independent readers all the same", async () => {
+  const at = new Date("2026-12-01T16:06:25.194Z");
+  const made = await makeIssuerKey({ organisation: "Lagmark", demonstration: true, from: at });
+  const tools = new PdfTools();
+  try {
+    const [root, issuer] = [tools.file("r.pem", made.rootPem), tools.file("i.pem", made.certificatePem)];
+    const attime = String(Date.parse("2027-01-01T00:00:00Z") / 1000);
+    const said = execFileSync("openssl", ["verify", "-attime", attime, "-CAfile", root, issuer], { encoding: "utf8" });
+    expect(said).toContain(": OK");
+    expect(new X509Certificate(made.rootPem).validTo).toBe("Dec  1 16:06:25 2051 GMT");
+  } finally {
+    tools.remove();
+  }
 });

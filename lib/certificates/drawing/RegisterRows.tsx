@@ -15,15 +15,15 @@ export function RegisterRows({ entry, density }: { entry: RegisterEntry; density
   const { issuer, release, decided } = entry;
   const issuerStanding = issuer.accreditation ? `${issuer.standing}, ${issuer.accreditation}` : issuer.standing;
   const facts = [
-    { label: "Effective", value: dayInWords(entry.effectiveOn), note: `Days in ${issuer.timeZone}`, share: 0.9 },
-    { label: "Last day", value: dayInWords(entry.lastDay), note: "That day included", share: 0.9 },
+    { label: "Effective", value: dayInWords(entry.effectiveOn), note: `Days in ${issuer.timeZone}`, share: 1.05 },
+    { label: "Last day", value: dayInWords(entry.lastDay), note: "That day included", share: 1.05 },
     {
       label: `${STORED.has(entry.standing) ? entry.standing : "Entered"} since`,
       value: dayInWords(entry.standingSince.slice(0, 10)),
       note: `${entry.standingSince.slice(11, 19)} UTC`,
-      share: 0.9,
+      share: 1.05,
     },
-    { label: "Issuer", value: issuer.name, note: issuerStanding, share: 1.6 },
+    { label: "Issuer", value: issuer.name, note: issuerStanding, share: 1.4 },
   ];
   const line = decided.outsideLine ? "outside the candidate's line" : "inside the candidate's line";
   const print = shortFingerprint(release.fingerprint);
@@ -35,7 +35,7 @@ export function RegisterRows({ entry, density }: { entry: RegisterEntry; density
         <RowPair
           rows={[
             ["Release", `${release.code}, ${release.number} (${print})`],
-            ["Decided by", `A decider, ${line}, ${dayInWords(decided.at.slice(0, 10))}`],
+            ["Decided by", `A decider, ${line}, ${unbroken(dayInWords(decided.at.slice(0, 10)))}`],
           ]}
           density={density}
         />
@@ -43,3 +43,6 @@ export function RegisterRows({ entry, density }: { entry: RegisterEntry; density
     </View>
   );
 }
+
+/** A day stays on one line. */
+const unbroken = (day: string) => day.replaceAll(" ", "\u00a0");

@@ -23,7 +23,9 @@ export function StandingHead({ entry, density }: { entry: RegisterEntry; density
       </Text>
       <View style={{ flexDirection: "row", alignItems: "baseline", gap: 4, marginTop: density.gap }}>
         <Text style={{ fontSize: density.text + 2 }}>Certificate</Text>
-        <Text style={{ fontFamily: CODE_FACE, fontWeight: 600, fontSize: density.text + 2 }}>{entry.number}</Text>
+        <Text style={{ fontFamily: CODE_FACE, fontWeight: 600, fontSize: density.text + 2, marginTop: -2 }}>
+          {entry.number}
+        </Text>
         <Text style={{ fontSize: density.text + 2 }}>of</Text>
       </View>
       <Text style={{ fontSize: density.title, fontWeight: 700, lineHeight: 1.25 }}>{entry.holder}</Text>

@@ -1,4 +1,4 @@
-import { instantInZone } from "../dates";
+import { instantInZone, offsetInZone } from "../dates";
 import type { VerificationFacts } from "../verificationFacts";
 import type { Density } from "./page";
 import { Panel } from "./Panel";
@@ -15,7 +15,7 @@ export function VerificationPanel({ facts, density }: { facts: VerificationFacts
           title: "Verified",
           rows: [
             ["At", instantInZone(entry.readAt, issuer.timeZone)],
-            ["Time zone", issuer.timeZone],
+            ["Time zone", `${issuer.timeZone}, ${offsetInZone(entry.readAt, issuer.timeZone)}`],
             ["Register", origin.replace(/^https?:\/\//, "")],
             ["File", fileInWords(file)],
           ],
