@@ -35,6 +35,13 @@ test("a certificate's job is told under its decision", async () => {
   expect(await rowsOf("progress")).toMatchObject([{ subject_id: decisionId, job: "issue-certificate" }]);
 });
 
+test("the page that waits for the record of a verification is told under the record's id", async () => {
+  const verificationId = randomUUID();
+  await failed("sign-verification", "now()", { verificationId });
+  await reportFaults();
+  expect(await rowsOf("progress")).toMatchObject([{ subject_id: verificationId, job: "sign-verification" }]);
+});
+
 test("a mail that cannot be sent has nobody waiting", async () => {
   await failed("send-mail", "now()", { mailId: randomUUID() });
   await reportFaults();
