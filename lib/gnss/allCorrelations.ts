@@ -15,7 +15,7 @@ const LAST_BIT_IS_ONE = 6_755_399_441_055_744; // 1.5 * 2^52
  * One transform serves up to eight pairs. Two codes i stand as the real and the imaginary part of one signal; some codes j,
  * weighted by 1, B, B^2 ..., are summed up in the other. The correlation of the two then holds those of all the pairs as
  * digits to the base B, which is large enough for every value from -N to N. Adding a large constant brings the digits
- * into fixed bits of the number, where they are read off; a rounding that is not clear throws. The pair (j, i) is the pair
+ * into known bits of the number, where they are read off; a rounding that is not clear throws. The pair (j, i) is the pair
  * (i, j) with its lags reversed.
  * How a length of 1023 gets along with transforms of powers of two: see `exactCorrelation`.
  * @param codes M codes, M >= 1, +1 or -1, all of length N, 2 to 16,383
@@ -45,7 +45,7 @@ export function allCorrelations(
     for (let even = 0; even < first + block.length; even += 2) {
       timesConjugate(product, pairs[even / 2], spectrum);
       fft.transform(lags, product);
-      intoFixedBits(lags, length, bits, digits);
+      placeDigits(lags, length, bits, digits);
       for (let i = even; i < Math.min(even + 2, count); i++)
         for (let j = Math.max(i, first); j < first + block.length; j++) {
           readDigit(
@@ -94,7 +94,7 @@ function blockSpectrum(block: readonly Chips[], base: number, size: number): Flo
  * Adds to every lag a constant that makes its last bit count 1, and half the base to every digit, so that none is
  * negative: the digits now lie in the low bits of the number.
  */
-function intoFixedBits(lags: Float64Array, length: number, bits: number, digits: number): void {
+function placeDigits(lags: Float64Array, length: number, bits: number, digits: number): void {
   let constant = LAST_BIT_IS_ONE;
   let weight = 1 << (bits - 1);
   for (let digit = 0; digit < digits; digit++) {

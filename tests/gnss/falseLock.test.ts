@@ -97,5 +97,5 @@ test("a window that holds no whole kHz from the parent holds no false peak", () 
 
 test("refuses broken milliseconds and unknown satellites", () => {
   expect(() => falsePeaks({ ...question, coherentMs: 0.5 })).toThrow(RangeError);
-  expect(() => falsePeaks({ ...question, victimPrn: 40 })).toThrow(RangeError);
+  expect(() => falsePeaks({ ...question, victimPrn: 64 })).toThrow(RangeError);
 });
