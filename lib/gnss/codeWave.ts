@@ -1,8 +1,8 @@
 import { createFft } from "@/lib/numeric/fft";
 
 /**
- * One period of a real code from the lines of its Fourier series, those beyond `highest` left out: the code behind an ideal low-pass
- * filter, scaled to power 1.
+ * One period of a real code from the lines of its Fourier series, those beyond `highest` left out: the code behind an
+ * ideal low-pass filter, scaled to power 1.
  * @param lines complex C[0] to C[highest], real and imaginary parts alternating; C[-k] is the conjugate of C[k]
  * @param points of the period, a power of two above 2 * highest
  * @returns points + 1 values, the last equal to the first, for linear interpolation

@@ -11,8 +11,8 @@ export type SerialSearch = {
 };
 
 /**
- * Mean time in s until the right cell is found: [2 + (2 - Pd)(q - 1)(1 + K Pfa)]/(2 Pd) dwells. Holmes & Chen, "Acquisition time
- * performance of PN spread-spectrum systems" (1977; from memory).
+ * Mean time in s until the right cell is found: [2 + (2 - Pd)(q - 1)(1 + K Pfa)]/(2 Pd) dwells. Holmes & Chen,
+ * "Acquisition time performance of PN spread-spectrum systems" (1977; from memory).
  */
 export function meanAcquisitionTimeS({ cells, detection, falseAlarm, dwellS, penaltyDwells }: SerialSearch): number {
   if (!(cells >= 1 && detection > 0 && detection <= 1 && falseAlarm >= 0 && falseAlarm <= 1))

@@ -1,4 +1,7 @@
-/** Mean of a list; a second sum over what is left of the first mean takes its rounding away. @throws RangeError when it is empty */
+/**
+ * Mean of a list; a second sum over what is left of the first mean takes its rounding away.
+ * @throws RangeError when it is empty
+ */
 export function mean(values: ArrayLike<number>): number {
   if (values.length === 0) throw new RangeError("mean: at least one value");
   let sum = 0;
@@ -18,7 +21,10 @@ export function standardDeviation(values: ArrayLike<number>): number {
   return Math.sqrt(squares / (values.length - 1));
 }
 
-/** Middle of the sorted values, the mean of the two middle ones for an even number. @throws RangeError when it is empty */
+/**
+ * Middle of the sorted values, the mean of the two middle ones for an even number.
+ * @throws RangeError when it is empty
+ */
 export function median(values: ArrayLike<number>): number {
   if (values.length === 0) throw new RangeError("median: at least one value");
   const sorted = Float64Array.from(values).sort();
@@ -27,8 +33,8 @@ export function median(values: ArrayLike<number>): number {
 }
 
 /**
- * Spread that outliers do not move: median distance from the median, times 1.4826 so that it is the standard deviation of a
- * normal law. Hampel, "The influence curve and its role in robust estimation" (1974).
+ * Spread that outliers do not move: median distance from the median, times 1.4826 so that it is the standard deviation
+ * of a normal law. Hampel, "The influence curve and its role in robust estimation" (1974).
  */
 export function robustDeviation(values: ArrayLike<number>): number {
   const middle = median(values);

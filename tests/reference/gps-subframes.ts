@@ -1,7 +1,7 @@
 /*
- * Subframes broadcast by GPS satellites, 300 bits each as hexadecimal digits, four zero bits at the end, as published in the
- * test data of an open-source orbit library (Apache licence), with what they say: time of week of the hand-over word, subframe
- * number, week number in ten bits.
+ * Subframes broadcast by GPS satellites, 300 bits each as hexadecimal digits, four zero bits at the end, as published
+ * in the test data of an open-source orbit library (Apache licence), with what they say: time of week of the hand-over
+ * word, subframe number, week number in ten bits.
  */
 export const GPS_SUBFRAMES = [
   {
@@ -37,8 +37,8 @@ export const GPS_SUBFRAMES = [
 ] as const;
 
 /**
- * The bits as they were sent. The digits give the data bits upright, with the parity as received; a satellite sends the 24 data
- * bits of a word turned over when the last bit of the word before is 1 (IS-GPS-200, 20.3.5.2).
+ * The bits as they were sent. The digits give the data bits upright, with the parity as received; a satellite sends the
+ * 24 data bits of a word turned over when the last bit of the word before is 1 (IS-GPS-200, 20.3.5.2).
  */
 export function sentBits(hex: string): number[] {
   const bits = [...hex].flatMap((digit) => [8, 4, 2, 1].map((weight) => (Number.parseInt(digit, 16) & weight ? 1 : 0)));

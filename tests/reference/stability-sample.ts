@@ -1,7 +1,7 @@
 /*
- * Riley, "Handbook of Frequency Stability Analysis", NIST Special Publication 1065 (2008), 12.4: the 1000-point frequency data
- * set and the deviations printed for it (tau in units of the interval). Figures from memory; the data follow from the printed
- * recipe alone, n' = 16807 n mod 2147483647 from n = 1234567890, divided by 2147483647.
+ * Riley, "Handbook of Frequency Stability Analysis", NIST Special Publication 1065 (2008), 12.4: the 1000-point
+ * frequency data set and the deviations printed for it (tau in units of the interval). Figures from memory; the data
+ * follow from the printed recipe alone, n' = 16807 n mod 2147483647 from n = 1234567890, divided by 2147483647.
  */
 export function stabilitySampleFrequencies(): number[] {
   const values: number[] = [];

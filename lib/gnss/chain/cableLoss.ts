@@ -9,8 +9,8 @@ const DATA_SHEET_C = 20;
 
 /**
  * The two terms of a cable's loss from data-sheet points: skin effect grows with the root of the frequency, dielectric
- * loss with the frequency itself (textbook). One point is taken as skin effect alone; more are fitted by least squares of
- * the relative errors.
+ * loss with the frequency itself (textbook). One point is taken as skin effect alone; more are fitted by least squares
+ * of the relative errors.
  */
 export function fitCableLoss(points: readonly LossPoint[]): CableLoss {
   if (points.length === 0) throw new RangeError("fitCableLoss: at least one point of the data sheet");

@@ -28,7 +28,10 @@ export type ChainLevel = {
   cn0DbHz: number;
   /** null when there is no strong signal. */
   strongDbm: number | null;
-  /** From the strong signal up to the part's compression level; below 0 it is overdriven. Infinity when nothing compresses. */
+  /**
+   * From the strong signal up to the part's compression level; below 0 it is overdriven. Infinity when nothing
+   * compresses.
+   */
   headroomDb: number;
   /** Gain that the strong signal costs in this part. */
   compressionDb: number;
@@ -36,8 +39,8 @@ export type ChainLevel = {
 
 /**
  * Levels along a chain, antenna first: gain and noise figure by Friis (`cascade`), signal, noise density and C/N0 of a
- * satellite, and a strong neighbour's level against each part's compression point. What compresses the strong signal takes
- * the same gain from the weak one beside it; the noise of the parts behind then weighs more, which C/N0 shows.
+ * satellite, and a strong neighbour's level against each part's compression point. What compresses the strong signal
+ * takes the same gain from the weak one beside it; the noise of the parts behind then weighs more, which C/N0 shows.
  * @param parts from the antenna's terminals on, at least one
  */
 export function chainLevels(parts: readonly ChainPart[], input: ChainInput): ChainLevel[] {
@@ -69,9 +72,9 @@ export function chainLevels(parts: readonly ChainPart[], input: ChainInput): Cha
 }
 
 /**
- * Gain lost in dB by an amplifier whose output, were it straight, would stand `headroomDb` below its 1 dB compression level:
- * 10 log10(1 + (10^0.1 - 1) 10^(-headroom/10)). Exactly 1 dB at the level itself and a firm ceiling far above; the curve
- * between is common practice, no source, and a data sheet's own curve wins.
+ * Gain lost in dB by an amplifier whose output, were it straight, would stand `headroomDb` below its 1 dB compression
+ * level: 10 log10(1 + (10^0.1 - 1) 10^(-headroom/10)). Exactly 1 dB at the level itself and a firm ceiling far above;
+ * the curve between is common practice, no source, and a data sheet's own curve wins.
  */
 export function compressionOfHeadroomDb(headroomDb: number): number {
   if (headroomDb === Infinity) return 0;

@@ -1,7 +1,10 @@
 import { pow10 } from "@/lib/numeric/elementary";
 import { delayNsPerM } from "./cableDelay";
 
-/** What stands at one place of a line: a resistance across it (a crushed or wet place), one in series (a bad joint), its end. */
+/**
+ * What stands at one place of a line: a resistance across it (a crushed or wet place), one in series (a bad joint), its
+ * end.
+ */
 export type LineFault = { distanceM: number; kind: "across" | "series" | "end"; ohm: number };
 
 /** A line as the reflectometer sees it. */

@@ -16,8 +16,9 @@ export type EchoReading = {
 };
 
 /**
- * Echoes in a reflectometer's trace: places where the mean of the points behind differs most from the mean of those before, above six
- * times what noise alone makes; the height is then read with the edge itself left out. Two echoes closer than edge and window are one.
+ * Echoes in a reflectometer's trace: places where the mean of the points behind differs most from the mean of those
+ * before, above six times what noise alone makes; the height is then read with the edge itself left out. Two echoes
+ * closer than edge and window are one.
  * @param trace as of `echoTrace`: share of the sent step, first point at 0 ns
  * @returns earliest first; `ghost` cannot be told from a trace and is false
  */
@@ -45,7 +46,10 @@ export function readEchoTrace(trace: ArrayLike<number>, reading: EchoReading): E
   return found;
 }
 
-/** Mean of `window` points from `gap` beyond n on, less the mean of as many before n; the trace goes on flat beyond its ends. */
+/**
+ * Mean of `window` points from `gap` beyond n on, less the mean of as many before n; the trace goes on flat beyond its
+ * ends.
+ */
 function createRise(trace: ArrayLike<number>, window: number): (n: number, gap: number) => number {
   const sums = new Float64Array(trace.length + 1);
   for (let n = 0; n < trace.length; n++) sums[n + 1] = sums[n] + trace[n];
@@ -56,7 +60,9 @@ function createRise(trace: ArrayLike<number>, window: number): (n: number, gap: 
   return (n, gap) => mean(n + gap) - mean(n - gap - window);
 }
 
-/** Deviation of the difference of two such means when only noise is there, from the differences of neighbouring points. */
+/**
+ * Deviation of the difference of two such means when only noise is there, from the differences of neighbouring points.
+ */
 function noiseOf(trace: ArrayLike<number>, window: number): number {
   const differences = Float64Array.from({ length: trace.length - 1 }, (_, n) => trace[n + 1] - trace[n]);
   return robustDeviation(differences) / Math.sqrt(window);

@@ -16,8 +16,8 @@ export type InterferenceSource = {
 type Carrier = (sample: number) => { turns: number; isOn: boolean };
 
 /**
- * An interference to add to a capture in blocks of any length: the sum does not depend on how the samples are cut. Bit for bit the
- * same everywhere.
+ * An interference to add to a capture in blocks of any length: the sum does not depend on how the samples are cut. Bit
+ * for bit the same everywhere.
  * @param rateHz of the complex samples; for a matched code a whole number of kHz from 2046
  * @param random drawn twice per sample by noise, not at all by the others
  */

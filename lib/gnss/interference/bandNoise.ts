@@ -8,9 +8,9 @@ const SETTLED = 1e-12; // of the filter's energy
 type Section = { b0: number; a1: number; a2: number };
 
 /**
- * Complex Gaussian noise of mean |x|^2 = 1 whose spectrum is even over a width about 0 Hz: white draws through a Butterworth
- * low-pass filter of twelve poles by the bilinear transform, 3 dB down at half of the width. Oppenheim & Schafer, "Discrete-Time
- * Signal Processing", chapter on filter design. A width of the whole rate is white.
+ * Complex Gaussian noise of mean |x|^2 = 1 whose spectrum is even over a width about 0 Hz: white draws through a
+ * Butterworth low-pass filter of twelve poles by the bilinear transform, 3 dB down at half of the width. Oppenheim &
+ * Schafer, "Discrete-Time Signal Processing", chapter on filter design. A width of the whole rate is white.
  * @param random drawn twice per sample, I then Q
  */
 export function createBandNoise(widthHz: number, rateHz: number, random: Random): () => { i: number; q: number } {

@@ -1,6 +1,6 @@
 /**
- * Something that disturbs a capture. Offsets are from 0 Hz of the complex samples; what lies beyond half of their rate does
- * not pass the front end and is left out.
+ * Something that disturbs a capture. Offsets are from 0 Hz of the complex samples; what lies beyond half of their rate
+ * does not pass the front end and is left out.
  * - tone: a single carrier
  * - narrow-fm: a carrier swung sinusoidally by +-deviation
  * - sweep: frequency runs evenly over a width, from below to above, and starts again or runs back

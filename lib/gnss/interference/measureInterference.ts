@@ -23,8 +23,8 @@ const LEFT_OUT = 0.005; // at either end: the 99 % bandwidth of ITU-R SM.328
 const CERTAIN = 5; // standard deviations of a bin above the floor
 
 /**
- * Interference in a spectrum. The floor is the median of the bins, set right for the law of the averages (chi-square of two degrees
- * per transform), which holds as long as the interference fills less than half of the band.
+ * Interference in a spectrum. The floor is the median of the bins, set right for the law of the averages (chi-square of
+ * two degrees per transform), which holds as long as the interference fills less than half of the band.
  * @param floorPerHz where it is known otherwise, for an interference that fills the band
  */
 export function measureInterference(spectrum: Spectrum, floorPerHz?: number): InterferenceReading {
@@ -65,8 +65,8 @@ function occupied(excess: Float64Array): [number, number] {
 export const jsOfReadingDb = (powerToDensityDbHz: number, cn0DbHz: number): number => powerToDensityDbHz - cn0DbHz;
 
 /**
- * Power per complex sample that stands J/S above a signal of C/N0, in squared units of the noise: J = 10^(J/S/10) C/N0 * 2 sigma^2 /
- * rate. Definition.
+ * Power per complex sample that stands J/S above a signal of C/N0, in squared units of the noise: J/S times C/N0 times
+ * 2 sigma^2 over the rate. Definition.
  * @param sigma standard deviation of the noise in I or Q
  */
 export const powerOfJs = (jsDb: number, cn0DbHz: number, sigma: number, rateHz: number): number =>

@@ -3,7 +3,9 @@ export type Band = { lowHz: number; highHz: number };
 
 /** One product of transmitters that falls into a band. */
 export type MixProduct = {
-  /** Multiplier of each transmitter, in the order of the list; the sum of times multiplier and frequency is the product. */
+  /**
+   * Multiplier of each transmitter, in the order of the list; the sum of times multiplier and frequency is the product.
+   */
   multipliers: number[];
   /** Sum of the multipliers' magnitudes. */
   order: number;
@@ -15,9 +17,9 @@ export type MixProduct = {
 const MOST_TRANSMITTERS_IN_A_MIX = 3;
 
 /**
- * Harmonics and mixes of transmitters that fall into a band: all sums of whole multiples, of up to three transmitters at a
- * time, whose magnitudes add up to at most `highestOrder`. Arithmetic; which of them are strong is another question, the
- * lower order as a rule.
+ * Harmonics and mixes of transmitters that fall into a band: all sums of whole multiples, of up to three transmitters
+ * at a time, whose magnitudes add up to at most `highestOrder`. Arithmetic; which of them are strong is another
+ * question, the lower order as a rule.
  * @param frequenciesHz of the transmitters, at most 12
  * @returns by order, then by distance from the band's middle
  */

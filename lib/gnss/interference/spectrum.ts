@@ -30,9 +30,9 @@ export type Spectrogram = Omit<Spectrum, "averaged"> & {
 };
 
 /**
- * Spectrum of a capture by averaged windowed transforms: Welch, "The use of fast Fourier transform for the estimation of power
- * spectra" (1967). The sum of density times bin width is the mean power of the samples. Real samples give the half of the spectrum
- * from 0 Hz up, with the power of both.
+ * Spectrum of a capture by averaged windowed transforms: Welch, "The use of fast Fourier transform for the estimation
+ * of power spectra" (1967). The sum of density times bin width is the mean power of the samples. Real samples give the
+ * half of the spectrum from 0 Hz up, with the power of both.
  */
 export function powerSpectrum(capture: SampledCapture, settings: SpectrumSettings): Spectrum {
   let averaged = 0;
@@ -46,8 +46,8 @@ export function powerSpectrum(capture: SampledCapture, settings: SpectrumSetting
 }
 
 /**
- * Spectra of a capture one after the other, `step` samples apart. Each row stands for `points` samples, so time is resolved to
- * points/rate and frequency to the resolution bandwidth.
+ * Spectra of a capture one after the other, `step` samples apart. Each row stands for `points` samples, so time is
+ * resolved to points/rate and frequency to the resolution bandwidth.
  * @returns densities row after row, offsetsHz.length each
  */
 export function spectrogram(capture: SampledCapture, settings: SpectrumSettings): Spectrogram {

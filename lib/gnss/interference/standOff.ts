@@ -16,7 +16,9 @@ export type InterferencePath = {
 
 const NEAREST_M = 1; // up to here free space, beyond with the exponent
 
-/** Path loss in dB: free space to 1 m, then 10 n dB per tenfold distance, and the screen. Log-distance law; textbook. */
+/**
+ * Path loss in dB: free space to 1 m, then 10 n dB per tenfold distance, and the screen. Log-distance law; textbook.
+ */
 export function pathLossDb({ frequencyHz, exponent, screenDb }: InterferencePath, distanceM: number): number {
   checkDistance(distanceM);
   return freeSpaceLossDb(NEAREST_M, frequencyHz) + exponent * decibels(distanceM / NEAREST_M) + screenDb;

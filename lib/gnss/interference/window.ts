@@ -1,6 +1,8 @@
 import { cosTurns } from "@/lib/numeric/elementary";
 
-/** Windows by name; cosine coefficients of Harris, "On the use of windows for harmonic analysis with the DFT" (1978). */
+/**
+ * Windows by name; cosine coefficients of Harris, "On the use of windows for harmonic analysis with the DFT" (1978).
+ */
 const COEFFICIENTS = {
   rectangular: [1],
   hann: [0.5, 0.5],

@@ -17,8 +17,8 @@ export function codeLines(prn: number, highestKhz: number): CodeLine[] {
 }
 
 /**
- * Strongest line of a C/A code, where a narrow interference does most harm. Parkinson & Spilker, "Global Positioning System:
- * Theory and Applications", and Kaplan & Hegarty, "Understanding GPS", list them for the first satellites.
+ * Strongest line of a C/A code, where a narrow interference does most harm. Parkinson & Spilker, "Global Positioning
+ * System: Theory and Applications", and Kaplan & Hegarty, "Understanding GPS", list them for the first satellites.
  */
 export const worstCodeLine = (prn: number): CodeLine =>
   codeLines(prn, 511).reduce((worst, line) => (line.levelDb > worst.levelDb ? line : worst));

@@ -5,8 +5,8 @@ import { powerInBand } from "./powerInBand";
 import { powerSpectralDensity } from "./powerSpectralDensity";
 
 /**
- * Root-mean-square bandwidth in Hz of a signal behind an ideal filter, sqrt(int f^2 G / int G) over +-B/2. The wider it is,
- * the finer a delay can be read. Gabor (1946); for navigation signals Betz, Navigation 48(4), 2001.
+ * Root-mean-square bandwidth in Hz of a signal behind an ideal filter, sqrt(int f^2 G / int G) over +-B/2. The wider it
+ * is, the finer a delay can be read. Gabor (1946); for navigation signals Betz, Navigation 48(4), 2001.
  */
 export function gaborBandwidthHz(modulation: Modulation, bandwidthHz: number): number {
   const weighed = (offsetHz: number) => offsetHz * offsetHz * powerSpectralDensity(modulation, offsetHz);

@@ -4,8 +4,8 @@ import type { Modulation } from "./modulation";
 const PANELS_PER_LOBE = 2;
 
 /**
- * Integral over a band centred on the carrier, from -B/2 to B/2, of an even function of frequency made of the densities of
- * some modulations. Panels of half a lobe of the slowest chips: relative error below 1e-10.
+ * Integral over a band centred on the carrier, from -B/2 to B/2, of an even function of frequency made of the densities
+ * of some modulations. Panels of half a lobe of the slowest chips: relative error below 1e-10.
  * @param modulations those whose densities the function holds; they set the width of the lobes
  */
 export function integrateBand(

@@ -1,7 +1,8 @@
 import { CA_CHIP_RATE_HZ } from "../constants";
 
 /**
- * How the chips of a code shape its spectrum. Rectangular chips; the code is taken as random, so its lines are left out.
+ * How the chips of a code shape its spectrum. Rectangular chips; the code is taken as random, so its lines are left
+ * out.
  * - bpsk: plain chips
  * - boc: chips times a square subcarrier that starts at 0 (sine) or a quarter period on (cosine)
  * - sum: parts of the power, each with a modulation of its own; the shares add up to 1
@@ -11,7 +12,9 @@ export type Modulation =
   | { kind: "boc"; chipRateHz: number; subcarrierHz: number; phase: "sine" | "cosine" }
   | { kind: "sum"; chipRateHz: number; parts: readonly { share: number; modulation: Modulation }[] };
 
-/** BPSK-R(n): rectangular chips at n * 1.023 MHz. Betz, "Binary Offset Carrier Modulations for Radionavigation" (2001). */
+/**
+ * BPSK-R(n): rectangular chips at n * 1.023 MHz. Betz, "Binary Offset Carrier Modulations for Radionavigation" (2001).
+ */
 export const bpsk = (n: number): Modulation => ({ kind: "bpsk", chipRateHz: n * CA_CHIP_RATE_HZ });
 
 /** BOC(m, n): subcarrier m * 1.023 MHz, chips n * 1.023 MHz; 2m/n is a whole number. Betz (2001). */

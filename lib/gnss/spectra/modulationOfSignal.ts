@@ -2,9 +2,9 @@ import type { Signal } from "../signals/signal";
 import { boc, bpsk, type Modulation } from "./modulation";
 
 /**
- * Spectrum of a signal of the registry. A composite subcarrier is taken as the sum of its parts' powers: the product of the two
- * subcarriers, of opposite sign in data and pilot, falls out of their sum and is left out here. A code that takes turns with another
- * has the spectrum of its chips.
+ * Spectrum of a signal of the registry. A composite subcarrier is taken as the sum of its parts' powers: the product of
+ * the two subcarriers, of opposite sign in data and pilot, falls out of their sum and is left out here. A code that
+ * takes turns with another has the spectrum of its chips.
  */
 export function modulationOfSignal({ modulation }: Pick<Signal, "modulation">): Modulation {
   switch (modulation.kind) {

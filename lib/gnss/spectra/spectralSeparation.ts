@@ -16,8 +16,9 @@ const WIDE_CHIPS = 200; // product of two densities beyond +-100 chip rates: bel
 
 /**
  * Spectral separation coefficient in 1/Hz: kappa = int G_i G_s df over the receiver's band, both of power 1 over all
- * frequencies. Betz, "Effect of partial-band interference on receiver estimation of C/N0" (2001). For two BPSK signals alike it
- * is 2/(3 Rc). Codes are taken as random; one pair of short codes, whose spectra are lines, may differ by several dB.
+ * frequencies. Betz, "Effect of partial-band interference on receiver estimation of C/N0" (2001). For two BPSK signals
+ * alike it is 2/(3 Rc). Codes are taken as random; one pair of short codes, whose spectra are lines, may differ by
+ * several dB.
  * @param bandwidthHz two-sided, centred on the signal; null for no limit
  */
 export function spectralSeparation(
@@ -45,9 +46,9 @@ export function spectralSeparation(
 }
 
 /**
- * Resistance Q of a signal against an interference: Q = int S_s / (Rc int S_j S_s), 1 for a line on the carrier, 1.5 for a
- * matched BPSK code, 2.22 for noise over the main lobe. Kaplan & Hegarty, "Understanding GPS", 2nd edition, chapter 6; values
- * from memory, reproduced by the integrals.
+ * Resistance Q of a signal against an interference: Q = int S_s / (Rc int S_j S_s), 1 for a line on the carrier, 1.5
+ * for a matched BPSK code, 2.22 for noise over the main lobe. Kaplan & Hegarty, "Understanding GPS", 2nd edition,
+ * chapter 6; values from memory, reproduced by the integrals.
  * @param bandwidthHz two-sided; null for no limit
  */
 export function interferenceFactor(

@@ -2,9 +2,9 @@ import { median, robustDeviation } from "@/lib/numeric/statistics";
 import type { TimeErrorSeries } from "./timeError";
 
 /**
- * Readings that no neighbour supports, such as a counter that missed its trigger: farther from the median of the readings
- * around than so many of their robust deviations. A step is kept, for half of the window lies beyond it. Hampel filter;
- * Pearson, "Outliers in process modeling and identification" (2002).
+ * Readings that no neighbour supports, such as a counter that missed its trigger: farther from the median of the
+ * readings around than so many of their robust deviations. A step is kept, for half of the window lies beyond it.
+ * Hampel filter; Pearson, "Outliers in process modeling and identification" (2002).
  * @param halfWindow readings on each side, from 2
  * @param times robust deviations
  * @param floorNs least deviation assumed, the counter's own resolution
@@ -35,8 +35,8 @@ export function leaveOut({ intervalS, valuesNs }: TimeErrorSeries, indices: read
 }
 
 /**
- * A pulse can only leave on an edge of the receiver's own clock; the receiver says for each pulse how far that edge was from
- * the right time. Taking that off removes the sawtooth. Receivers differ in the sign of what they say.
+ * A pulse can only leave on an edge of the receiver's own clock; the receiver says for each pulse how far that edge was
+ * from the right time. Taking that off removes the sawtooth. Receivers differ in the sign of what they say.
  * @param saidNs per reading, same length
  * @param sign +1 when the receiver states by how much the pulse comes late, -1 when by how much early
  */
@@ -47,8 +47,8 @@ export function takeOffSawtooth(series: TimeErrorSeries, saidNs: Float64Array, s
 }
 
 /**
- * The sign with which the stated values take the sawtooth off: the one that leaves the smaller robust deviation from reading to reading,
- * in which slow changes do not count. Where a receiver's own word on it is at hand, that wins.
+ * The sign with which the stated values take the sawtooth off: the one that leaves the smaller robust deviation from
+ * reading to reading, in which slow changes do not count. Where a receiver's own word on it is at hand, that wins.
  */
 export function likelySawtoothSign(series: TimeErrorSeries, saidNs: Float64Array): 1 | -1 {
   const roughness = (sign: 1 | -1) => {

@@ -41,7 +41,8 @@ export function tdevLimitNs(clock: Exclude<ClockClass, "ePRTC-A">, tauS: number)
 
 /**
  * Largest |TE| in ns of an ePRTC-A after a time in holdover: straight from 30 to 100 ns over H. ITU-T G.8272.1.
- * @param learningDays that it was locked before; H is 6 days from 6 days on, 40 days from 40 days on, 70 000 s below 6 days
+ * @param learningDays that it was locked before; H is 6 days from 6 days on, 40 days from 40 days on, 70 000 s below 6
+ *   days
  */
 export function holdoverLimitNs(holdoverS: number, learningDays: number): number {
   const lastS = learningDays >= 40 ? 3_456_000 : learningDays >= 6 ? 518_400 : 70_000;
@@ -51,8 +52,9 @@ export function holdoverLimitNs(holdoverS: number, learningDays: number): number
 }
 
 /**
- * Corners of the MTIE masks for the network limit at reference point C and its enhanced form, [s, ns]. ITU-T G.8271.1, read in a public
- * copy of the figures; what runs between the corners stands in the recommendation and is not given here.
+ * Corners of the MTIE masks for the network limit at reference point C and its enhanced form, [s, ns]. ITU-T G.8271.1,
+ * read in a public copy of the figures; what runs between the corners stands in the recommendation and is not given
+ * here.
  */
 export const NETWORK_LIMIT_MTIE: Readonly<Record<"plain" | "enhanced", ReadonlyArray<readonly [number, number]>>> = {
   plain: [

@@ -5,8 +5,8 @@ export type DelayPart = {
   /** Standard uncertainty, from 0. */
   uncertaintyNs: number;
   /**
-   * Parts that share a cause, such as one velocity factor for two cables or one instrument for two readings, err together;
-   * null for a part that errs on its own.
+   * Parts that share a cause, such as one velocity factor for two cables or one instrument for two readings, err
+   * together; null for a part that errs on its own.
    */
   sharedCause: string | null;
 };
@@ -20,8 +20,9 @@ export type DelayBudget = {
 };
 
 /**
- * Sum of a delay budget. Independent uncertainties add as squares, JCGM 100:2008, 5.1.2; those of a shared cause first add
- * with the sign of their parts (full correlation, 5.2.2, note 1), for a scale that is wrong lengthens all of them alike.
+ * Sum of a delay budget. Independent uncertainties add as squares, JCGM 100:2008, 5.1.2; those of a shared cause first
+ * add with the sign of their parts (full correlation, 5.2.2, note 1), for a scale that is wrong lengthens all of them
+ * alike.
  */
 export function delayBudget(parts: readonly DelayPart[]): DelayBudget {
   const together = new Map<string, number>();
@@ -38,7 +39,9 @@ export function delayBudget(parts: readonly DelayPart[]): DelayBudget {
   return { totalNs, uncertaintyNs, expandedNs: 2 * uncertaintyNs };
 }
 
-/** Standard uncertainty of a value known only to lie within +-limit, all places alike: limit/sqrt(3), JCGM 100, 4.3.7. */
+/**
+ * Standard uncertainty of a value known only to lie within +-limit, all places alike: limit/sqrt(3), JCGM 100, 4.3.7.
+ */
 export const uncertaintyOfLimit = (limit: number): number => limit / Math.sqrt(3);
 
 /** What a receiver makes of the value typed in. */

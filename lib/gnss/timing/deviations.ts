@@ -2,8 +2,8 @@ import { runningSums } from "./runningSums";
 import type { TimeErrorSeries } from "./timeError";
 
 /*
- * Deviations of a time error x by its second differences over n intervals of tau0, all that overlap: ITU-T G.810, II.1 to
- * II.3; the same estimators as in Riley, "Handbook of Frequency Stability Analysis", NIST SP 1065 (2008), 5.2. A
+ * Deviations of a time error x by its second differences over n intervals of tau0, all that overlap: ITU-T G.810, II.1
+ * to II.3; the same estimators as in Riley, "Handbook of Frequency Stability Analysis", NIST SP 1065 (2008), 5.2. A
  * difference that a missing reading enters is left out.
  */
 

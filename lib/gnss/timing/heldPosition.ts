@@ -18,8 +18,8 @@ function alongSightNs({ eastM, northM, upM }: PositionError, { azimuthDeg, eleva
 /**
  * Time error of a receiver that holds a wrong position and takes the mean over its satellites: least squares with the
  * clock as the only unknown, all satellites alike. Geometry; textbook.
- * @returns mean: how late the pulse comes, below 0 for early; spread: standard deviation over the satellites, the size of
- *   the steps as satellites rise and set
+ * @returns mean: how late the pulse comes, below 0 for early; spread: standard deviation over the satellites, the size
+ *   of the steps as satellites rise and set
  */
 export function heldPositionTimeError(
   error: PositionError,
@@ -33,8 +33,8 @@ export function heldPositionTimeError(
 }
 
 /**
- * The same for satellites spread evenly over the sky above a mask, without gaps: the horizontal error averages out, and of
- * the height error (1 + sin mask)/2 stays. Integral over the solid angle.
+ * The same for satellites spread evenly over the sky above a mask, without gaps: the horizontal error averages out, and
+ * of the height error (1 + sin mask)/2 stays. Integral over the solid angle.
  */
 export const evenSkyTimeErrorNs = (upM: number, maskDeg: number): number =>
   ((upM * (1 + sin((maskDeg * PI) / 180))) / 2 / SPEED_OF_LIGHT_M_S) * 1e9;

@@ -30,8 +30,8 @@ export type HoldoverUncertainty = {
 };
 
 /**
- * Expected time error in ns after a time in holdover: x0 + y0 t + D t^2/2, the temperature's share of the frequency added up
- * over time. ITU-T G.810, I.3 for the first three terms; temperature: definition of the coefficient.
+ * Expected time error in ns after a time in holdover: x0 + y0 t + D t^2/2, the temperature's share of the frequency
+ * added up over time. ITU-T G.810, I.3 for the first three terms; temperature: definition of the coefficient.
  */
 export function holdoverErrorNs(clock: Holdover, afterS: number): number {
   const { startNs, frequencyOffset, driftPerDay, temperatureCoefficientPerK, temperatureChangeK, dailySwingK } = clock;
@@ -55,8 +55,8 @@ export function holdoverUncertaintyNs(uncertainty: HoldoverUncertainty, afterS: 
 }
 
 /**
- * Time in s until |expected error| plus `coverage` uncertainties first reaches a limit; Infinity when it does not before the
- * horizon. Looked for in 4096 steps and then narrowed to 1 ms.
+ * Time in s until |expected error| plus `coverage` uncertainties first reaches a limit; Infinity when it does not
+ * before the horizon. Looked for in 4096 steps and then narrowed to 1 ms.
  * @param limit a number of ns, or a limit that changes with the time in holdover
  */
 export function timeToLimitS(

@@ -13,7 +13,8 @@ export type MaskMargin = {
 };
 
 /**
- * A curve against its mask, judged by the ratio of the two: masks are drawn on logarithmic scales. A point without a value is left out.
+ * A curve against its mask, judged by the ratio of the two: masks are drawn on logarithmic scales. A point without a
+ * value is left out.
  * @param limitNs such as `mtieLimitNs` of a clock class
  * @returns null when no point has a value
  */

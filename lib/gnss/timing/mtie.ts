@@ -2,8 +2,8 @@ import type { TimeErrorSeries } from "./timeError";
 
 /**
  * Maximum time interval error in ns: the largest peak-to-peak of the time error inside any window of n intervals (n + 1
- * readings). ITU-T G.810, 4.5.13 and II.5. Missing readings count for nothing; a window without two readings is left out.
- * Linear time for each window by two queues of candidates.
+ * readings). ITU-T G.810, 4.5.13 and II.5. Missing readings count for nothing; a window without two readings is left
+ * out. Linear time for each window by two queues of candidates.
  * @param intervals n, from 1 to N - 1
  */
 export function mtieNs({ valuesNs }: TimeErrorSeries, intervals: number): number {

@@ -1,8 +1,8 @@
 /**
  * Sums from which the sum and the number of missing readings of any stretch follow by one subtraction.
  * @param values NaN where a reading is missing
- * @returns sums[n]: the first n readings present, each less `zero`, which keeps digits when all are far from 0; missing[n]: how
- *   many of them are missing
+ * @returns sums[n]: the first n readings present, each less `zero`, which keeps digits when all are far from 0;
+ *   missing[n]: how many of them are missing
  */
 export function runningSums(values: Float64Array): { sums: Float64Array; missing: Int32Array; zero: number } {
   const sums = new Float64Array(values.length + 1);

@@ -7,8 +7,8 @@ export type LoggedReading = { timeS: number; ns: number };
 const MOST_READINGS = 2_000_000;
 
 /**
- * A log as a series at even intervals: the interval is the median of the times between readings, each reading goes to the nearest place
- * and places without one are NaN. A second reading at one place replaces the first.
+ * A log as a series at even intervals: the interval is the median of the times between readings, each reading goes to
+ * the nearest place and places without one are NaN. A second reading at one place replaces the first.
  * @param readings in the order of time, at least two
  * @throws RangeError when times run backwards or gaps would make the series longer than two million places
  */

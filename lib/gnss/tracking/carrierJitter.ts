@@ -31,8 +31,9 @@ export function pllThresholdDbHz(loopHz: number, coherentS: number, limitDeg = 1
 }
 
 /**
- * Thermal jitter of a frequency loop in Hz, 1 sigma: 1/(2 pi T) sqrt(4 F Bn/(C/N0) (1 + 1/(T C/N0))).
- * Kaplan & Hegarty, 2nd edition, 5.6.2 (from memory).
+ * Thermal jitter of a frequency loop in Hz, 1 sigma: 1/(2 pi T) sqrt(4 F Bn/(C/N0) (1 + 1/(T C/N0))). Kaplan & Hegarty,
+ * 2nd edition, 5.6.2 (from memory). Each pair of correlations is used once; pairs that overlap do far better, for their
+ * errors take each other back.
  * @param nearThreshold F is 2 near the threshold and 1 well above it
  */
 export function fllJitterHz(loopHz: number, cn0DbHz: number, coherentS: number, nearThreshold: boolean): number {

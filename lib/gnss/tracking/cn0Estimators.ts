@@ -1,10 +1,10 @@
 import { decibels } from "@/lib/numeric/elementary";
 
 /**
- * C/N0 in dB-Hz by narrow and wide power: mu = sum over blocks of |sum of M prompts|^2 over sum of |prompt|^2, then
- * (mu - 1)/(T (M - mu)). Van Dierendonck, "GPS Receivers", in Parkinson & Spilker, "Global Positioning System: Theory and
- * Applications" I (1996), 8, where mu is the mean of the blocks' own ratios; that reads 0.14 dB low at 27 dB-Hz, the ratio of the
- * sums does not. The blocks must lie inside data bits and the loop must be in phase or frequency lock.
+ * C/N0 in dB-Hz by narrow and wide power: mu = sum over blocks of |sum of M prompts|^2 over sum of |prompt|^2, then (mu
+ * - 1)/(T (M - mu)). Van Dierendonck, "GPS Receivers", in Parkinson & Spilker, "Global Positioning System: Theory and
+ * Applications" I (1996), 8, where mu is the mean of the blocks' own ratios; that reads 0.14 dB low at 27 dB-Hz, the
+ * ratio of the sums does not. The blocks must lie inside data bits and the loop must be in phase or frequency lock.
  * @param prompts complex sums of single code periods, real and imaginary parts alternating
  * @param first period to begin with, the bit edge
  * @param perBlock M, from 2 to the periods in a bit; 20 for GPS L1 C/A
@@ -35,9 +35,9 @@ export function narrowWideCn0DbHz(
 }
 
 /**
- * C/N0 in dB-Hz by second and fourth moment: signal power sqrt(2 M2^2 - M4), noise power M2 less that. Pauluzzi & Beaulieu, "A
- * comparison of SNR estimation techniques for the AWGN channel" (2000). Needs neither bit edge nor phase lock, but scatters
- * widely below about 30 dB-Hz at 1 ms.
+ * C/N0 in dB-Hz by second and fourth moment: signal power sqrt(2 M2^2 - M4), noise power M2 less that. Pauluzzi &
+ * Beaulieu, "A comparison of SNR estimation techniques for the AWGN channel" (2000). Needs neither bit edge nor phase
+ * lock, but scatters widely below about 30 dB-Hz at 1 ms.
  * @returns -Infinity when the moments show no signal
  */
 export function momentsCn0DbHz(prompts: ArrayLike<number>, periodS: number): number {

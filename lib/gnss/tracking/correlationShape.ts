@@ -10,9 +10,10 @@ const POINTS_PER_CHIP = 64; // of the table behind a filter
 const REACH_CHIPS = 4; // beyond it the shape is taken as 0, though a filter rings on below 1e-3
 
 /**
- * Autocorrelation of a modulation: without a filter exactly, as straight lines between the half periods of its subcarrier;
- * behind an ideal low-pass filter of two-sided bandwidth B as the integral of G(f) cos(2 pi f tau) over +-B/2, from a table
- * with cubic interpolation (error below 1e-4 up to 16 chip rates of bandwidth). A random code is taken, so it is 0 beyond one chip.
+ * Autocorrelation of a modulation: without a filter exactly, as straight lines between the half periods of its
+ * subcarrier; behind an ideal low-pass filter of two-sided bandwidth B as the integral of G(f) cos(2 pi f tau) over
+ * +-B/2, from a table with cubic interpolation (error below 1e-4 up to 16 chip rates of bandwidth). A random code is
+ * taken, so it is 0 beyond one chip.
  */
 export function correlationShape(modulation: Modulation, bandwidthHz: number | null): CorrelationShape {
   if (bandwidthHz === null) return plainShape(modulation);

@@ -12,8 +12,8 @@ export type ReplicaState = {
 };
 
 /**
- * Sums of a run of samples with an early, a prompt and a late replica of one code, the carrier taken off; the sums grow with
- * the number of samples. Straight lines between the points of the table.
+ * Sums of a run of samples with an early, a prompt and a late replica of one code, the carrier taken off; the sums grow
+ * with the number of samples. Straight lines between the points of the table.
  * @param first sample to begin with
  * @param count of samples, over less than one code period
  * @param state at the first sample; code phase from 0 below the code's length

@@ -11,9 +11,9 @@ export type Correlation = {
 };
 
 /*
- * Discriminators of Kaplan & Hegarty, "Understanding GPS", 2nd edition, Tables 5.2 to 5.5. Those of the code are above 0 when the
- * replica is late, and a small error comes out in chips with the scale R/|R'| of the correlation R at half of the spacing D: 1 - D/2
- * for rectangular chips without a filter, `discriminatorScaleChips` for all others.
+ * Discriminators of Kaplan & Hegarty, "Understanding GPS", 2nd edition, Tables 5.2 to 5.5. Those of the code are above
+ * 0 when the replica is late, and a small error comes out in chips with the scale R/|R'| of the correlation R at half
+ * of the spacing D: 1 - D/2 for rectangular chips without a filter, `discriminatorScaleChips` for all others.
  */
 
 /** Early minus late envelope over their sum, scale (E - L)/(E + L). Needs no phase lock. */
@@ -30,7 +30,10 @@ export function powerDiscriminator(sums: Correlation, scaleChips: number): numbe
   return early + late > 0 ? (scaleChips * (early - late)) / (2 * (early + late)) : 0;
 }
 
-/** Quasi-coherent dot product over the prompt's power, ((I_E - I_L) I_P + (Q_E - Q_L) Q_P)/(2 (I_P^2 + Q_P^2)): in chips for plain chips. */
+/**
+ * Quasi-coherent dot product over the prompt's power, ((I_E - I_L) I_P + (Q_E - Q_L) Q_P)/(2 (I_P^2 + Q_P^2)): in chips
+ * for plain chips.
+ */
 export function dotProductDiscriminator(sums: Correlation): number {
   const { promptI, promptQ } = sums;
   const power = promptI * promptI + promptQ * promptQ;
@@ -38,7 +41,9 @@ export function dotProductDiscriminator(sums: Correlation): number {
   return power > 0 ? dot / (2 * power) : 0;
 }
 
-/** Coherent (I_E - I_L)/(2 |I_P|), for a loop in phase lock: in chips for plain chips; the data bit's sign falls out. */
+/**
+ * Coherent (I_E - I_L)/(2 |I_P|), for a loop in phase lock: in chips for plain chips; the data bit's sign falls out.
+ */
 export const coherentDiscriminator = ({ earlyI, lateI, promptI }: Correlation): number =>
   promptI === 0 ? 0 : (earlyI - lateI) / (2 * promptI);
 
@@ -52,9 +57,9 @@ export function costasPhaseCycles({ promptI, promptQ }: Correlation): number {
 export const pilotPhaseCycles = ({ promptI, promptQ }: Correlation): number => atan2(promptQ, promptI) / (2 * PI);
 
 /**
- * Frequency in Hz by which the signal lies above the replica, from two prompt sums: the turn from the first to the second over
- * the time between. With `flips` a sign change between the two is taken for a data bit, and the range is halved to
- * -1/(4T) to 1/(4T).
+ * Frequency in Hz by which the signal lies above the replica, from two prompt sums: the turn from the first to the
+ * second over the time between. With `flips` a sign change between the two is taken for a data bit, and the range is
+ * halved to -1/(4T) to 1/(4T).
  */
 export function frequencyDiscriminatorHz(
   first: { promptI: number; promptQ: number },

@@ -10,9 +10,9 @@ const FEWEST_BITS = 5;
 const LEAST_MARGIN = 0.02;
 
 /**
- * Bit synchronisation: for each place that the bits can have, the powers of the sums over whole bits are added; the right
- * place keeps signs together. Maximum likelihood for unknown bits; Kokkonen & Pietila, "A new bit synchronization method for a
- * GPS receiver" (2002; from memory).
+ * Bit synchronisation: for each place that the bits can have, the powers of the sums over whole bits are added; the
+ * right place keeps signs together. Maximum likelihood for unknown bits; Kokkonen & Pietila, "A new bit synchronization
+ * method for a GPS receiver" (2002; from memory).
  * @param prompts complex sums of code periods, real and imaginary parts alternating, the phase nearly steady over a bit
  * @param periodsPerBit 20 for GPS L1 C/A
  * @returns null with fewer than five bits, or when two places do nearly alike: no bit has changed, or noise rules

@@ -1,7 +1,7 @@
 /**
- * Phase-lock indicator per block of prompts: (I^2 - Q^2)/(I^2 + Q^2) of the block's sum, the cosine of twice the phase error: 1 in
- * lock, about 0 with none. Van Dierendonck, in Parkinson & Spilker, "Global Positioning System: Theory and Applications" I
- * (1996), 8.
+ * Phase-lock indicator per block of prompts: (I^2 - Q^2)/(I^2 + Q^2) of the block's sum, the cosine of twice the phase
+ * error: 1 in lock, about 0 with none. Van Dierendonck, in Parkinson & Spilker, "Global Positioning System: Theory and
+ * Applications" I (1996), 8.
  * @param prompts complex sums, real and imaginary parts alternating
  * @param first sum to begin with, a bit edge
  * @param perBlock sums in a block, inside a data bit
@@ -35,8 +35,8 @@ export type LockRule = {
 export const USUAL_LOCK_RULE: LockRule = { threshold: 0.6, toDeclare: 25, toGiveUp: 25, weight: 0.1 };
 
 /**
- * Lock over time from indicators: a running mean passes the threshold so many times in a row before the state changes, so that
- * neither one good block declares lock nor one bad block gives it up.
+ * Lock over time from indicators: a running mean passes the threshold so many times in a row before the state changes,
+ * so that neither one good block declares lock nor one bad block gives it up.
  * @returns one state for each indicator
  */
 export function lockStates(indicators: ArrayLike<number>, rule: LockRule = USUAL_LOCK_RULE): boolean[] {

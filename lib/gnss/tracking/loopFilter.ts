@@ -1,8 +1,8 @@
 export type LoopOrder = 1 | 2 | 3;
 
 /**
- * Noise bandwidth over natural frequency of the usual loops: Bn = 0.25 w0, 0.53 w0 (a2 = 1.414) and 0.7845 w0 (a3 = 1.1,
- * b3 = 2.4). Kaplan & Hegarty, "Understanding GPS", 2nd edition, table of loop filters (from memory).
+ * Noise bandwidth over natural frequency of the usual loops: Bn = 0.25 w0, 0.53 w0 (a2 = 1.414) and 0.7845 w0 (a3 =
+ * 1.1, b3 = 2.4). Kaplan & Hegarty, "Understanding GPS", 2nd edition, table of loop filters (from memory).
  */
 export const BANDWIDTH_OVER_NATURAL: Readonly<Record<LoopOrder, number>> = { 1: 0.25, 2: 0.53, 3: 0.7845 };
 const A2 = 1.414;
@@ -31,8 +31,8 @@ export type LoopFilter = {
 
 /**
  * Loop filter of order 1 to 3 with bilinear integrators and a frequency loop of one order less that helps it: Kaplan &
- * Hegarty, "Understanding GPS", 2nd edition, 5.5, figures of the loop filters (from memory). Bandwidths may change from one
- * step to the next; what the integrators hold stays.
+ * Hegarty, "Understanding GPS", 2nd edition, 5.5, figures of the loop filters (from memory). Bandwidths may change from
+ * one step to the next; what the integrators hold stays.
  */
 export function createLoopFilter(): LoopFilter {
   let acceleration = 0;

@@ -2,9 +2,9 @@ import { SPEED_OF_LIGHT_M_S } from "../constants";
 import { BANDWIDTH_OVER_NATURAL, type LoopOrder } from "./loopFilter";
 
 /**
- * Steady error of a carrier loop in degrees under the motion that its order just follows late: range rate (m/s) at order 1,
- * acceleration (m/s^2) at 2, jerk (m/s^3) at 3: 360/lambda * motion / w0^order with w0 from the noise bandwidth.
- * Kaplan & Hegarty, "Understanding GPS", 2nd edition, 5.6 (from memory).
+ * Steady error of a carrier loop in degrees under the motion that its order just follows late: range rate (m/s) at
+ * order 1, acceleration (m/s^2) at 2, jerk (m/s^3) at 3: 360/lambda * motion / w0^order with w0 from the noise
+ * bandwidth. Kaplan & Hegarty, "Understanding GPS", 2nd edition, 5.6 (from memory).
  */
 export function dynamicStressDeg(order: LoopOrder, motion: number, loopHz: number, carrierHz: number): number {
   const natural = loopHz / BANDWIDTH_OVER_NATURAL[order];
@@ -26,8 +26,8 @@ export type PhaseErrors = {
 export const PHASE_LIMIT_DEG = 45;
 
 /**
- * Room in degrees until a Costas loop's error budget is used up: 45 - 3 sqrt(sum of the squared sigmas) - stress. Below 0
- * the loop is expected to lose lock. Rule of thumb, Kaplan & Hegarty, 2nd edition, 5.6 (from memory).
+ * Room in degrees until a Costas loop's error budget is used up: 45 - 3 sqrt(sum of the squared sigmas) - stress. Below
+ * 0 the loop is expected to lose lock. Rule of thumb, Kaplan & Hegarty, 2nd edition, 5.6 (from memory).
  */
 export function phaseMarginDeg({ thermalDeg, vibrationDeg, oscillatorDeg, stressDeg }: PhaseErrors): number {
   const noise = thermalDeg * thermalDeg + vibrationDeg * vibrationDeg + oscillatorDeg * oscillatorDeg;

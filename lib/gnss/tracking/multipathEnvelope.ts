@@ -3,9 +3,10 @@ import { findRoot } from "@/lib/numeric/findRoot";
 import type { CorrelationShape } from "./correlationShape";
 
 /**
- * Error in chips that one reflection makes in a code loop with coherent early-minus-late discriminator, BPSK, no filter.
- * Closed form from the triangle's geometry; the same envelopes as in van Nee and in Braasch.
- * @param ratio amplitude of the reflection to the direct signal, above 0 in phase and below 0 in opposite phase, |ratio| < 1
+ * Error in chips that one reflection makes in a code loop with coherent early-minus-late discriminator, BPSK, no
+ * filter. Closed form from the triangle's geometry; the same envelopes as in van Nee and in Braasch.
+ * @param ratio amplitude of the reflection to the direct signal, above 0 in phase and below 0 in opposite phase,
+ *   |ratio| < 1
  * @param delayChips of the reflection behind the direct signal, from 0
  * @param spacingChips early to late, above 0 up to 1
  * @returns above 0 when the code is measured late
@@ -33,8 +34,8 @@ export type ReflectedSignal = {
 };
 
 /**
- * Early minus late against the replica's error in chips: what a coherent code loop drives to 0. The replica is late above 0.
- * Definition.
+ * Early minus late against the replica's error in chips: what a coherent code loop drives to 0. The replica is late
+ * above 0. Definition.
  */
 export function earlyMinusLate(
   { shape, spacingChips, ratio, delayChips }: ReflectedSignal,
@@ -67,8 +68,8 @@ const FARTHEST_CHIPS = 1.5;
 const STEP_CHIPS = 1 / 256;
 
 /**
- * The error in chips at which such a loop settles: the zero of the discriminator nearest to 0 at which it rises, found to
- * 1e-9 chip. For any modulation and filter.
+ * The error in chips at which such a loop settles: the zero of the discriminator nearest to 0 at which it rises, found
+ * to 1e-9 chip. For any modulation and filter.
  * @returns NaN when no such zero lies within 1.5 chips
  */
 export function settledErrorChips(signal: ReflectedSignal): number {

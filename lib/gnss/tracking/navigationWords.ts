@@ -7,8 +7,8 @@ const DATA_BITS = 24;
 const PREAMBLE = [1, 0, 0, 0, 1, 0, 1, 1] as const;
 
 /**
- * Which data bits enter each parity bit, counted from 1, and which of the last two bits of the word before: D29* or D30*.
- * IS-GPS-200, Table 20-XIV.
+ * Which data bits enter each parity bit, counted from 1, and which of the last two bits of the word before: D29* or
+ * D30*. IS-GPS-200, Table 20-XIV.
  */
 // prettier-ignore
 const PARITY: ReadonlyArray<{ before: 29 | 30; bits: readonly number[] }> = [
@@ -23,7 +23,10 @@ const PARITY: ReadonlyArray<{ before: 29 | 30; bits: readonly number[] }> = [
 /** Last two bits, as sent, of the word before. */
 export type BitsBefore = readonly [d29: number, d30: number];
 
-/** The six parity bits that belong to 24 data bits. IS-GPS-200, Table 20-XIV. @param data bits 1 to 24 before any inversion */
+/**
+ * The six parity bits that belong to 24 data bits. IS-GPS-200, Table 20-XIV.
+ * @param data bits 1 to 24 before any inversion
+ */
 export const parityBits = (data: ArrayLike<number>, [d29, d30]: BitsBefore): number[] =>
   PARITY.map(({ before, bits }) => bits.reduce((sum, bit) => sum ^ data[bit - 1], before === 29 ? d29 : d30));
 
@@ -43,8 +46,8 @@ export function decodeWord(word: ArrayLike<number>, before: BitsBefore): number[
 /**
  * Data bits of the ten words of a subframe, 24 each.
  * @param bits 300 as received, first bit first, upright or turned over as a whole: a Costas loop cannot tell
- * @returns null for a word whose parity fails, or for all ten when the preamble is not there. The two bits before the first word
- *   are 0, for the tenth word always ends so (20.3.5.2); the preamble says whether all bits are turned over
+ * @returns null for a word whose parity fails, or for all ten when the preamble is not there. The two bits before the
+ *   first word are 0, for the tenth word always ends so (20.3.5.2); the preamble says whether all bits are turned over
  */
 export function decodeSubframe(bits: ArrayLike<number>): (number[] | null)[] {
   if (bits.length !== SUBFRAME_BITS) throw new RangeError(`decodeSubframe: ${SUBFRAME_BITS} bits, got ${bits.length}`);

@@ -20,9 +20,9 @@ const WEEKS_OF_TEN_BITS = 1024;
 const HAND_OVER_WORD = 1;
 
 /**
- * Time from the bits of GPS L1 C/A: each place with a preamble whose telemetry and hand-over words pass their parity, whose
- * subframe number is 1 to 5 and whose time of week fits. IS-GPS-200, 20.3.3.1 to 20.3.3.3. Twelve and more parity bits and the
- * preamble leave one wrong place in about a million bits; a second subframe 6 s later settles it.
+ * Time from the bits of GPS L1 C/A: each place with a preamble whose telemetry and hand-over words pass their parity,
+ * whose subframe number is 1 to 5 and whose time of week fits. IS-GPS-200, 20.3.3.1 to 20.3.3.3. Twelve and more parity
+ * bits and the preamble leave one wrong place in about a million bits; a second subframe 6 s later settles it.
  * @param bits 0 or 1 each; whole subframes are read, what is left over at the end is not
  */
 export function readNavigation(bits: ArrayLike<number>): SubframeTime[] {
@@ -47,15 +47,16 @@ export function readNavigation(bits: ArrayLike<number>): SubframeTime[] {
 }
 
 /**
- * Whole GPS week of a ten-bit week number: the first such week that is not before a known one. IS-GPS-200, 20.3.3.3.1.1: the
- * number starts again every 1024 weeks.
+ * Whole GPS week of a ten-bit week number: the first such week that is not before a known one. IS-GPS-200,
+ * 20.3.3.3.1.1: the number starts again every 1024 weeks.
  * @param notBefore a week that has surely begun, such as that of the software
  */
 export const wholeWeek = (tenBits: number, notBefore: number): number =>
   notBefore + ((((tenBits - notBefore) % WEEKS_OF_TEN_BITS) + WEEKS_OF_TEN_BITS) % WEEKS_OF_TEN_BITS);
 
 /**
- * Data bits from the prompts of code periods: the sign of the sum over each bit, 0 for above 0. The loop must be in phase lock.
+ * Data bits from the prompts of code periods: the sign of the sum over each bit, 0 for above 0. The loop must be in
+ * phase lock.
  * @param prompts complex sums, real and imaginary parts alternating
  * @param edge code period at which a bit begins
  */

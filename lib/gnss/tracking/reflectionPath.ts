@@ -7,8 +7,8 @@ export const groundExtraPathM = (heightM: number, elevationDeg: number): number 
   2 * heightM * sin(elevationDeg * RAD_PER_DEG);
 
 /**
- * Extra path in m of a reflection from an upright wall, 2 d cos(elevation) cos(azimuth difference): the satellite stands on
- * the antenna's side of the wall. Geometry; textbook.
+ * Extra path in m of a reflection from an upright wall, 2 d cos(elevation) cos(azimuth difference): the satellite
+ * stands on the antenna's side of the wall. Geometry; textbook.
  * @param azimuthDifferenceDeg between the satellite and the way from the wall to the antenna, at most 90
  */
 export const wallExtraPathM = (distanceM: number, elevationDeg: number, azimuthDifferenceDeg: number): number =>

@@ -14,8 +14,8 @@ const POINTS_PER_HALF = 32; // of a chip, or of a half period of its subcarrier
 const LARGEST_TABLE = 1 << 20;
 
 /**
- * A code behind an ideal low-pass filter, as the samples of a capture hold it: a filtered replica changes smoothly with the
- * delay, and the spacing between early and late may be finer than the samples.
+ * A code behind an ideal low-pass filter, as the samples of a capture hold it: a filtered replica changes smoothly with
+ * the delay, and the spacing between early and late may be finer than the samples.
  * @param halfBandHz lines up to here are kept
  */
 export function replicaTable(signal: SearchSignal, prn: number, halfBandHz: number): ReplicaTable {
@@ -30,7 +30,8 @@ export function replicaTable(signal: SearchSignal, prn: number, halfBandHz: numb
 }
 
 /**
- * Scale R/|R'| in chips of a code discriminator for this replica: its own correlation R and the slope of it at half of the spacing.
+ * Scale R/|R'| in chips of a code discriminator for this replica: its own correlation R and the slope of it at half of
+ * the spacing.
  * @param spacingChips early to late
  */
 export function discriminatorScaleChips(table: ReplicaTable, spacingChips: number): number {

@@ -1,9 +1,9 @@
 import { atan2, PI } from "@/lib/numeric/elementary";
 
 /**
- * Frequency in Hz that a loop has left in its prompts: the mean turn from one code period to the next inside the data bits, over the
- * period. A Costas loop whose sums last a bit of 20 ms can stand still 25 Hz off, a false lock that its own discriminator does not
- * see and this shows. Range +-1/(2 T).
+ * Frequency in Hz that a loop has left in its prompts: the mean turn from one code period to the next inside the data
+ * bits, over the period. A Costas loop whose sums last a bit of 20 ms can stand still 25 Hz off, a false lock that its
+ * own discriminator does not see and this shows. Range +-1/(2 T).
  * @param prompts complex sums of code periods, real and imaginary parts alternating
  * @param edge code period at which a bit begins
  */

@@ -17,7 +17,9 @@ import { discriminatorScaleChips, replicaTable } from "./replicaTable";
 export type TrackingStage = {
   /** Length in code periods; the last stage goes on to the end. */
   periods: number;
-  /** Code periods in one coherent sum; more than one needs the bit edge, which is then looked for in what went before. */
+  /**
+   * Code periods in one coherent sum; more than one needs the bit edge, which is then looked for in what went before.
+   */
   coherentPeriods: number;
   /** Early to late, above 0 and below 2. */
   spacingChips: number;
@@ -30,7 +32,9 @@ export type TrackingStage = {
   fllHz: number;
 };
 
-/** Pull-in by frequency lock, then phase lock at 1 ms, then longer sums: a start for C/A captures of 36 dB-Hz and more. */
+/**
+ * Pull-in by frequency lock, then phase lock at 1 ms, then longer sums: a start for C/A captures of 36 dB-Hz and more.
+ */
 export const USUAL_STAGES: readonly TrackingStage[] = [
   { periods: 200, coherentPeriods: 1, spacingChips: 1, dllHz: 5, pllOrder: 2, pllHz: 0, fllHz: 15 },
   { periods: 400, coherentPeriods: 1, spacingChips: 0.5, dllHz: 3, pllOrder: 2, pllHz: 15, fllHz: 3 },
@@ -55,14 +59,18 @@ export type Tracking = {
   records: TrackingRecord[];
   /** Prompt sum of each code period, real and imaginary parts alternating. */
   prompts: Float64Array;
-  /** Code period, counted from the first one summed, at which a data bit begins, below the bit's length; null if not found. */
+  /**
+   * Code period, counted from the first one summed, at which a data bit begins, below the bit's length; null if not
+   * found.
+   */
   bitEdge: number | null;
 };
 
 /**
- * Follows one satellite through a capture from what a search found: early, prompt and late sums over whole code periods, an
- * envelope code loop of second order helped by the carrier, a Costas loop (a plain one for a pilot) of order 1 to 3 and a
- * frequency loop beside it. Discriminators and filters: Kaplan & Hegarty, "Understanding GPS", 2nd edition, chapter 5.
+ * Follows one satellite through a capture from what a search found: early, prompt and late sums over whole code
+ * periods, an envelope code loop of second order helped by the carrier, a Costas loop (a plain one for a pilot) of
+ * order 1 to 3 and a frequency loop beside it. Discriminators and filters: Kaplan & Hegarty, "Understanding GPS", 2nd
+ * edition, chapter 5.
  * @param start code phase and Doppler at the first sample
  * @param onProgress called after each coherent sum, in samples
  */

@@ -46,8 +46,9 @@ function measured(interferer: Interferer): number {
   return narrowWideCn0DbHz(prompts, 100, 20, 1e-3);
 }
 
-// Betz; Kaplan & Hegarty, 2nd edition, chapter 6: what the separation of two spectra says is what a receiver reads. 25 blocks of 20 ms
-// scatter by about 0.4 dB, C/N0 counts the power in a band of 4 MHz, and the noise's edges are not those of a box.
+// Betz; Kaplan & Hegarty, 2nd edition, chapter 6: what the separation of two spectra says is what a receiver reads. 25
+// blocks of 20 ms scatter by about 0.4 dB, C/N0 counts the power in a band of 4 MHz, and the noise's edges are not
+// those of a box.
 describe("a satellite of 45 dB-Hz under interference of J/S 30 reads the effective C/N0", () => {
   const power = powerOfJs(30, CN0_DB_HZ, scale, RATE_HZ);
   test.each([

@@ -15,7 +15,8 @@ test("plain and binary offset carriers", () => {
   expect(modulationOfSignal(gpsL1cD)).toEqual(boc(1, 1));
 });
 
-// Galileo OS SIS ICD: E1-B and E1-C together have the MBOC spectrum; IS-GPS-800: L1C with pilot 75 % of the power in 29/33 slow chips.
+// Galileo OS SIS ICD: E1-B and E1-C together have the MBOC spectrum; IS-GPS-800: L1C with pilot 75 % of the power in
+// 29/33 slow chips.
 test("composite subcarriers make up the common spectrum", () => {
   for (const offsetHz of [0.4e6, 1.2e6, 6.138e6, 9e6]) {
     const common = powerSpectralDensity(MBOC, offsetHz);

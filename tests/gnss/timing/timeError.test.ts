@@ -123,7 +123,8 @@ describe("limits", () => {
 
 describe("a log", () => {
   const random = seededRandom("6".repeat(64), "log");
-  // Six hours at 10 s: mean 28 ns, a daily wave of 8 ns, noise of 1 ns, a step of 15 ns at reading 1300, two missed triggers.
+  // Six hours at 10 s: mean 28 ns, a daily wave of 8 ns, noise of 1 ns, a step of 15 ns at reading 1300, two missed
+  // triggers.
   const clean = Array.from(
     { length: 2160 },
     (_, n) => 28 + 8 * Math.sin((2 * Math.PI * n) / 8640) + random.gaussian() + (n >= 1300 ? 15 : 0),

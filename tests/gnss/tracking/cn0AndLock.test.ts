@@ -33,8 +33,8 @@ function promptsOf(cn0DbHz: number, count: number, edge: number, residualHz = 0)
 }
 
 describe("C/N0 from prompts", () => {
-  // Scatter over runs of 1 s: narrow and wide power 0.15 dB at 42 and 0.31 dB at 27 dB-Hz; moments 0.8 dB at 30 and 5 dB at 27.
-  // Values from a second program, 400 runs each.
+  // Scatter over runs of 1 s: narrow and wide power 0.15 dB at 42 and 0.31 dB at 27 dB-Hz; moments 0.8 dB at 30 and 5
+  // dB at 27. Values from a second program, 400 runs each.
   const runs = (cn0DbHz: number, of: (prompts: Float64Array) => number) =>
     Array.from({ length: 400 }, () => of(promptsOf(cn0DbHz, 1000, 0)));
   const narrow = (prompts: Float64Array) => narrowWideCn0DbHz(prompts, 0, 20, 1e-3);
@@ -168,7 +168,8 @@ describe("loop filter", () => {
     });
   };
 
-  // A loop of order n follows a motion of order n - 1 without error and lags one of order n by motion/w0^n: Kaplan & Hegarty 5.6.
+  // A loop of order n follows a motion of order n - 1 without error and lags one of order n by motion/w0^n: Kaplan &
+  // Hegarty 5.6.
   test.each([
     [1, 0.25, (t: number) => 3 * t, 3],
     [2, 0.53, (t: number) => 20 * t * t, 40],
@@ -183,7 +184,8 @@ describe("loop filter", () => {
   // White input noise of variance s2 per step gives an output of variance 2 Bn T s2: definition of the noise bandwidth.
   test.each([1, 2, 3] as const)("of order %s has the noise bandwidth it is named by", (order) => {
     const errors = follow(order, 5, () => 0, 200_000, 1).slice(2000);
-    // 4 Bn t = 4000 independent values: 1.1 % of the deviation, and 2 % of Bn T that bilinear integrators and one step of delay add
+    // 4 Bn t = 4000 independent values: 1.1 % of the deviation, and 2 % of Bn T that bilinear integrators and one step
+    // of delay add
     expectNearRelative(standardDeviation(errors), Math.sqrt(2 * 5 * 1e-3), 0.06, "output");
   });
 

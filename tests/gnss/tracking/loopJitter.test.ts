@@ -26,8 +26,8 @@ const loopOf = ({ Bn_Hz, D, CN0_dBHz, T_s }: Values) => ({
 });
 
 /**
- * Every formula by its number in tests/reference/signal-formulas.json, where each row names its source. T01 and T02: text of
- * the page seen; T03 to T06: from memory; T07: textbook.
+ * Every formula by its number in tests/reference/signal-formulas.json, where each row names its source. T01 and T02:
+ * text of the page seen; T03 to T06: from memory; T07: textbook.
  */
 const formulas: Record<string, (given: Values) => Values> = {
   T01: (given) => {

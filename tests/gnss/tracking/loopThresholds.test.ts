@@ -33,7 +33,8 @@ test("at the threshold of a code loop three sigma are half of the spacing; a wid
   expectNear(codeMarginChips(0.01, -0.02, 0.5), 0.2, 1e-12, "margin");
 });
 
-// Kaplan & Hegarty, 2nd edition, 5.6.1: 1e-9 per g, 0.005 g^2/Hz from 20 to 2000 Hz at L1 make 1.42 degrees (from memory).
+// Kaplan & Hegarty, 2nd edition, 5.6.1: 1e-9 per g, 0.005 g^2/Hz from 20 to 2000 Hz at L1 make 1.42 degrees (from
+// memory).
 test("an oscillator that is shaken or poor adds jitter", () => {
   expectNear(vibrationJitterDeg(L1_HZ, 1e-9, 0.005, 20, 2000), 1.42, 0.005, "vibration");
   // by hand: 160 * 1e-10 * 1575.42e6 / 18

@@ -82,8 +82,8 @@ test("the envelope has both signs, 0 at no delay and beyond reach", () => {
   expectNear(rows[2].inPhaseChips, 0, 1e-9, "beyond 1 + d/2");
 });
 
-// By hand: beside the side peak at 1/2 chip |R| falls with slope 3 inwards and 1 outwards, so |E| = |L| at 0.55 chip for
-// a spacing of 0.2.
+// By hand: beside the side peak at 1/2 chip |R| falls with slope 3 inwards and 1 outwards, so |E| = |L| at 0.55 chip
+// for a spacing of 0.2.
 test("a power discriminator on BOC(1,1) has a false zero at its side peak, a coherent one does not rise there", () => {
   const clean = { shape: correlationShape(boc(1, 1), null), spacingChips: 0.2, ratio: 0, delayChips: 0 };
   const power = (x: number) => earlyMinusLatePower(clean, 0, x);

@@ -9,8 +9,8 @@ import { seededRandom } from "@/lib/numeric/random";
 import { GPS_SUBFRAMES, sentBits } from "@/tests/reference/gps-subframes";
 import { expectNear } from "@/tests/support/expectNear";
 
-// A subframe that a satellite sent, put on a carrier in noise: its hand-over word must come back through search place, loops, bit edge
-// and parity.
+// A subframe that a satellite sent, put on a carrier in noise: its hand-over word must come back through search place,
+// loops, bit edge and parity.
 test("the time of week and the week are read from the samples of seven seconds", () => {
   const random = seededRandom("f".repeat(64), "bits");
   const lead = Array.from({ length: 20 }, () => random.integer(0, 1));
