@@ -142,7 +142,7 @@ const SCREENS_AND_ENTRANCES: Row[] = [
     files: "app/*/_components/",
     // Actions arrive by their route; signing out is every route's.
     // The bench's list is made of the calculators' descriptions.
-    may: ["app", "components", "lib/auth/actions", "lib/policies", "lib/calculators"],
+    may: ["app", "components", "lib/auth/actions", "lib/policies", "lib/calculators", "lib/certificates/supervision"],
     types: [...VIEWS, "lib/checks", "lib/mdx"],
     packages: ["react", "next", "node:crypto", "@codemirror/", "@lezer/highlight", "@uiw/react-codemirror"],
   },

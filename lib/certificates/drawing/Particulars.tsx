@@ -1,16 +1,11 @@
 import { View } from "@react-pdf/renderer";
 import { dayInWords } from "../dates";
 import type { CertificateRecord } from "../record";
+import { SUPERVISION_IN_WORDS } from "../supervision";
 import { inPrint } from "./inPrint";
 import { type Density } from "./page";
 import { Row } from "./Row";
 import { RowPair } from "./RowPair";
-
-const SUPERVISION = {
-  open: "Open book, not supervised",
-  remote: "Supervised remotely",
-  "on-site": "Supervised on site",
-} as const;
 
 type Covered = Pick<CertificateRecord, "scope" | "limits" | "supervision" | "identity">;
 
@@ -22,7 +17,7 @@ export function Particulars({ record, density }: { record: Covered; density: Den
       <Row label="Limits" text={inPrint(record.limits)} density={density} />
       <RowPair
         rows={[
-          ["Supervision", SUPERVISION[record.supervision]],
+          ["Supervision", SUPERVISION_IN_WORDS[record.supervision]],
           ["Identity", identityInWords(record.identity)],
         ]}
         density={density}

@@ -12,6 +12,7 @@ import type { PublicVerification } from "@/lib/queries/getPublicVerification";
 import type { PublicVerificationRecord } from "@/lib/queries/getPublicVerificationRecord";
 import { MeasuredQuantities } from "./MeasuredQuantities";
 import { RegisterSentence } from "./RegisterSentence";
+import { SUPERVISION_IN_WORDS } from "@/lib/certificates/supervision";
 import { SaveRecord } from "./SaveRecord";
 
 const HEADS: Record<PublicVerification["standing"], Standing> = {
@@ -21,11 +22,6 @@ const HEADS: Record<PublicVerification["standing"], Standing> = {
   Superseded: "superseded",
   Expired: "expired",
   "Not yet valid": "not-yet-valid",
-};
-const SUPERVISION = {
-  open: "Open, listed aids allowed",
-  remote: "Supervised from a distance",
-  "on-site": "Supervised on site",
 };
 
 type RegisterAnswerProps = { entry: PublicVerification; record: PublicVerificationRecord | null };
@@ -127,7 +123,7 @@ const facts = (entry: PublicVerification) => [
   { label: "Limits", value: entry.limits },
   { label: "Issuer", value: entry.issuer.name, detail: entry.issuer.standing },
   { label: "Scheme", value: entry.scheme.edition },
-  { label: "Sat", value: SUPERVISION[entry.supervision] },
+  { label: "Sat", value: SUPERVISION_IN_WORDS[entry.supervision] },
   {
     label: "Decided by",
     value: "A decider",
