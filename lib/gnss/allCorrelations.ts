@@ -35,59 +35,47 @@ export function allCorrelations(
   const fft = createFft(size);
   const bits = 32 - Math.clz32(2 * length); // a digit from -N to N
   const digits = Math.floor((MANTISSA_BITS - SPARE_BITS) / bits);
-  const pairs = Array.from({ length: Math.ceil(count / 2) }, (_, n) => pairSpectrum(codes, 2 * n, size));
-  const product = new Float64Array(2 * size);
-  const lags = new Float64Array(2 * size);
+  const blocks = blockSpectra(codes, digits, 1 << bits, size);
+  const [padded, pair, product, lags] = Array.from({ length: 4 }, () => new Float64Array(2 * size));
   const words = new Int32Array(lags.buffer);
-  for (let first = 0; first < count; first += digits) {
-    const block = codes.slice(first, first + digits);
-    const spectrum = blockSpectrum(block, 1 << bits, size);
-    for (let even = 0; even < first + block.length; even += 2) {
-      timesConjugate(product, pairs[even / 2], spectrum);
+  for (let even = 0; even < count; even += 2) {
+    const last = Math.min(even + 1, count - 1);
+    for (let n = 0; n < length; n++) {
+      padded[2 * n] = codes[even][n];
+      padded[2 * n + 1] = codes[last][n]; // the last code of an odd number stands twice
+    }
+    fft.transform(pair, padded);
+    for (let block = Math.floor(even / digits); block < blocks.length; block++) {
+      timesConjugate(product, pair, blocks[block]);
       fft.transform(lags, product);
       placeDigits(lags, length, bits, digits);
-      for (let i = even; i < Math.min(even + 2, count); i++)
-        for (let j = Math.max(i, first); j < first + block.length; j++) {
-          readDigit(
-            result,
-            words,
-            { row: i * count + j, mirrored: j * count + i, length },
-            {
-              word: 2 * (i - even),
-              shift: bits * (j - first),
-              bits,
-            },
-          );
+      const first = block * digits;
+      for (let i = even; i <= last; i++)
+        for (let j = Math.max(i, first); j < Math.min(first + digits, count); j++) {
+          const rows = { row: i * count + j, mirrored: j * count + i, length };
+          readDigit(result, words, rows, { word: 2 * (i - even), shift: bits * (j - first), bits });
         }
     }
   }
   return result;
 }
 
-function pairSpectrum(codes: readonly Chips[], even: number, size: number): Float64Array {
-  const padded = new Float64Array(2 * size);
-  for (let part = 0; part < 2 && even + part < codes.length; part++) {
-    const code = codes[even + part];
-    for (let n = 0; n < code.length; n++) padded[2 * n + part] = code[n];
-  }
-  const spectrum = new Float64Array(2 * size);
-  createFft(size).transform(spectrum, padded);
-  return spectrum;
-}
-
-/** Spectrum of the weighted sum of the codes, each laid down twice. */
-function blockSpectrum(block: readonly Chips[], base: number, size: number): Float64Array {
+/** Spectra of weighted sums of so many codes each, laid down twice in a row: see `exactCorrelation`. */
+function blockSpectra(codes: readonly Chips[], digits: number, base: number, size: number): Float64Array[] {
   const twice = new Float64Array(2 * size);
-  const length = block[0].length;
-  let weight = 1 / size;
-  for (const code of block) {
-    for (let n = 0; n < length; n++) twice[2 * n] += weight * code[n];
-    weight *= base;
-  }
-  twice.copyWithin(2 * length, 0, 2 * length - 2);
-  const spectrum = new Float64Array(2 * size);
-  createFft(size).transform(spectrum, twice);
-  return spectrum;
+  const length = codes[0].length;
+  return Array.from({ length: Math.ceil(codes.length / digits) }, (_, block) => {
+    twice.fill(0);
+    let weight = 1 / size;
+    for (const code of codes.slice(block * digits, (block + 1) * digits)) {
+      for (let n = 0; n < length; n++) twice[2 * n] += weight * code[n];
+      weight *= base;
+    }
+    twice.copyWithin(2 * length, 0, 2 * length - 2);
+    const spectrum = new Float64Array(2 * size);
+    createFft(size).transform(spectrum, twice);
+    return spectrum;
+  });
 }
 
 /**
