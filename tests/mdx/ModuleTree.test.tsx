@@ -63,7 +63,7 @@ test("the demonstration's module renders whole, with its calculators, formulas a
   const cards = checkCards(module.checks);
   const page = renderToStaticMarkup(<ModuleTree tree={module.tree} checkCards={cards} />);
   expect(page).toContain("code 5 against code 4");
-  expect(page).toContain("False alarms per search");
+  expect(page).toContain("False alarms per cell");
   expect(page).toContain("Receive only.");
   expect(page).toContain("On Carrow Quay nobody climbs a boom");
   expect(page).toContain("<math");

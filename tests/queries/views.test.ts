@@ -87,13 +87,13 @@ const VIEWS: Record<string, View> = {
   },
   getModule: {
     run: ({ lead }, { module }) => getModule(lead, module.id),
-    fields: `code id releases[].fingerprint releases[].id releases[].isDraft releases[].kind releases[].number
+    fields: `code completions* id releases[].fingerprint releases[].id releases[].isDraft releases[].kind releases[].number
       releases[].reason releases[].releasedAt releases[].releasedBy revision savedAt savedBy source title`,
   },
   getPublicVerification: {
     run: (_firm, { certificate }) => getPublicVerification(certificate.number, NOW),
     fields: `cautions[] decided.at decided.outsideLine demonstration effectiveOn fingerprint ground holder identity
-      issuedAt issuer.accreditation issuer.name issuer.standing lastDay limits number pdfSha256 quantities[].check
+      issuedAt issuer.accreditation issuer.name issuer.standing issuer.timeZone lastDay limits number pdfSha256 quantities[].check
       quantities[].critical quantities[].label quantities[].tolerance quantities[].title readAt release.code release.fingerprint release.number
       scheme.code scheme.edition scheme.title scope standing standingSince supervision today`,
   },

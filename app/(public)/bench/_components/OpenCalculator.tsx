@@ -25,7 +25,7 @@ export function OpenCalculator({ calculator, query, heading: Heading }: OpenCalc
   return (
     <>
       <p className="bench-back no-print">
-        <BenchLink id={null} className="link">
+        <BenchLink id={null} className="link inline-flex min-h-11 items-center">
           All calculators
         </BenchLink>
       </p>
