@@ -2,6 +2,8 @@ import type { ComponentType } from "react";
 import type { BenchCalculator, CalculatorTag } from "@/lib/calculators/calculators";
 import type { CalculatorProps } from "./calculatorProps";
 import { CableEcho } from "./CableEcho";
+import { ChainLevels } from "./ChainLevels";
+import { DelayBudget } from "./DelayBudget";
 import { SearchPlan } from "./SearchPlan";
 import { TwoCodes } from "./TwoCodes";
 
@@ -9,5 +11,7 @@ import { TwoCodes } from "./TwoCodes";
 export const BODIES: { [T in CalculatorTag]: ComponentType<CalculatorProps<Extract<BenchCalculator, { tag: T }>>> } = {
   TwoCodes,
   SearchPlan,
+  ChainLevels,
   CableEcho,
+  DelayBudget,
 };

@@ -16,8 +16,12 @@ const DRAWN: Record<CalculatorTag, () => Small> = {
     return over(range(0, 44, 44), (lag) => values[lag]);
   },
   SearchPlan: () => over(range(-3, 3, 32), (sigmas) => erfc(-sigmas) / 2),
+  // Gains above the line, losses below.
+  ChainLevels: () => ({ x: range(0, 4, 4), y: [7, -3, 4, -5, -2], bars: true }),
   // The loss of a run, and the echo that stands up from it.
   CableEcho: () => over(range(0, 40, 40), (metres) => metres / 4 + 9 * exp(-((metres - 26) * (metres - 26)) / 2)),
+  // Parts of the way to the pulse; the last one leads.
+  DelayBudget: () => ({ x: range(0, 5, 5), y: [4, 12, 6, 1, 2, -3], bars: true }),
 };
 
 const kept = new Map<CalculatorTag, Small>();

@@ -18,6 +18,9 @@ export type Curve = Points & {
   nameAt?: { x: number; y: number; end?: boolean };
 };
 
+/** A level that counts at one place only: a short bar, in vermilion when it is not kept. */
+export type PlaceMark = { x: number; y: number; kept: boolean };
+
 export type LinePlotProps = {
   x: Axis;
   y: Axis;
@@ -27,6 +30,7 @@ export type LinePlotProps = {
   summary: string;
   bands?: readonly Band[];
   limits?: readonly Limit[];
+  marks?: readonly PlaceMark[];
   /** Left out, the plot has no cursor. */
   cursor?: LineCursor & { lines: (index: number) => readonly string[] };
   grid?: "both" | "y" | "none";
@@ -51,6 +55,7 @@ export function LinePlot({
   summary,
   bands,
   limits,
+  marks = [],
   cursor,
   grid,
   height = 240,
@@ -96,6 +101,16 @@ export function LinePlot({
         {/* The subject is drawn last, over what it is compared with. */}
         {[...curves].reverse().map((curve) => (
           <path key={curve.name} d={curvePath(curve, g)} className="plot-curve" {...strokeOf(curve)} />
+        ))}
+        {marks.map(({ x: place, y: level, kept }, at) => (
+          <path
+            key={at}
+            data-mark={kept ? "kept" : "passed"}
+            d={`M${g.x(place) - 11} ${g.y(level)}h22M${g.x(place) - 11} ${g.y(level)}v-5M${g.x(place) + 11} ${g.y(level)}v-5`}
+            className="plot-curve"
+            stroke={kept ? "var(--ink)" : "var(--minus-deep)"}
+            strokeWidth={kept ? 2 : 3}
+          />
         ))}
       </PlotFrame>
       {cursor && <CursorTag g={g} {...at} lines={lines} />}

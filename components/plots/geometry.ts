@@ -11,6 +11,8 @@ export type Axis = {
   decimals?: number;
   /** Shows a plus: Doppler, differences, levels. */
   signed?: boolean;
+  /** Word of a tick, where it is no figure: a part's name, a power of ten. */
+  text?: (value: number) => string;
 };
 
 export type PlotGeometry = {
@@ -37,6 +39,7 @@ const BOTTOM = 42;
 const RIGHT = 12;
 /** Width of one figure of a label at 12 px, rounded up. */
 export const FIGURE_PX = 7.2;
+const WORD_PX = 6.2; // of one letter, the mean of a word
 /** Labels of the x axis stand side by side; those of the y axis only need their own height. */
 export const MIN_GAP_X_PX = 56;
 export const MIN_GAP_Y_PX = 22;
@@ -78,9 +81,10 @@ function ticksOf(axis: Axis, lengthPx: number, minGapPx: number): Ticks {
   const shown = axis.ticks.filter((value) => value >= axis.from && value <= axis.to);
   const longest = Math.max(
     0,
-    ...shown.map((value) => formatNumber(value, axis.decimals ?? decimals, axis.signed).length),
+    ...shown.map((value) => (axis.text?.(value) ?? formatNumber(value, axis.decimals ?? decimals, axis.signed)).length),
   );
-  const gap = Math.min(minGapPx, longest * FIGURE_PX + 10);
+  // Words are as long as they are; of figures some may be left out where a tick keeps its distance.
+  const gap = axis.text ? longest * WORD_PX + 10 : Math.min(minGapPx, longest * FIGURE_PX + 10);
   return { major: spaced(shown, lengthPx / (axis.to - axis.from), gap), minor: [], decimals };
 }
 
@@ -93,4 +97,4 @@ function spaced(values: readonly number[], pxPerUnit: number, minGapPx: number):
 }
 
 const labelOf = (axis: Axis, ticks: Ticks) => (value: number) =>
-  formatNumber(value, axis.decimals ?? ticks.decimals, axis.signed);
+  axis.text?.(value) ?? formatNumber(value, axis.decimals ?? ticks.decimals, axis.signed);

@@ -37,8 +37,8 @@ export type ChoiceInput = Described & {
   start: string;
 };
 
-/** A figure of each row of a list; `unit` as printed. */
-export type Column = Bounded & { key: string; label: string; unit?: string; start: number | null };
+/** A figure of each row of a list, in the place that the list of columns gives it. */
+export type Column = Bounded & { key: string; label: string; unit: Unit; start: number | null };
 
 /** A list of named things with the same figures each. */
 export type RowsInput = Described & {

@@ -1,10 +1,18 @@
 import type { Calculator } from "./calculator";
 import { CABLE_ECHO } from "./cableEcho";
+import { CHAIN_LEVELS } from "./chainLevels";
+import { DELAY_BUDGET } from "./delayBudget";
 import { SEARCH_PLAN } from "./searchPlan";
 import { TWO_CODES } from "./twoCodes";
 
 /** The bench, by number. A calculator's body stands in `components/calculators/bodies.tsx` under the same tag. */
-export const CALCULATORS = [TWO_CODES, SEARCH_PLAN, CABLE_ECHO] as const satisfies readonly Calculator[];
+export const CALCULATORS = [
+  TWO_CODES,
+  SEARCH_PLAN,
+  CHAIN_LEVELS,
+  CABLE_ECHO,
+  DELAY_BUDGET,
+] as const satisfies readonly Calculator[];
 
 export type BenchCalculator = (typeof CALCULATORS)[number];
 export type CalculatorTag = BenchCalculator["tag"];

@@ -44,5 +44,5 @@ export function readRowName(text: string): string | null {
 
 function readCell(column: Column, text: string | undefined): ReadInput<number | null> {
   if (text === undefined || text.trim() === "") return { value: column.start };
-  return readFigure(column, "1", /^\s*[-\u2212\u2013]\s*$/.test(text) ? "" : text);
+  return readFigure(column, column.unit, /^\s*[-\u2212\u2013]\s*$/.test(text) ? "" : text);
 }

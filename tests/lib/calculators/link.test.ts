@@ -119,7 +119,7 @@ describe("rows", () => {
     ["", "Give at least one part."],
     ["a:1;b:1;c:1;d:1", "Give at most 3 parts."],
     ["a: 1, 2, 3", "a has 3 figures; a part has 2, with a comma between them."],
-    ["a: 51", "a, Gain: The range is \u221240 to 50."],
+    ["a: 51", "a, Gain: The range is \u221240 to 50\u00a0dB."],
     ["a: x", "a, Gain: “x” is not a number."],
     ['a"b: 1', "The name of part 1 is 1 to 28 letters without : ; , or quotes."],
   ])("%j is refused with the reason", (text, problem) => expect(readInput(parts, text)).toEqual({ problem }));
