@@ -5,7 +5,7 @@ import { sampleCount, type SampledCapture } from "./sampledCapture";
 /** Where sums lie in a capture: they follow each other from `startS`, each `lengthS` long. */
 export type SumTimes = { startS: number; lengthS: number; sums: number };
 
-/** Lines of a stretch of the capture for one Doppler: line k stands at 2 * (middle + k). */
+/** Lines of a stretch of the capture for one Doppler: line k stands at 2 * (middle + k). Do not write into them. */
 export type TunedLines = { middle: number; line(sum: number): Float64Array };
 
 const ANCHOR = 256; // a turning phase is computed afresh this often, so that rounding does not pile up
@@ -65,7 +65,6 @@ export function createReceivedLines(
     return out;
   };
 
-  const passing = new Float64Array(2 * count);
   const kept: { centreHz: number; lines: Float64Array[] }[] = [];
   const mayKeep = Math.floor(MOST_KEPT_BYTES / (16 * count * times.sums));
   return (dopplerHz) => {
@@ -73,7 +72,7 @@ export function createReceivedLines(
     const shift = Math.abs(whole) <= reach ? whole : 0;
     const centreHz = dopplerHz - shift * spacingHz;
     const middle = highest + reach + shift;
-    if (mayKeep === 0) return { middle, line: (sum) => load(passing, sum, centreHz) };
+    if (mayKeep === 0) return { middle, line: (sum) => load(new Float64Array(2 * count), sum, centreHz) };
     let found = kept.find((one) => Math.abs(one.centreHz - centreHz) < 1e-6);
     if (!found) {
       found = { centreHz, lines: [] };

@@ -18,12 +18,16 @@ export type HighestCell = {
   cellNoise: number;
 };
 
+const SUMS_AT_ONCE = 16; // spectra of so many sums are held while the codes go over them
+const MOST_POWER_BYTES = 32e6;
+
 /**
- * Searches every Doppler row and every code phase for all codes at once. Rows that differ by whole line spacings have the
- * same received lines, only shifted against the code's; they are computed once and serve every satellite.
+ * Searches every Doppler row and every code phase for all codes. Rows that differ by whole line spacings have the same
+ * received lines, only shifted against the code's; they are computed once and serve every satellite. Memory does not grow
+ * with the number of sums.
  * The noise of a grid is the median over its rows of their mean power, which a signal in a few rows does not move.
  * @param received lines of the plan's sums, reaching as far as its Dopplers
- * @param onProgress called after each Doppler row
+ * @param onProgress called after each Doppler row, with the share of the work done
  * @returns one cell per replica, in that order
  */
 export function searchCells(
@@ -34,46 +38,75 @@ export function searchCells(
   plan: SearchPlanInForce,
   onProgress?: (done: number, total: number) => void,
 ): HighestCell[] {
+  const { dopplersHz, sums } = plan;
   const { places, add } = createProductPower(lags);
-  const shifted = Array.from({ length: plan.sums }, () => new Float64Array(2 * lags));
-  const power = new Float64Array(lags);
+  const groups = rowsWithSameLines(dopplersHz, lineSpacingHz(signal));
+  const mostRows = Math.max(...groups.map((rows) => rows.length));
+  const atOnce = Math.max(1, Math.min(replicas.length, Math.floor(MOST_POWER_BYTES / (8 * lags * mostRows))));
+  const powers = Array.from({ length: mostRows * atOnce }, () => new Float64Array(lags));
+  const shifted = Array.from({ length: Math.min(SUMS_AT_ONCE, sums) }, () => new Float64Array(2 * lags));
   const best = replicas.map(({ prn }) => ({ prn, peak: -1, place: 0, row: 0 }));
-  const means = replicas.map(() => new Float64Array(plan.dopplersHz.length));
-  rowsByLines(plan.dopplersHz, lineSpacingHz(signal)).forEach((row, done, rows) => {
-    const { middle, line } = received(plan.dopplersHz[row]);
-    const driftChipsPerS = codeDriftChipsPerS(signal, plan.dopplersHz[row]);
-    shifted.forEach((out, sum) => {
-      const middleS = plan.startS + (sum + 0.5) * plan.coherentS;
-      shiftLines(out, line(sum), highest, middle, (driftChipsPerS * middleS) / signal.lengthChips);
+  const means = replicas.map(() => new Float64Array(dopplersHz.length));
+
+  /** Adds the powers of some sums to the grids of some codes, for rows with the same lines. */
+  const addSums = (rows: readonly number[], codes: readonly CodeReplica[], firstSum: number) => {
+    const count = Math.min(SUMS_AT_ONCE, sums - firstSum);
+    const tuned = rows.map((row) => received(dopplersHz[row]));
+    const lines = Array.from({ length: count }, (_, n) => tuned[0].line(firstSum + n));
+    rows.forEach((row, place) => {
+      const driftChipsPerS = codeDriftChipsPerS(signal, dopplersHz[row]);
+      for (let n = 0; n < count; n++) {
+        const middleS = plan.startS + (firstSum + n + 0.5) * plan.coherentS;
+        shiftLines(shifted[n], lines[n], highest, tuned[place].middle, (driftChipsPerS * middleS) / signal.lengthChips);
+      }
+      codes.forEach(({ conjugateLines }, n) => {
+        const power = powers[place * atOnce + n];
+        for (let m = 0; m < count; m++) add(power, shifted[m], conjugateLines);
+      });
     });
-    replicas.forEach((replica, n) => {
-      power.fill(0);
-      for (const spectrum of shifted) add(power, spectrum, replica.conjugateLines);
-      const { place, mean } = highestAndMean(power);
-      means[n][row] = mean;
-      if (power[place] > best[n].peak) Object.assign(best[n], { peak: power[place], place, row });
-    });
-    onProgress?.(done + 1, rows.length);
-  });
+  };
+
+  let done = 0;
+  for (let firstCode = 0; firstCode < replicas.length; firstCode += atOnce) {
+    const codes = replicas.slice(firstCode, firstCode + atOnce);
+    for (const rows of groups) {
+      for (const power of powers) power.fill(0);
+      for (let sum = 0; sum < sums; sum += SUMS_AT_ONCE) addSums(rows, codes, sum);
+      rows.forEach((row, place) => {
+        codes.forEach((_, n) => {
+          const power = powers[place * atOnce + n];
+          const found = highestAndMean(power);
+          means[firstCode + n][row] = found.mean;
+          const known = best[firstCode + n];
+          if (power[found.place] > known.peak)
+            Object.assign(known, { peak: power[found.place], place: found.place, row });
+        });
+        done += codes.length / replicas.length;
+        onProgress?.(done, dopplersHz.length);
+      });
+    }
+  }
   return best.map(({ prn, peak, place, row }, n) => {
     const cellNoise = median(means[n]);
     return {
       prn,
       codePhaseChips: (places[place] * signal.lengthChips) / lags,
-      dopplerHz: plan.dopplersHz[row],
+      dopplerHz: dopplersHz[row],
       peak: cellNoise > 0 ? peak / cellNoise : 0, // a silent capture has neither noise nor signals
       cellNoise,
     };
   });
 }
 
-/** Row numbers with those next to each other that share their lines. */
-function rowsByLines(dopplersHz: Float64Array, spacingHz: number): number[] {
-  const place = (row: number) => {
-    const spacings = dopplersHz[row] / spacingHz;
-    return Math.round(1e6 * (spacings - Math.floor(spacings))) % 1e6;
-  };
-  return Array.from(dopplersHz, (_, row) => row).sort((a, b) => place(a) - place(b) || a - b);
+/** Rows whose Dopplers differ by whole spacings, group by group. */
+function rowsWithSameLines(dopplersHz: Float64Array, spacingHz: number): number[][] {
+  const groups = new Map<number, number[]>();
+  dopplersHz.forEach((dopplerHz, row) => {
+    const spacings = dopplerHz / spacingHz;
+    const key = Math.round(1e6 * (spacings - Math.floor(spacings))) % 1e6;
+    groups.set(key, [...(groups.get(key) ?? []), row]);
+  });
+  return [...groups.values()];
 }
 
 /**
