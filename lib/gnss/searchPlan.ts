@@ -10,6 +10,7 @@ import {
   searchTimeS,
   thresholdSigma2,
 } from "./detection";
+import { createDetectionCurve } from "./detectionCurve";
 
 /** A search plan and the satellite it is meant for. */
 export type SearchPlan = {
@@ -55,14 +56,15 @@ export type PlanPerformance = {
  */
 export function planPerformance(plan: SearchPlan): PlanPerformance {
   check(plan);
-  const cells = (2 * Math.ceil(plan.windowHz / plan.dopplerBinHz) + 1) * (CA_LENGTH_CHIPS / plan.codeStepChips);
+  const cells = cellsOf(plan);
   const threshold =
     plan.thresholdSigma2 ?? thresholdSigma2(falseAlarmPerCell(plan.falseAlarmPerSearch, cells), plan.sums);
   const perCell = falseAlarmOfThreshold(threshold, plan.sums);
+  const drawSnr = createSnrDraw(plan);
   let sum = 0;
   let squares = 0;
   for (let n = 0; n < plan.draws; n++) {
-    const detection = detectionProbability(threshold, plan.sums, drawSnr(plan));
+    const detection = detectionProbability(threshold, plan.sums, drawSnr());
     sum += detection;
     squares += detection * detection;
   }
@@ -79,28 +81,61 @@ export function planPerformance(plan: SearchPlan): PlanPerformance {
   };
 }
 
-/** Mean ratio rho of the K coherent sums for one drawn satellite. */
-function drawSnr({ cn0DbHz, coherentMs, sums, dopplerBinHz, codeStepChips, random }: SearchPlan): number {
-  const offsetChips = (random.uniform() - 0.5) * codeStepChips;
-  const turns = ((random.uniform() - 0.5) * dopplerBinHz * coherentMs) / 1000; // phase gained in one coherent sum
-  const code = Math.max(0, 1 - Math.abs(offsetChips));
-  const smooth = flippedPower(turns, 0);
-  let power = sums * smooth;
-  for (let edgeMs = random.uniform() * DATA_BIT_MS; edgeMs < sums * coherentMs; edgeMs += DATA_BIT_MS) {
-    if (random.uniform() < 0.5) continue;
-    const place = edgeMs / coherentMs;
-    power += flippedPower(turns, place - Math.floor(place)) - smooth;
-  }
-  return (coherentSnr(cn0DbHz, coherentMs / 1000) * code * code * power) / sums;
+/**
+ * Detection probability of a plan alone, for screens that follow every change of it at once: the same draws as
+ * `planPerformance`, their probabilities from a curve. Within 1e-6 of its `detection`; what is marked comes from there.
+ */
+export function planDetection(plan: SearchPlan): number {
+  check(plan);
+  const cells = cellsOf(plan);
+  const threshold =
+    plan.thresholdSigma2 ?? thresholdSigma2(falseAlarmPerCell(plan.falseAlarmPerSearch, cells), plan.sums);
+  const detection = createDetectionCurve(threshold, plan.sums);
+  const drawSnr = createSnrDraw(plan);
+  let sum = 0;
+  for (let n = 0; n < plan.draws; n++) sum += detection(drawSnr());
+  return sum / plan.draws;
 }
 
-/** Power left of a coherent sum whose phase gains `turns` and whose sign flips at fraction a: |2 E(a) - 1 - E(1)|^2/(2 pi turns)^2. */
-function flippedPower(turns: number, a: number): number {
-  if (Math.abs(turns) < 1e-6) return (1 - 2 * a) * (1 - 2 * a);
-  const re = 2 * cosTurns(turns * a) - 1 - cosTurns(turns);
-  const im = 2 * sinTurns(turns * a) - sinTurns(turns);
+const cellsOf = ({ windowHz, dopplerBinHz, codeStepChips }: SearchPlan): number =>
+  (2 * Math.ceil(windowHz / dopplerBinHz) + 1) * (CA_LENGTH_CHIPS / codeStepChips);
+
+/** Draws satellites one after the other. @returns a function that gives the mean ratio rho of the K coherent sums of the next */
+function createSnrDraw({ cn0DbHz, coherentMs, sums, dopplerBinHz, codeStepChips, random }: SearchPlan): () => number {
+  const snr = coherentSnr(cn0DbHz, coherentMs / 1000);
+  return () => {
+    const offsetChips = (random.uniform() - 0.5) * codeStepChips;
+    const turns = ((random.uniform() - 0.5) * dopplerBinHz * coherentMs) / 1000; // phase gained in one coherent sum
+    const code = Math.max(0, 1 - Math.abs(offsetChips));
+    const end = { c: cosTurns(turns), s: sinTurns(turns) };
+    const smooth = powerLeft(turns, end, 1, 0);
+    let power = sums * smooth;
+    for (let edgeMs = random.uniform() * DATA_BIT_MS; edgeMs < sums * coherentMs; edgeMs += DATA_BIT_MS) {
+      if (random.uniform() < 0.5) continue;
+      const place = edgeMs / coherentMs;
+      power += flippedPower(turns, end, place - Math.floor(place)) - smooth;
+    }
+    return (snr * code * code * power) / sums;
+  };
+}
+
+type PhaseAtEnd = { c: number; s: number };
+
+/** Power left of a coherent sum whose phase gains `turns` and whose sign flips at fraction a. */
+function flippedPower(turns: number, end: PhaseAtEnd, a: number): number {
+  if (Math.abs(turns) < NO_TURNS) return (1 - 2 * a) * (1 - 2 * a);
+  return powerLeft(turns, end, cosTurns(turns * a), sinTurns(turns * a));
+}
+
+/** |2 E(a) - 1 - E(1)|^2/(2 pi turns)^2, c and s being the parts of E(a). */
+function powerLeft(turns: number, end: PhaseAtEnd, c: number, s: number): number {
+  if (Math.abs(turns) < NO_TURNS) return 1;
+  const re = 2 * c - 1 - end.c;
+  const im = 2 * s - end.s;
   return (re * re + im * im) / (2 * PI * turns * (2 * PI * turns));
 }
+
+const NO_TURNS = 1e-6;
 
 function check(plan: SearchPlan): void {
   const rules: [boolean, string, number][] = [

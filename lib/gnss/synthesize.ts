@@ -26,22 +26,44 @@ export function synthesizeCi8(
   random: Random,
   onProgress?: (done: number, total: number) => void,
 ): { samples: Int8Array; scale: number } {
-  const perMs = samplesPerCodePeriod(scene.rateHz);
-  if (!Number.isInteger(scene.durationMs) || scene.durationMs < 1)
-    throw new RangeError(`synthesizeCi8: whole milliseconds from 1, got ${scene.durationMs}`);
-  const samples = new Int8Array(2 * perMs * scene.durationMs);
-  const block = new Float64Array(2 * perMs);
-  for (let ms = 0; ms < scene.durationMs; ms++) {
-    block.fill(0);
-    for (const satellite of scene.satellites) addSatellite(block, satellite, scene.rateHz, ms * perMs);
-    const start = 2 * ms * perMs;
-    for (let n = 0; n < block.length; n++) {
-      const counts = Math.floor(block[n] + COUNTS_PER_SIGMA * random.gaussian() + 0.5);
-      samples[start + n] = Math.max(-FULL_SCALE, Math.min(FULL_SCALE, counts));
-    }
-    onProgress?.(ms + 1, scene.durationMs);
+  const blocks = synthesizeBlocks(scene, random);
+  const samples = new Int8Array(2 * samplesPerCodePeriod(scene.rateHz) * scene.durationMs);
+  let ms = 0;
+  for (const block of blocks) {
+    samples.set(block, ms * block.length);
+    ms++;
+    onProgress?.(ms, scene.durationMs);
   }
   return { samples, scale: COUNTS_PER_SIGMA };
+}
+
+/**
+ * The same samples millisecond by millisecond, for captures too long to be held.
+ * @returns blocks of I, Q, I, Q ...; the array is used again for the next block
+ */
+export function synthesizeBlocks(scene: Scene, random: Random): Generator<Int8Array, void> {
+  const perMs = samplesPerCodePeriod(scene.rateHz);
+  if (!Number.isInteger(scene.durationMs) || scene.durationMs < 1)
+    throw new RangeError(`synthesizeBlocks: whole milliseconds from 1, got ${scene.durationMs}`);
+  return blocksOf(scene, random, perMs);
+}
+
+function* blocksOf({ rateHz, durationMs, satellites }: Scene, random: Random, perMs: number) {
+  const block = new Float64Array(2 * perMs);
+  const samples = new Int8Array(2 * perMs);
+  for (let ms = 0; ms < durationMs; ms++) {
+    block.fill(0);
+    for (const satellite of satellites) addSatellite(block, satellite, rateHz, ms * perMs);
+    addNoise(samples, block, random);
+    yield samples;
+  }
+}
+
+function addNoise(samples: Int8Array, block: Float64Array, random: Random): void {
+  for (let n = 0; n < block.length; n++) {
+    const counts = Math.floor(block[n] + COUNTS_PER_SIGMA * random.gaussian() + 0.5);
+    samples[n] = Math.max(-FULL_SCALE, Math.min(FULL_SCALE, counts));
+  }
 }
 
 /** Adds one satellite to a block that starts at sample `first`; phases are computed afresh for each block. */

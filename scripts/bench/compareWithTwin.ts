@@ -3,6 +3,9 @@ import { startTwin } from "./startTwin";
 
 export type Comparison = { rows: string[][]; notes: string[]; differences: string[] };
 
+const WARM_MS = 1500;
+const MOST_WARM_ROUNDS = 50;
+
 /** Runs a bench and its twin in turns and sets the medians side by side. */
 export async function compareWithTwin(
   bench: Bench,
@@ -16,15 +19,20 @@ export async function compareWithTwin(
     const answers: unknown[] = [];
     const theirs: number[] = [];
     const ours = contest.contenders.map((): number[] => []);
-    for (let round = -1; round < rounds; round++) {
+    const runAll = async (keep: boolean) => {
       const seconds = await twin.run();
-      if (round >= 0) theirs.push(seconds); // the first round warms both up
+      if (keep) theirs.push(seconds);
       for (const [n, contender] of contest.contenders.entries()) {
         const started = performance.now();
         answers[n] = await contender.run();
-        if (round >= 0) ours[n].push((performance.now() - started) / 1000);
+        if (keep) ours[n].push((performance.now() - started) / 1000);
       }
-    }
+    };
+    // Short work needs more rounds before all of it is compiled.
+    const warmUntil = performance.now() + WARM_MS;
+    for (let round = 0; round === 0 || (round < MOST_WARM_ROUNDS && performance.now() < warmUntil); round++)
+      await runAll(false);
+    for (let round = 0; round < rounds; round++) await runAll(true);
     const reference = median(theirs);
     const rows = contest.contenders.map(({ name, target }, n) => {
       const ratio = median(ours[n]) / reference;

@@ -4,7 +4,7 @@ import { bandLimitedCode, CODE_TABLE_POINTS, highestLineInBand } from "@/lib/gns
 import { caCode } from "@/lib/gnss/caCode";
 import { codeHarmonics } from "@/lib/gnss/codeHarmonics";
 import type { Scene, SceneSatellite } from "@/lib/gnss/scene";
-import { synthesizeCi8 } from "@/lib/gnss/synthesize";
+import { synthesizeBlocks, synthesizeCi8 } from "@/lib/gnss/synthesize";
 import { seededRandom } from "@/lib/numeric/random";
 import { formulaCases } from "@/tests/reference/formulaCases";
 import { expectNear } from "@/tests/support/expectNear";
@@ -124,6 +124,14 @@ test("data bits flip the sign at their edge, every 20 code periods", () => {
 test("a sample's value does not depend on how long the capture is", () => {
   const [short, long] = [10, 20].map((ms) => synthesizeCi8(alone(strong, 2.046e6, ms), noise()).samples);
   expect(long.slice(0, short.length)).toEqual(short);
+});
+
+test("millisecond by millisecond the samples are the same", () => {
+  const scene = sceneOf(SEED, 2.046e6, [3, 8], 0);
+  const whole = synthesizeCi8({ ...scene, durationMs: 5 }, noise()).samples;
+  const blocks = Array.from(synthesizeBlocks({ ...scene, durationMs: 5 }, noise()), (block) => Int8Array.from(block));
+  expect(blocks.map(({ length }) => length)).toEqual(Array(5).fill(4092));
+  expect(blocks.flatMap((block) => [...block])).toEqual([...whole]);
 });
 
 test("reports progress to the end", () => {
