@@ -9,7 +9,7 @@ import type { Print } from "./Subcommand";
 import { UsageError } from "./UsageError";
 
 const USAGE =
-  "engine search FILE.sigmf-meta --signal GPS_L1CA [--prn 1-32] [--coherent-ms N] [--sums K] [--doppler HZ] [--pfa P] [--if HZ]";
+  "engine search FILE.sigmf-meta --signal GPS_L1CA [--prn 1-32] [--coherent-ms N] [--sums K] [--doppler HZ] [--pfa P] [--if HZ] [--bit-edges STEP_MS]";
 const OPTIONS = {
   signal: { type: "string" },
   prn: { type: "string", default: "1-32" },
@@ -18,8 +18,10 @@ const OPTIONS = {
   doppler: { type: "string" },
   pfa: { type: "string" },
   if: { type: "string" },
+  "bit-edges": { type: "string" },
 } as const;
 const MOST_SUMS_UNASKED = 20;
+const LONGEST_MS = 20;
 
 /**
  * `search FILE.sigmf-meta`: one line per satellite whose peak passes the threshold. The false-alarm probability is that of
@@ -37,19 +39,25 @@ export async function search(args: string[], print: Print): Promise<void> {
   const prns = readNumberList("prn", values.prn).filter((prn) => definition.prns.includes(prn));
   if (prns.length === 0) throw new UsageError(`search: ${name} has no code for any of ${values.prn}`);
   const periodMs = 1000 / lineSpacingHz(signal);
-  const coherentMs = readNumber("coherent-ms", values["coherent-ms"], periodMs, periodMs, 20);
+  if (periodMs > LONGEST_MS)
+    throw new UsageError(`search: ${name} repeats every ${periodMs} ms; codes of up to ${LONGEST_MS} ms are searched`);
+  const coherentMs = readNumber("coherent-ms", values["coherent-ms"], periodMs, periodMs, LONGEST_MS);
   const perSearch = readNumber("pfa", values.pfa, 1e-3, 1e-12, 0.5);
 
   const { meta, sampleCount, read } = await openRecording(file);
   const rateHz = meta.sampleRateHz;
-  const held = Math.floor((1000 * (sampleCount + 1)) / rateHz / coherentMs + 1e-9);
+  const edgeStepMs = values["bit-edges"] && readNumber("bit-edges", values["bit-edges"], 0, 0.1, LONGEST_MS);
+  const edges = edgeStepMs ? { bitEdgeStepMs: edgeStepMs } : {};
+  const sparedMs = edgeStepMs ? coherentMs : 0; // the last start is almost a coherent time late
+  const held = Math.floor(((1000 * (sampleCount + 1)) / rateHz - sparedMs) / coherentMs + 1e-9);
   const sums = readNumber("sums", values.sums, Math.min(MOST_SUMS_UNASKED, held), 1, 2000);
   const tunedHz = meta.captures[0]?.frequencyHz ?? null;
   const ifHz = readNumber("if", values.if, tunedHz === null ? 0 : signal.carrierHz - tunedHz, -1e12, 1e12);
-  const samples = await read(Math.min(sampleCount, Math.ceil((sums * coherentMs * rateHz) / 1000)));
+  const samples = await read(Math.min(sampleCount, Math.ceil(((sums * coherentMs + sparedMs) * rateHz) / 1000)));
   const capture = { samples, complex: meta.format.complex, rateHz, ifHz };
   const parents = definition.prns.filter((prn) => prn <= 32);
   const request = {
+    ...edges,
     coherentMs,
     sums,
     dopplerHalfWidthHz: readNumber("doppler", values.doppler, 7000, 0, 100_000),

@@ -12,6 +12,7 @@ export type RefinedSignal = { codePhaseChips: number; dopplerHz: number; cn0DbHz
 
 const PART_S = 0.001; // the sums are taken apart into milliseconds, which serves any coherent time
 const TAPS = [-0.5, -0.375, -0.25, -0.125, 0, 0.125, 0.25, 0.375, 0.5]; // of a half chip's main peak, in pulse halves
+const LONG_SYMBOL_S = 0.02;
 const FINE_DOPPLERS = 40; // steps on either side
 
 /**
@@ -31,7 +32,7 @@ export function createRefinement(
 ): (replica: CodeReplica, cell: HighestCell) => RefinedSignal {
   const parts = Math.round((plan.sums * plan.coherentS) / PART_S);
   const spacingChips = 1 / signal.halvesPerChip;
-  const correlate = createPartCorrelator(received, capture, signal, band, plan, spacingChips, parts);
+  const correlate = createPartCorrelator(received, capture, signal, band, plan, spacingChips);
   return (replica, cell) => {
     const values = correlate(replica, cell);
     const powers = values.map((series) => meanPower(series));
@@ -51,7 +52,10 @@ export function createRefinement(
   };
 }
 
-/** Correlation over each millisecond of the plan's time, one list of complex values per tap. */
+/**
+ * Correlation over each millisecond of the plan's time, one list of complex values per tap. Where every code period may have
+ * another sign, the milliseconds begin with a period.
+ */
 function createPartCorrelator(
   received: (dopplerHz: number) => TunedLines,
   capture: SampledCapture,
@@ -59,28 +63,28 @@ function createPartCorrelator(
   { highest, lags }: SearchBand,
   plan: SearchPlanInForce,
   spacingChips: number,
-  parts: number,
 ) {
-  const times = { startS: plan.startS, lengthS: PART_S, sums: parts };
+  const spacingHz = lineSpacingHz(signal);
+  const all = Math.round((plan.sums * plan.coherentS) / PART_S);
+  const linesFrom = (startS: number, parts: number) =>
+    createReceivedLines(capture, spacingHz, highest, 0, { startS, lengthS: PART_S, sums: parts });
+  const aligned = signal.symbolS < LONG_SYMBOL_S;
   // A grid of single milliseconds has the very lines already.
-  const own = plan.coherentS !== PART_S && createReceivedLines(capture, lineSpacingHz(signal), highest, 0, times);
+  const own = plan.coherentS === PART_S ? received : linesFrom(plan.startS, all);
   const product = new Float64Array(2 * (2 * highest + 1));
   const tapTurns = TAPS.map((tap) => turnTable((tap * spacingChips) / signal.lengthChips, highest));
   return (replica: CodeReplica, cell: HighestCell): Float64Array[] => {
-    const { middle, line } = (own || received)(cell.dopplerHz);
+    const chipsAtStart = cell.codePhaseChips + signal.chipRateHz * plan.startS;
+    const untilPeriodS = (1 - ((chipsAtStart / signal.lengthChips) % 1)) / spacingHz;
+    const startS = plan.startS + (aligned ? untilPeriodS % PART_S : 0);
+    const parts = startS > plan.startS ? all - 1 : all;
+    const { middle, line } = (aligned ? linesFrom(startS, parts) : own)(cell.dopplerHz);
     const driftChipsPerS = codeDriftChipsPerS(signal, cell.dopplerHz);
     const values = TAPS.map(() => new Float64Array(2 * parts));
     for (let part = 0; part < parts; part++) {
-      const middleS = plan.startS + (part + 0.5) * PART_S;
-      const chips = cell.codePhaseChips + driftChipsPerS * middleS;
-      multiplyTurned(
-        product,
-        line(part).subarray(2 * (middle - highest)),
-        replica.conjugateLines,
-        highest,
-        lags,
-        chips / signal.lengthChips,
-      );
+      const chips = cell.codePhaseChips + driftChipsPerS * (startS + (part + 0.5) * PART_S);
+      const lines = line(part).subarray(2 * (middle - highest));
+      multiplyTurned(product, lines, replica.conjugateLines, highest, lags, chips / signal.lengthChips);
       tapTurns.forEach((table, tap) => sumTurned(values[tap], 2 * part, product, table));
     }
     return values;
@@ -144,7 +148,7 @@ function meanPower(values: Float64Array): number {
 /** Offset in Hz from the row, within a little more than half its distance to the next. */
 function fineDoppler(values: Float64Array, stepHz: number, symbolS: number): number {
   const count = values.length / 2;
-  const block = Math.min(count, symbolS >= 0.02 ? 4 : symbolS >= 0.004 ? 2 : 1);
+  const block = Math.min(count, symbolS >= LONG_SYMBOL_S ? 4 : symbolS >= 0.004 ? 2 : 1);
   if (block < 2) return turnOfSquares(values) / (2 * PART_S);
   const gridHz = (0.6 * stepHz) / FINE_DOPPLERS;
   const powers = Array.from({ length: 2 * FINE_DOPPLERS + 1 }, (_, n) =>

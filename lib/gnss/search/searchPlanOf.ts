@@ -11,6 +11,11 @@ export type SearchRequest = {
   sums: number;
   /** Where in the capture the first sum begins; 0 when left out. */
   startMs?: number;
+  /**
+   * Edges of data bits fall anywhere; one inside a coherent sum costs up to all of it. With a step given the search is done
+   * from several starts, one step apart, until the coherent time is covered, and the best counts.
+   */
+  bitEdgeStepMs?: number;
   /** The search runs at least from minus to plus this Doppler. */
   dopplerHalfWidthHz: number;
   /** Distance of the Doppler rows; 1/(2T) when left out, which costs 0.9 dB at worst. */
@@ -18,6 +23,14 @@ export type SearchRequest = {
   /** Probability that noise alone passes the threshold anywhere in one satellite's grid. */
   falseAlarmPerSearch: number;
 };
+
+/** Starts of a search that tries where the data bits change, in ms from the request's own start; only 0 when none are tried. */
+export function edgeStartsMs({ coherentMs, bitEdgeStepMs }: SearchRequest): number[] {
+  if (bitEdgeStepMs === undefined) return [0];
+  if (!(bitEdgeStepMs > 0 && coherentMs / bitEdgeStepMs <= MOST_STARTS))
+    throw new RangeError(`search: at most ${MOST_STARTS} bit edges tried, got ${coherentMs} ms by ${bitEdgeStepMs} ms`);
+  return Array.from({ length: Math.ceil(coherentMs / bitEdgeStepMs) }, (_, n) => n * bitEdgeStepMs);
+}
 
 /** A request checked against a capture, with everything that was left out filled in. */
 export type SearchPlanInForce = {
@@ -32,6 +45,7 @@ export type SearchPlanInForce = {
 
 const MOST_ROWS = 4001;
 const LONGEST_MS = 20;
+const MOST_STARTS = 20;
 
 /** @throws RangeError naming the rule and the value that broke it */
 export function searchPlanOf(capture: SampledCapture, signal: SearchSignal, request: SearchRequest): SearchPlanInForce {

@@ -1,10 +1,11 @@
+import { falseAlarmPerCell } from "../detection";
 import { codeReplica } from "./codeReplica";
 import { createRefinement, type RefinedSignal } from "./createRefinement";
 import { createReceivedLines } from "./createReceivedLines";
 import type { SampledCapture } from "./sampledCapture";
 import { searchBand } from "./searchBand";
 import { searchCells } from "./searchCells";
-import { cellThreshold, searchPlanOf, type SearchRequest } from "./searchPlanOf";
+import { cellThreshold, edgeStartsMs, searchPlanOf, type SearchRequest } from "./searchPlanOf";
 import { lineSpacingHz, type SearchSignal } from "./searchSignal";
 
 /** What the search found for one satellite. */
@@ -36,6 +37,26 @@ export function searchSatellites(
   request: SearchRequest,
   onProgress?: (done: number, total: number) => void,
 ): SatelliteFinding[] {
+  const starts = edgeStartsMs(request);
+  const falseAlarmPerSearch = falseAlarmPerCell(request.falseAlarmPerSearch, starts.length);
+  let best: SatelliteFinding[] = [];
+  starts.forEach((startMs, pass) => {
+    const one = { ...request, falseAlarmPerSearch, startMs: (request.startMs ?? 0) + startMs };
+    const findings = searchOnce(capture, signal, prns, one, (done, total) =>
+      onProgress?.(pass * total + done, starts.length * total),
+    );
+    best = findings.map((finding, n) => (pass === 0 || finding.peak > best[n].peak ? finding : best[n]));
+  });
+  return best;
+}
+
+function searchOnce(
+  capture: SampledCapture,
+  signal: SearchSignal,
+  prns: readonly number[],
+  request: SearchRequest,
+  onProgress: (done: number, total: number) => void,
+): SatelliteFinding[] {
   const plan = searchPlanOf(capture, signal, request);
   const band = searchBand(capture, signal);
   const replicas = prns.map((prn) => codeReplica(signal, prn, band));
@@ -44,7 +65,7 @@ export function searchSatellites(
   const reach = Math.ceil(plan.dopplersHz[0] / -spacingHz);
   const times = { startS: plan.startS, lengthS: plan.coherentS, sums: plan.sums };
   const received = createReceivedLines(capture, spacingHz, band.highest, reach, times);
-  const cells = searchCells(received, signal, replicas, band, plan, (done) => onProgress?.(done, total));
+  const cells = searchCells(received, signal, replicas, band, plan, (done) => onProgress(done, total));
   const threshold = cellThreshold(plan, band.lags);
   const refine = createRefinement(received, capture, signal, band, plan);
   return cells.map((cell, n) => {
@@ -52,7 +73,7 @@ export function searchSatellites(
     const place = found
       ? refine(replicas[n], cell)
       : { codePhaseChips: cell.codePhaseChips, dopplerHz: cell.dopplerHz, cn0DbHz: 0 };
-    onProgress?.(plan.dopplersHz.length + n + 1, total);
+    onProgress(plan.dopplersHz.length + n + 1, total);
     return { prn: cell.prn, found, peak: cell.peak, threshold, cellNoise: cell.cellNoise, ...place };
   });
 }

@@ -6,7 +6,7 @@ import { exciseNarrowband, type Excision } from "./exciseNarrowband";
 import { explainPeak, type PeakExplanation } from "./explainPeak";
 import { sampleCount, type SampledCapture } from "./sampledCapture";
 import { searchBand } from "./searchBand";
-import { searchPlanOf, type SearchRequest } from "./searchPlanOf";
+import { edgeStartsMs, searchPlanOf, type SearchRequest } from "./searchPlanOf";
 import { searchSatellites, type SatelliteFinding } from "./searchSatellites";
 import type { SearchSignal } from "./searchSignal";
 
@@ -62,7 +62,8 @@ export function searchSky(
   onProgress?: (done: number, total: number) => void,
 ): SkySearch {
   const plan = searchPlanOf(capture, signal, request);
-  const clean = stretchOf(capture, plan.startS + plan.sums * plan.coherentS);
+  const lastStartS = Math.max(...edgeStartsMs(request)) / 1000;
+  const clean = stretchOf(capture, plan.startS + lastStartS + plan.sums * plan.coherentS);
   const blankedShare = blankPulses(clean);
   const excision = exciseNarrowband(clean);
   const everybody = [...new Set([...prns, ...parents])];

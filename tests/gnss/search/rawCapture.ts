@@ -1,6 +1,10 @@
-import { caCode } from "@/lib/gnss/caCode";
+import { searchSignalOf } from "@/lib/gnss/search/searchSignal";
+import { gpsL1Ca } from "@/lib/gnss/signals/gpsL1Ca";
+import type { SearchSignal } from "@/lib/gnss/search/searchSignal";
 import type { SampledCapture } from "@/lib/gnss/search/sampledCapture";
 import { seededRandom } from "@/lib/numeric/random";
+
+const GPS_L1CA = searchSignalOf(gpsL1Ca);
 
 export type RawSatellite = { prn: number; codePhaseChips: number; dopplerHz: number; cn0DbHz: number };
 
@@ -11,6 +15,8 @@ export type RawScene = {
   complex: boolean;
   durationMs: number;
   satellites: readonly RawSatellite[];
+  /** GPS L1 C/A when left out. */
+  signal?: SearchSignal;
   /** Unmodulated carrier: offset from the carrier, level over the strongest satellite. */
   tone?: { offsetHz: number; jamToSignalDb: number };
 };
@@ -21,16 +27,20 @@ export type RawScene = {
  * is 1/rate in both cases; the power of a real carrier of amplitude A is half of A^2.
  */
 export function rawCapture(scene: RawScene): SampledCapture {
-  const { rateHz, ifHz, complex, durationMs, satellites, tone } = scene;
+  const { rateHz, ifHz, complex, durationMs, satellites, tone, signal = GPS_L1CA } = scene;
+  const { chipRateHz, carrierHz, lengthChips, halvesPerChip } = signal;
+  const periodMs = (1000 * lengthChips) / chipRateHz;
+  const symbolMs = Math.min(20, 1000 * signal.symbolS);
   const random = seededRandom(scene.seed, "raw");
   const count = Math.floor((rateHz * durationMs) / 1000);
   const samples = new Float32Array(complex ? 2 * count : count);
   const sources = satellites.map((satellite) => ({
     ...satellite,
-    code: caCode(satellite.prn),
+    code: signal.chips(satellite.prn),
     phase: random.uniform(),
     bits: Array.from({ length: 200 }, () => (random.uniform() < 0.5 ? -1 : 1)),
-    edge: random.uniform() * 20,
+    // Symbols change where a code period begins.
+    edge: periodMs * (satellite.codePhaseChips / lengthChips + Math.floor((random.uniform() * symbolMs) / periodMs)),
     amplitude: Math.sqrt(((complex ? 1 : 2) * 10 ** (satellite.cn0DbHz / 10)) / rateHz),
   }));
   const strongest = Math.max(0, ...sources.map(({ amplitude }) => amplitude));
@@ -43,9 +53,10 @@ export function rawCapture(scene: RawScene): SampledCapture {
       im += amplitude * Math.sin(2 * Math.PI * (turns % 1));
     };
     for (const { code, codePhaseChips, dopplerHz, phase, bits, edge, amplitude } of sources) {
-      const chips = codePhaseChips + 1.023e6 * (1 + dopplerHz / 1575.42e6) * t;
-      const bit = bits[Math.floor((t * 1000 + edge) / 20)];
-      add(amplitude * bit * code[Math.floor(chips) % 1023], phase + (ifHz + dopplerHz) * t);
+      const chips = codePhaseChips + chipRateHz * (1 + dopplerHz / carrierHz) * t;
+      const half = Math.floor((chips % 1) * halvesPerChip) % 2 ? -1 : 1;
+      const bit = bits[Math.floor((t * 1000 + edge) / symbolMs)];
+      add(amplitude * bit * half * code[Math.floor(chips) % lengthChips], phase + (ifHz + dopplerHz) * t);
     }
     if (jam) add(jam.amplitude, (ifHz + jam.hz) * t);
     if (complex) {

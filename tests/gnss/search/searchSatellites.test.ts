@@ -2,7 +2,11 @@ import { describe, expect, test } from "vitest";
 import type { SearchRequest } from "@/lib/gnss/search/searchPlanOf";
 import { searchSatellites } from "@/lib/gnss/search/searchSatellites";
 import { searchSignalOf } from "@/lib/gnss/search/searchSignal";
+import { galileoE1B } from "@/lib/gnss/signals/galileoE1B";
+import { galileoE1C } from "@/lib/gnss/signals/galileoE1C";
 import { gpsL1Ca } from "@/lib/gnss/signals/gpsL1Ca";
+import { gpsL5I } from "@/lib/gnss/signals/gpsL5I";
+import type { Signal } from "@/lib/gnss/signals/signal";
 import { chiSquareInverseSurvival } from "@/lib/numeric/chiSquare";
 import { expectNear } from "@/tests/support/expectNear";
 import { rawCapture, type RawSatellite } from "./rawCapture";
@@ -57,6 +61,39 @@ test("longer coherent sums find a weaker satellite and read it as well", () => {
   expectNear(around(finding.codePhaseChips - weak.codePhaseChips), 0, 0.15, "code phase in chips");
   expectNear(finding.dopplerHz, weak.dopplerHz, 20, "Doppler in Hz");
   expectNear(finding.cn0DbHz, weak.cn0DbHz, 1.5, "C/N0 in dB-Hz");
+});
+
+// All that differs between signals is data: code lengths of 4092 and 10230 chips, a subcarrier, symbols of one code period.
+test.each<[string, Signal, number, number, number]>([
+  ["Galileo E1-B", galileoE1B, 6.138e6, 4, 1],
+  ["Galileo E1-C", galileoE1C, 5e6, 4, 1],
+  ["GPS L5-I", gpsL5I, 25e6, 1, 0.25],
+])("finds %s", (_name, definition, rateHz, coherentMs, bitEdgeStepMs) => {
+  const other = searchSignalOf(definition);
+  const truth = { prn: 12, codePhaseChips: 0.377 * other.lengthChips, dopplerHz: 870, cn0DbHz: 46 };
+  const scene = { seed: "45".repeat(32), rateHz, ifHz: 0, complex: true, durationMs: 20, signal: other };
+  const capture = rawCapture({ ...scene, satellites: [truth] });
+  const plan = { coherentMs, sums: 4, dopplerHalfWidthHz: 1500, falseAlarmPerSearch: 1e-4, bitEdgeStepMs };
+  const [finding, absent] = searchSatellites(capture, other, [12, 13], plan);
+  expect([finding.found, absent.found]).toEqual([true, false]);
+  expectNear(finding.codePhaseChips, truth.codePhaseChips, 0.15, "code phase in chips");
+  expectNear(finding.dopplerHz, truth.dopplerHz, 60, "Doppler in Hz");
+  expectNear(finding.cn0DbHz, truth.cn0DbHz, 2, "C/N0 in dB-Hz");
+});
+
+test("a search that tries the bit edges finds what an unlucky start hides", () => {
+  const weak = { prn: 6, codePhaseChips: 511.7, dopplerHz: 133, cn0DbHz: 33 };
+  const scene = { seed: "46".repeat(32), rateHz: 2.1e6, ifHz: 0, complex: true, durationMs: 100 };
+  const capture = rawCapture({ ...scene, satellites: [weak] });
+  const plan = { coherentMs: 20, sums: 4, dopplerHalfWidthHz: 150, falseAlarmPerSearch: 1e-3 };
+  const blind = [0, 5, 10, 15].map((startMs) => searchSatellites(capture, signal, [6], { ...plan, startMs })[0]);
+  const [finding] = searchSatellites(capture, signal, [6], { ...plan, bitEdgeStepMs: 5 });
+  expect(finding.found).toBe(true);
+  expectNear(finding.peak, Math.max(...blind.map(({ peak }) => peak)), 1e-9, "peak");
+  // A bit that changes in the middle of a sum takes all of it; how many of the four change is chance.
+  expect(finding.peak).toBeGreaterThan(1.1 * Math.min(...blind.map(({ peak }) => peak)));
+  expect(finding.threshold).toBeGreaterThan(blind[0].threshold); // the searches share the false alarms
+  expectNear(around(finding.codePhaseChips - weak.codePhaseChips), 0, 0.15, "code phase in chips");
 });
 
 test("sums may begin later; the code phase stays that of the first sample, code Doppler included", () => {
@@ -119,6 +156,7 @@ test.each<[string, Partial<SearchRequest>, object]>([
   ["half a code period", { coherentMs: 0.5 }, {}],
   ["no sums", { sums: 0 }, {}],
   ["no false alarms at all", { falseAlarmPerSearch: 0 }, {}],
+  ["more bit edges than anybody needs", { bitEdgeStepMs: 0.01 }, {}],
   ["no Doppler step", { dopplerStepHz: 0 }, {}],
   ["more rows than anybody needs", { dopplerStepHz: 0.1 }, {}],
   ["a front end narrower than a third of the main lobe", {}, { rateHz: 0.6e6 }],
