@@ -40,7 +40,9 @@ export function searchCells(
 ): HighestCell[] {
   const { dopplersHz, sums } = plan;
   const { places, add } = createProductPower(lags);
-  const groups = rowsWithSameLines(dopplersHz, lineSpacingHz(signal));
+  const sharing = rowsWithSameLines(dopplersHz, lineSpacingHz(signal));
+  // Few sums are done row by row: `received` still has their lines, and the powers of one row fit into a cache.
+  const groups = sums <= SUMS_AT_ONCE ? sharing.flat().map((row) => [row]) : sharing;
   const mostRows = Math.max(...groups.map((rows) => rows.length));
   const atOnce = Math.max(1, Math.min(replicas.length, Math.floor(MOST_POWER_BYTES / (8 * lags * mostRows))));
   const powers = Array.from({ length: mostRows * atOnce }, () => new Float64Array(lags));
