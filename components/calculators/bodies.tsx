@@ -4,6 +4,8 @@ import type { CalculatorProps } from "./calculatorProps";
 import { CableEcho } from "./CableEcho";
 import { ChainLevels } from "./ChainLevels";
 import { DelayBudget } from "./DelayBudget";
+import { LoopJitter } from "./LoopJitter";
+import { PulseError } from "./PulseError";
 import { SearchPlan } from "./SearchPlan";
 import { TwoCodes } from "./TwoCodes";
 
@@ -11,7 +13,9 @@ import { TwoCodes } from "./TwoCodes";
 export const BODIES: { [T in CalculatorTag]: ComponentType<CalculatorProps<Extract<BenchCalculator, { tag: T }>>> } = {
   TwoCodes,
   SearchPlan,
+  LoopJitter,
   ChainLevels,
   CableEcho,
   DelayBudget,
+  PulseError,
 };

@@ -2,6 +2,8 @@ import type { Calculator } from "./calculator";
 import { CABLE_ECHO } from "./cableEcho";
 import { CHAIN_LEVELS } from "./chainLevels";
 import { DELAY_BUDGET } from "./delayBudget";
+import { LOOP_JITTER } from "./loopJitter";
+import { PULSE_ERROR } from "./pulseError";
 import { SEARCH_PLAN } from "./searchPlan";
 import { TWO_CODES } from "./twoCodes";
 
@@ -9,9 +11,11 @@ import { TWO_CODES } from "./twoCodes";
 export const CALCULATORS = [
   TWO_CODES,
   SEARCH_PLAN,
+  LOOP_JITTER,
   CHAIN_LEVELS,
   CABLE_ECHO,
   DELAY_BUDGET,
+  PULSE_ERROR,
 ] as const satisfies readonly Calculator[];
 
 export type BenchCalculator = (typeof CALCULATORS)[number];

@@ -107,7 +107,6 @@ export function tagNamed(name: string): TagSpec | null {
 export const LATER_TAGS: readonly string[] = [
   "FalseLock",
   "CaptureView",
-  "LoopJitter",
   "ExpectedCn0",
   "PromptCn0",
   "EffectiveCn0",
@@ -115,7 +114,6 @@ export const LATER_TAGS: readonly string[] = [
   "MixProducts",
   "MultipathError",
   "SkyMask",
-  "PulseError",
   "Given",
   "Wrong",
   "WitnessLine",
