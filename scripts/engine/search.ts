@@ -92,8 +92,9 @@ function lineOf(finding: SkyFinding): object {
 const rounded = (value: number, steps: number) => Math.round(value * steps) / steps;
 
 /** What stands between the search and weaker satellites, in sentences. */
-function limits({ sensitivityDbHz, cancelledPrns, excision, blankedShare }: SkySearch): string[] {
+function limits({ sensitivityDbHz, mirrored, cancelledPrns, excision, blankedShare }: SkySearch): string[] {
   const lines = [`Nine in ten satellites of ${sensitivityDbHz.toFixed(1)} dB-Hz are found.`];
+  if (mirrored) lines.push("Real samples with the carrier near 0 Hz: Dopplers of either sign look alike.");
   if (blankedShare > 0) lines.push(`Pulses took ${percent(blankedShare)} of the time, which was blanked.`);
   if (excision.share > 0) lines.push(...excised(excision));
   if (cancelledPrns.length > 0)

@@ -11,12 +11,15 @@ export type SampledCapture = {
 export const sampleCount = ({ samples, complex }: SampledCapture): number =>
   complex ? samples.length / 2 : samples.length;
 
+/** Distance of the carrier from 0 Hz as the samples show it; an intermediate frequency beyond half the rate folds back. */
+export const foldedCarrierHz = ({ rateHz, ifHz }: SampledCapture): number =>
+  Math.abs(ifHz - rateHz * Math.round(ifHz / rateHz));
+
 /**
  * How far from the carrier the capture can serve in Hz. Complex samples hold half their rate on either side; in real ones the
  * mirrored spectrum begins at 0 Hz and at half the rate. 0 when a real capture has its carrier there.
  */
-export function usableHalfWidthHz({ complex, rateHz, ifHz }: SampledCapture): number {
-  if (complex) return rateHz / 2;
-  const folded = Math.abs(ifHz - rateHz * Math.round(ifHz / rateHz));
-  return Math.min(folded, rateHz / 2 - folded);
+export function usableHalfWidthHz(capture: SampledCapture): number {
+  const folded = foldedCarrierHz(capture);
+  return capture.complex ? capture.rateHz / 2 : Math.min(folded, capture.rateHz / 2 - folded);
 }

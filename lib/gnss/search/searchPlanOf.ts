@@ -1,5 +1,6 @@
 import { chiSquareInverseSurvival } from "@/lib/numeric/chiSquare";
 import { falseAlarmPerCell } from "../detection";
+import type { SearchBand } from "./searchBand";
 import { lineSpacingHz, type SearchSignal } from "./searchSignal";
 import { sampleCount, type SampledCapture } from "./sampledCapture";
 
@@ -83,9 +84,14 @@ export function searchPlanOf(capture: SampledCapture, signal: SearchSignal, requ
 
 /**
  * Threshold on a cell whose noise has mean 1: chi-square with two degrees per sum, all cells of the grid taken as
- * independent. They are not quite (neighbours overlap), so the true false-alarm probability is a little lower.
+ * independent. They are not quite (neighbours overlap), so the true false-alarm probability is a little lower. In a mirrored
+ * band a sum has one degree only.
  */
-export function cellThreshold({ sums, dopplersHz, falseAlarmPerSearch }: SearchPlanInForce, lags: number): number {
+export function cellThreshold(
+  { sums, dopplersHz, falseAlarmPerSearch }: SearchPlanInForce,
+  { lags, mirrored }: SearchBand,
+): number {
   const perCell = falseAlarmPerCell(falseAlarmPerSearch, dopplersHz.length * lags);
-  return chiSquareInverseSurvival(perCell, 2 * sums) / (2 * sums);
+  const degrees = (mirrored ? 1 : 2) * sums;
+  return chiSquareInverseSurvival(perCell, degrees) / degrees;
 }

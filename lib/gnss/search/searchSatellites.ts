@@ -66,7 +66,7 @@ function searchOnce(
   const times = { startS: plan.startS, lengthS: plan.coherentS, sums: plan.sums };
   const received = createReceivedLines(capture, spacingHz, band.highest, reach, times);
   const cells = searchCells(received, signal, replicas, band, plan, (done) => onProgress(done, total));
-  const threshold = cellThreshold(plan, band.lags);
+  const threshold = cellThreshold(plan, band);
   const refine = createRefinement(received, capture, signal, band, plan);
   return cells.map((cell, n) => {
     const found = cell.peak > threshold;

@@ -25,6 +25,8 @@ export type SkySearch = {
   findings: SkyFinding[];
   /** C/N0 that is found nine times in ten, at the mean loss over the grid. */
   sensitivityDbHz: number;
+  /** Whether Dopplers of either sign look alike, see `searchBand`. */
+  mirrored: boolean;
   /** Satellites whose signals were taken out to see what they cover, strongest first. */
   cancelledPrns: number[];
   excision: Excision;
@@ -98,6 +100,7 @@ export function searchSky(
   return {
     findings: verdicts(signal, prns, [...genuine.values()], first, plan.coherentS),
     sensitivityDbHz: sensitivityDbHz(clean, signal, request),
+    mirrored: searchBand(clean, signal).mirrored,
     cancelledPrns: cancelled,
     excision,
     blankedShare,
@@ -163,7 +166,9 @@ function verdicts(
 
 function sensitivityDbHz(capture: SampledCapture, signal: SearchSignal, request: SearchRequest): number {
   const plan = searchPlanOf(capture, signal, request);
-  const cells = plan.dopplersHz.length * searchBand(capture, signal).lags;
-  const rho = requiredSnr(plan.sums, falseAlarmPerCell(plan.falseAlarmPerSearch, cells), 0.9);
+  const { lags, mirrored } = searchBand(capture, signal);
+  const perCell = falseAlarmPerCell(plan.falseAlarmPerSearch, plan.dopplersHz.length * lags);
+  // Half the degrees are those of half as many sums; the mean over all of them is what they share.
+  const rho = requiredSnr(mirrored ? Math.ceil(plan.sums / 2) : plan.sums, perCell, 0.9);
   return decibels(rho / plan.coherentS) + GRID_LOSS_DB;
 }

@@ -134,6 +134,27 @@ test("noise alone passes the threshold as often as it was allowed to, or less", 
   for (const { peak } of findings) expect(peak).toBeGreaterThan(2); // the highest of 43,000 cells
 });
 
+describe("real samples with the carrier at 0 Hz", () => {
+  const scene = { seed: "47".repeat(32), rateHz: 4.5e6, ifHz: 0, complex: false, durationMs: 20 };
+
+  test("give the code phase, and the Doppler but for its sign", () => {
+    const capture = rawCapture({ ...scene, satellites: satellites.slice(1) });
+    const findings = searchSatellites(capture, signal, [4, 19, 28], request);
+    expect(findings.map(({ found }) => found)).toEqual([false, true, true]);
+    for (const finding of findings.slice(1)) {
+      const truth = satellites.find(({ prn }) => prn === finding.prn)!;
+      expectNear(around(finding.codePhaseChips - truth.codePhaseChips), 0, 0.15, "code phase in chips");
+      expectNear(Math.abs(finding.dopplerHz), Math.abs(truth.dopplerHz), 60, "Doppler in Hz");
+    }
+  });
+
+  test("hold no satellite when there is none, though their noise has half the degrees of freedom", () => {
+    const capture = rawCapture({ ...scene, satellites: [] });
+    const findings = searchSatellites(capture, signal, [1, 5, 9, 14, 21, 30], request);
+    expect(findings.filter(({ found }) => found)).toEqual([]);
+  });
+});
+
 test("a silent capture has no satellite and no broken number", () => {
   const silent = { samples: new Int8Array(2 * 2048 * 2), complex: true, rateHz: 2.048e6, ifHz: 0 };
   const [finding] = searchSatellites(silent, signal, [1], { ...request, sums: 2 });
@@ -160,7 +181,7 @@ test.each<[string, Partial<SearchRequest>, object]>([
   ["no Doppler step", { dopplerStepHz: 0 }, {}],
   ["more rows than anybody needs", { dopplerStepHz: 0.1 }, {}],
   ["a front end narrower than a third of the main lobe", {}, { rateHz: 0.6e6 }],
-  ["a real capture whose carrier stands at 0 Hz", {}, { complex: false }],
+  ["a real capture whose carrier stands at half the rate", {}, { complex: false, ifHz: 1.024e6 }],
 ])("refuses %s", (_what, change, other) => {
   const capture = { samples: new Int8Array(2 * 2048 * 20), complex: true, rateHz: 2.048e6, ifHz: 0, ...other };
   expect(() => searchSatellites(capture, signal, [1], { ...request, ...change })).toThrow(RangeError);
