@@ -4,6 +4,7 @@ import type { CalculatorProps } from "./calculatorProps";
 import { CableEcho } from "./CableEcho";
 import { ChainLevels } from "./ChainLevels";
 import { DelayBudget } from "./DelayBudget";
+import { FalseLock } from "./FalseLock";
 import { LoopJitter } from "./LoopJitter";
 import { PulseError } from "./PulseError";
 import { SearchPlan } from "./SearchPlan";
@@ -12,6 +13,7 @@ import { TwoCodes } from "./TwoCodes";
 /** What each calculator of the bench shows and computes. */
 export const BODIES: { [T in CalculatorTag]: ComponentType<CalculatorProps<Extract<BenchCalculator, { tag: T }>>> } = {
   TwoCodes,
+  FalseLock,
   SearchPlan,
   LoopJitter,
   ChainLevels,

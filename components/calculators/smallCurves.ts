@@ -19,6 +19,8 @@ const DRAWN: Record<CalculatorTag, () => Small> = {
     const values = circularCorrelation(caCode(7), caCode(19));
     return over(range(0, 44, 44), (lag) => values[lag]);
   },
+  // Equal false peaks, one Doppler beside the other.
+  FalseLock: () => ({ x: range(0, 12, 12), y: [2, 1, 9, 2, 1, 8, 1, 2, 9, 1, 2, 8, 1], bars: true }),
   SearchPlan: () => over(range(-3, 3, 32), (sigmas) => erfc(-sigmas) / 2),
   LoopJitter: () => {
     const shape = correlationShape(bpsk(1), null);

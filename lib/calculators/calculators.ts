@@ -2,6 +2,7 @@ import type { Calculator } from "./calculator";
 import { CABLE_ECHO } from "./cableEcho";
 import { CHAIN_LEVELS } from "./chainLevels";
 import { DELAY_BUDGET } from "./delayBudget";
+import { FALSE_LOCK } from "./falseLock";
 import { LOOP_JITTER } from "./loopJitter";
 import { PULSE_ERROR } from "./pulseError";
 import { SEARCH_PLAN } from "./searchPlan";
@@ -10,6 +11,7 @@ import { TWO_CODES } from "./twoCodes";
 /** The bench, by number. A calculator's body stands in `components/calculators/bodies.tsx` under the same tag. */
 export const CALCULATORS = [
   TWO_CODES,
+  FALSE_LOCK,
   SEARCH_PLAN,
   LOOP_JITTER,
   CHAIN_LEVELS,

@@ -37,19 +37,13 @@ export type FalsePeak = {
  * parent's by whole kHz and no others; a 1 ms sum also shows those at half kHz. Computed from the two codes.
  */
 export function falsePeaks(question: FalseLockQuestion): FalsePeak[] {
-  const { parentPrn, victimPrn, parentDopplerHz, coherentMs, dopplerHalfWidthHz } = question;
-  if (!(Number.isInteger(coherentMs) && coherentMs >= 1 && coherentMs <= 20))
-    throw new RangeError(`falsePeaks: 1 to 20 whole milliseconds, got ${coherentMs}`);
-  const stepHz = coherentMs === 1 ? 500 : 1000;
-  const lowest = Math.ceil((-dopplerHalfWidthHz - parentDopplerHz) / stepHz);
-  const highest = Math.floor((dopplerHalfWidthHz - parentDopplerHz) / stepHz);
+  const { parentDopplerHz } = question;
   const cells: { differenceHz: number; lagChips: number; level: number }[] = [];
   let top = 0;
-  for (let n = lowest; n <= highest; n++) {
-    const levels = dopplerCorrelation(caCode(parentPrn), caCode(victimPrn), -n * stepHz, coherentMs / 1000);
+  for (const { differenceHz, levels } of falsePeakRows(question)) {
     levels.forEach((level, lagChips) => {
       top = Math.max(top, level);
-      cells.push({ differenceHz: n * stepHz, lagChips, level });
+      cells.push({ differenceHz, lagChips, level });
     });
   }
   const toDb = (level: number) => 2 * decibels(level / CA_LENGTH_CHIPS);
@@ -62,6 +56,25 @@ export function falsePeaks(question: FalseLockQuestion): FalsePeak[] {
       const dopplerHz = parentDopplerHz + differenceHz;
       return { dopplerHz, lagChips, levelDb: toDb(level), apparentCn0DbHz, detection: detection(apparentCn0DbHz) };
     });
+}
+
+/** Correlation of the two codes at one Doppler: chips by whole lag, `dopplerCorrelation`. */
+export type FalsePeakRow = { differenceHz: number; levels: Float64Array };
+
+/** The rows of a search's window in which false peaks can stand, from the lowest Doppler up; none in a narrow window. */
+export function falsePeakRows(question: FalseLockQuestion): FalsePeakRow[] {
+  const { parentPrn, victimPrn, parentDopplerHz, coherentMs, dopplerHalfWidthHz } = question;
+  if (!(Number.isInteger(coherentMs) && coherentMs >= 1 && coherentMs <= 20))
+    throw new RangeError(`falsePeaks: 1 to 20 whole milliseconds, got ${coherentMs}`);
+  const stepHz = coherentMs === 1 ? 500 : 1000;
+  const lowest = Math.ceil((-dopplerHalfWidthHz - parentDopplerHz) / stepHz);
+  const highest = Math.floor((dopplerHalfWidthHz - parentDopplerHz) / stepHz);
+  const rows: FalsePeakRow[] = [];
+  for (let n = lowest; n <= highest; n++) {
+    const levels = dopplerCorrelation(caCode(parentPrn), caCode(victimPrn), -n * stepHz, coherentMs / 1000);
+    rows.push({ differenceHz: n * stepHz, levels });
+  }
+  return rows;
 }
 
 function detectionOf({ coherentMs, sums, dopplerHalfWidthHz }: FalseLockQuestion): (cn0DbHz: number) => number {
