@@ -5,6 +5,8 @@ import { Key } from "@/components/ui/Key";
 import { SectionHead } from "@/components/ui/SectionHead";
 import type { Row, RowsInput } from "@/lib/calculators/calculator";
 import { readRowName } from "@/lib/calculators/readRows";
+import { unitText } from "@/lib/calculators/unitText";
+import type { Unit } from "@/lib/gnss/units";
 import { FigureField } from "./FigureField";
 
 type RowsEditorProps = { input: RowsInput; rows: readonly Row[]; onChange: (rows: readonly Row[]) => void };
@@ -31,14 +33,15 @@ export function RowsEditor({ input, rows, onChange }: RowsEditorProps) {
           <li key={at} className="rows-row">
             <RowName what={what} number={at + 1} name={row.name} onChange={(name) => replace(at, { ...row, name })} />
             {columns.map((column, index) => (
-              <FigureField
-                key={`${column.key} ${row.name}`}
-                label={column.label}
-                bounds={column}
-                unit={column.unit}
-                value={row.figures[index]}
-                onChange={(figure) => replace(at, { ...row, figures: row.figures.with(index, figure) })}
-              />
+              <div key={`${column.key} ${row.name}`} style={headUnit(column.unit)}>
+                <FigureField
+                  label={column.label}
+                  bounds={column}
+                  unit={column.unit}
+                  value={row.figures[index]}
+                  onChange={(figure) => replace(at, { ...row, figures: row.figures.with(index, figure) })}
+                />
+              </div>
             ))}
             <div className="rows-keys no-print">
               {at > 0 && (
@@ -66,6 +69,12 @@ export function RowsEditor({ input, rows, onChange }: RowsEditorProps) {
       </div>
     </>
   );
+}
+
+/** The unit as the common head shows it: there is no room for one in every field of a row. */
+function headUnit(unit?: Unit): React.CSSProperties | undefined {
+  const text = unit && unitText(unit);
+  return text ? ({ "--head-unit": JSON.stringify(`, ${text}`) } as React.CSSProperties) : undefined;
 }
 
 function freshName(what: string, rows: readonly Row[]): string {
