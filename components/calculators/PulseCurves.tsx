@@ -77,7 +77,13 @@ function MaskPlot({ name, clock, points }: MaskPlotProps) {
         ticks: ticksOf(x[0], x[x.length - 1], [1]),
         text: powerText,
       }}
-      y={{ name: `${name}, ns`, from: low, to: high, ticks: ticksOf(low, high, [1, 2, 5]), text: powerText }}
+      y={{
+        name: `${name}, ns`,
+        from: low,
+        to: high,
+        ticks: ticksOf(low, high, high - low > 1.3 ? [1] : [1, 2, 5]),
+        text: powerText,
+      }}
       curves={[
         { name, role: "subject", x, y },
         { name: clock, role: "reference", tone: "minus", x, y: mask, nameAt: { x: x[0], y: mask[0] + 0.06 } },

@@ -56,7 +56,8 @@ export function PlotFrame({
       {bands.map((band, at) => (
         <BandShape key={at} g={g} band={band} />
       ))}
-      {grid !== "none" && y.from < 0 && y.to > 0 && (
+      {/* An axis with words of its own, such as powers of ten, has no zero. */}
+      {grid !== "none" && !y.text && y.from < 0 && y.to > 0 && (
         <path d={`M${g.left} ${g.y(0)}H${g.right}`} className="plot-zero" />
       )}
       <g clipPath={`url(#${clipId})`}>{children}</g>

@@ -15,7 +15,7 @@ type Drawn = { x: ArrayLike<number>; y: ArrayLike<number>; toPx: (value: number)
 /** Cursor over a row of points: keys, mouse (jumps to the pointer) and touch (moves by as much as the finger). */
 export function useLineCursor(cursor: LineCursor | undefined, { x, y, toPx }: Drawn) {
   const count = Math.min(x.length, y.length);
-  const [own, setOwn] = useState(() => Math.max(0, rowPeaks(y)[0] ?? 0));
+  const [own, setOwn] = useState(() => cursor?.index ?? Math.max(0, rowPeaks(y)[0] ?? 0));
   const index = Math.min(Math.max(0, cursor?.index ?? own), Math.max(0, count - 1));
   const drag = useRef<{ px: number; from: number } | null>(null);
 
