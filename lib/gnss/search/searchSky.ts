@@ -36,9 +36,10 @@ export type SkySearch = {
 
 /**
  * Largest level that one code may leave in another's grid: -19.4 dB for the worst pair of C/A codes half a kHz apart over
- * 1 ms (computed over all pairs of 1 to 32), and 2.4 dB for noise on top of it.
+ * 1 ms (computed over all pairs of 1 to 32); 2.4 dB for noise on top of it, 2 dB by which a very strong satellite reads low
+ * because its own code raises the noise of its grid, and 1 dB.
  */
-const CERTAIN_WITHIN_DB = 17;
+const CERTAIN_WITHIN_DB = 14;
 const GRID_LOSS_DB = 1.5; // mean over code phases within half a step and Dopplers within half a row: computed
 const MOST_PASSES = 6;
 const MARGIN_DB = 3;
@@ -47,7 +48,7 @@ const UNCHANGED_DB = 3;
 /**
  * Search that neither interference nor a strong satellite may fill with satellites that are not there.
  * 1. Pulses are blanked and narrow-band interference is excised.
- * 2. All satellites are searched. What is within 17 dB of the strongest cannot be the shadow of its code, whatever the
+ * 2. All satellites are searched. What is within 14 dB of the strongest cannot be the shadow of its code, whatever the
  *    codes; it is genuine.
  * 3. If more was found, the genuine ones that are strong enough to account for it are rebuilt from their codes and taken out
  *    of the samples, strongest first, and the rest is searched again, until nothing is found or nothing new is certain.
