@@ -14,9 +14,13 @@ export const components = {
 } as const satisfies Record<string, ComponentType<never>>;
 
 function calculators() {
-  const entries = CALCULATORS.map(({ tag }) => [
+  const entries = CALCULATORS.map(({ tag, inputs }) => [
     tag,
-    (attributes: Record<string, unknown>) => <StandingCalculator tag={tag} attributes={attributes} />,
+    (attributes: Record<string, unknown>) => {
+      // Other inputs in the text are another calculator: a lead sees at once what was changed.
+      const written = inputs.map(({ attribute }) => attributes[attribute]).join("|");
+      return <StandingCalculator key={written} tag={tag} attributes={attributes} />;
+    },
   ]);
   return Object.fromEntries(entries) as Record<CalculatorTag, FunctionComponent<Record<string, unknown>>>;
 }

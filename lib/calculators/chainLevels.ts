@@ -5,7 +5,7 @@ export const CHAIN_LEVELS = {
   tag: "ChainLevels",
   number: 8,
   name: "Chain levels",
-  question: "Is it too little, too much, and does every part get its feed?",
+  question: "Too little, too much, and is every part fed?",
   inputs: [
     {
       input: "rows",

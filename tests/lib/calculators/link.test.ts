@@ -68,6 +68,18 @@ describe("a figure", () => {
     ["3 Hz", "Hz does not fit. This quantity is in m."],
   ])("%j is refused with the reason", (text, problem) => expect(readFigure(bounds, "m", text)).toEqual({ problem }));
 
+  // Symbols of the SI and of data sheets; a prefix is a factor of a thousand.
+  test.each([
+    ["13.5 dB/100 m", "dB/100m", 13.5],
+    ["12 \u03a9/km", "ohm/km", 12],
+    ["2 ohm", "ohm", 2],
+    ["45 mA", "mA", 45],
+    ["90 min", "h", 1.5],
+    ["0.5 g/s", "g/s", 0.5],
+  ] as const)("%s is read in %s", (text, unit, value) =>
+    expect(readFigure({ from: 0, to: 100, decimals: 0 }, unit, text)).toEqual({ value }),
+  );
+
   test("may be whole only, or stay empty", () => {
     expect(readFigure({ ...bounds, whole: true }, "1", "1.5")).toHaveProperty("problem");
     expect(readFigure({ ...bounds, absent: "none" }, "1", " ")).toEqual({ value: null });
