@@ -10,19 +10,22 @@ import { Key } from "@/components/ui/Key";
 import type { Reading } from "./reading";
 import type { SearchResult } from "./useSearch";
 
-type GridReadingProps = { result: SearchResult; onTake?: (reading: Reading) => void; busy: boolean };
+type GridReadingProps = { result: SearchResult; onTake?: (reading: Reading) => void; busy: boolean; start?: Cell };
 
 /** Lags either side of the crosshair that the cut shows; half a chip apart. */
 const CUT_CELLS = 20;
 
-/** Grid, crosshair, cuts and the key that takes the crosshair's reading. */
-export function GridReading({ result, onTake, busy }: GridReadingProps) {
+/**
+ * Grid, crosshair, cuts and the key that takes the crosshair's reading. Without a `start` the crosshair begins in the middle of
+ * the window: in a case the strongest cell is for the person to find.
+ */
+export function GridReading({ result, onTake, busy, start }: GridReadingProps) {
   const { prn, settings, grid } = result;
   const columns = grid.lagsChips.length;
   const top = useMemo(() => highestCell(grid.power, columns), [grid, columns]);
   const [moved, setMoved] = useState<{ of: SearchResult; cell: Cell } | null>(null);
-  // A new grid starts at the middle of its window: the strongest cell is for the person to find.
-  const cell = moved?.of === result ? moved.cell : { row: grid.dopplersHz.length >> 1, column: columns >> 1 };
+  const cell =
+    moved?.of === result ? moved.cell : (start ?? { row: grid.dopplersHz.length >> 1, column: columns >> 1 });
   const setCell = (next: Cell) => setMoved({ of: result, cell: next });
 
   const power = grid.power[cell.row * columns + cell.column]!;

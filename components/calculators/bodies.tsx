@@ -2,6 +2,7 @@ import type { ComponentType } from "react";
 import type { BenchCalculator, CalculatorTag } from "@/lib/calculators/calculators";
 import type { CalculatorProps } from "./calculatorProps";
 import { CableEcho } from "./CableEcho";
+import { CaptureView } from "./CaptureView";
 import { ChainLevels } from "./ChainLevels";
 import { DelayBudget } from "./DelayBudget";
 import { FalseLock } from "./FalseLock";
@@ -15,6 +16,7 @@ export const BODIES: { [T in CalculatorTag]: ComponentType<CalculatorProps<Extra
   TwoCodes,
   FalseLock,
   SearchPlan,
+  CaptureView,
   LoopJitter,
   ChainLevels,
   CableEcho,

@@ -27,6 +27,8 @@ const DRAWN: Record<CalculatorTag, () => Small> = {
     const loop = { shape, spacingChips: 0.5, ratio: 0, delayChips: 0 };
     return over(range(-1.6, 1.6, 64), (error) => earlyMinusLate(loop, error));
   },
+  // How often each value of the samples occurs.
+  CaptureView: () => ({ ...over(range(-6, 6, 12), (count) => exp((-count * count) / 8)), bars: true }),
   // Gains above the line, losses below.
   ChainLevels: () => ({ x: range(0, 4, 4), y: [7, -3, 4, -5, -2], bars: true }),
   // The loss of a run, and the echo that stands up from it.

@@ -1,5 +1,6 @@
 import type { Calculator } from "./calculator";
 import { CABLE_ECHO } from "./cableEcho";
+import { CAPTURE_VIEW } from "./captureView";
 import { CHAIN_LEVELS } from "./chainLevels";
 import { DELAY_BUDGET } from "./delayBudget";
 import { FALSE_LOCK } from "./falseLock";
@@ -13,6 +14,7 @@ export const CALCULATORS = [
   TWO_CODES,
   FALSE_LOCK,
   SEARCH_PLAN,
+  CAPTURE_VIEW,
   LOOP_JITTER,
   CHAIN_LEVELS,
   CABLE_ECHO,

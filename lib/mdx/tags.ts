@@ -105,7 +105,6 @@ export function tagNamed(name: string): TagSpec | null {
 
 /** Tags of the language that this release does not have yet. */
 export const LATER_TAGS: readonly string[] = [
-  "CaptureView",
   "ExpectedCn0",
   "PromptCn0",
   "EffectiveCn0",

@@ -28,6 +28,8 @@ const MOST_POWER_BYTES = 32e6;
  * The noise of a grid is the median over its rows of their mean power, which a signal in a few rows does not move.
  * @param received lines of the plan's sums, reaching as far as its Dopplers
  * @param onProgress called after each Doppler row, with the share of the work done
+ * @param onRow given each finished row of each replica's grid; `places` says which code phase stands where, and the next row
+ *   is written over it
  * @returns one cell per replica, in that order
  */
 export function searchCells(
@@ -37,6 +39,7 @@ export function searchCells(
   { lags, highest }: SearchBand,
   plan: SearchPlanInForce,
   onProgress?: (done: number, total: number) => void,
+  onRow?: (replica: number, row: number, power: Float64Array, places: Uint32Array) => void,
 ): HighestCell[] {
   const { dopplersHz, sums } = plan;
   const { places, add } = createProductPower(lags);
@@ -79,6 +82,7 @@ export function searchCells(
           const power = powers[place * atOnce + n];
           const found = highestAndMean(power);
           means[firstCode + n][row] = found.mean;
+          onRow?.(firstCode + n, row, power, places);
           const known = best[firstCode + n];
           if (power[found.place] > known.peak)
             Object.assign(known, { peak: power[found.place], place: found.place, row });

@@ -28,6 +28,7 @@ export type SatelliteFinding = {
  * of what passes it finer than the grid. Any rate, any intermediate frequency, real or complex samples.
  * It takes the grid as it is: strong satellites and interference raise false peaks, see `searchSky`.
  * @param onProgress called after each Doppler row and each satellite
+ * @param onRow given the rows of the grids as they are finished, see `searchCells`; `searchMap` keeps them
  * @returns one finding per entry of `prns`, in that order
  */
 export function searchSatellites(
@@ -36,15 +37,15 @@ export function searchSatellites(
   prns: readonly number[],
   request: SearchRequest,
   onProgress?: (done: number, total: number) => void,
+  onRow?: (replica: number, row: number, power: Float64Array, places: Uint32Array) => void,
 ): SatelliteFinding[] {
   const starts = edgeStartsMs(request);
   const falseAlarmPerSearch = falseAlarmPerCell(request.falseAlarmPerSearch, starts.length);
   let best: SatelliteFinding[] = [];
   starts.forEach((startMs, pass) => {
     const one = { ...request, falseAlarmPerSearch, startMs: (request.startMs ?? 0) + startMs };
-    const findings = searchOnce(capture, signal, prns, one, (done, total) =>
-      onProgress?.(pass * total + done, starts.length * total),
-    );
+    const progress = (done: number, total: number) => onProgress?.(pass * total + done, starts.length * total);
+    const findings = searchOnce(capture, signal, prns, one, progress, onRow);
     best = findings.map((finding, n) => (pass === 0 || finding.peak > best[n].peak ? finding : best[n]));
   });
   return best;
@@ -56,6 +57,7 @@ function searchOnce(
   prns: readonly number[],
   request: SearchRequest,
   onProgress: (done: number, total: number) => void,
+  onRow?: (replica: number, row: number, power: Float64Array, places: Uint32Array) => void,
 ): SatelliteFinding[] {
   const plan = searchPlanOf(capture, signal, request);
   const band = searchBand(capture, signal);
@@ -65,7 +67,7 @@ function searchOnce(
   const reach = Math.ceil(plan.dopplersHz[0] / -spacingHz);
   const times = { startS: plan.startS, lengthS: plan.coherentS, sums: plan.sums };
   const received = createReceivedLines(capture, spacingHz, band.highest, reach, times);
-  const cells = searchCells(received, signal, replicas, band, plan, (done) => onProgress(done, total));
+  const cells = searchCells(received, signal, replicas, band, plan, (done) => onProgress(done, total), onRow);
   const threshold = cellThreshold(plan, band);
   const refine = createRefinement(received, capture, signal, band, plan);
   return cells.map((cell, n) => {
