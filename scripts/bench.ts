@@ -1,7 +1,6 @@
 // `npm run bench [-- NAME ...]`: our kernels beside a numpy and scipy reference, in turns within one run, since only their
 // ratio says anything on a machine that others use as well. Exit code 0 when the answers agree, 1 when they differ, 2 when the
 // reference cannot run. A target that is missed is shown and fails nothing: a loaded machine must not turn a build red.
-import { spawnSync } from "node:child_process";
 import { mkdtempSync, readdirSync, rmSync } from "node:fs";
 import { tmpdir } from "node:os";
 import path from "node:path";
@@ -9,6 +8,7 @@ import { pathToFileURL } from "node:url";
 import { parseArgs } from "node:util";
 import { compareWithTwin } from "./bench/compareWithTwin";
 import { printTable } from "./bench/printTable";
+import { findPython } from "./bench/python";
 import type { Bench, TableBench } from "@/tests/bench/bench";
 
 const FOLDER = path.resolve(import.meta.dirname, "../tests/bench");
@@ -24,19 +24,13 @@ if (unknown.length > 0 || !(Number.isInteger(rounds) && rounds >= 1)) {
   say(`bench: ${unknown.join(", ") || values.rounds}? There is ${names.join(", ")}, and --rounds from 1.`);
   process.exit(2);
 }
-const probe = spawnSync(
-  "python3",
-  ["-c", "import numpy, scipy; print('numpy', numpy.__version__, 'scipy', scipy.__version__)"],
-  {
-    encoding: "utf8",
-  },
-);
-if (probe.status !== 0) {
+const python = findPython();
+if (!python) {
   say("bench: the reference needs python3 with numpy and scipy, which are not here. On Debian:");
   say("  apt-get install python3-numpy python3-scipy");
   process.exit(2);
 }
-say(`Node ${process.version}, ${probe.stdout.trim()}; medians of ${rounds} rounds, in turns\n`);
+say(`Node ${process.version}, ${python.versions}; medians of ${rounds} rounds, in turns\n`);
 
 let differing = 0;
 for (const name of positionals.length > 0 ? positionals : names) {

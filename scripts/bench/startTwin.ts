@@ -1,6 +1,7 @@
 import { spawn } from "node:child_process";
 import { once } from "node:events";
 import { createInterface } from "node:readline";
+import { pythonCommand } from "./python";
 
 /** The reference's process; one thread, whatever its libraries would like. */
 export type Twin = {
@@ -13,7 +14,7 @@ export type Twin = {
 
 export async function startTwin(script: string, folder: string): Promise<Twin> {
   const single = { OMP_NUM_THREADS: "1", OPENBLAS_NUM_THREADS: "1", MKL_NUM_THREADS: "1" };
-  const twin = spawn("python3", [script, folder], {
+  const twin = spawn(pythonCommand(), [script, folder], {
     stdio: ["pipe", "pipe", "inherit"],
     env: { ...process.env, ...single, PYTHONDONTWRITEBYTECODE: "1" },
   });

@@ -2,6 +2,7 @@ import { spawnSync } from "node:child_process";
 import { mkdtempSync, rmSync } from "node:fs";
 import { tmpdir } from "node:os";
 import path from "node:path";
+import { pythonCommand } from "@/scripts/bench/python";
 import { search } from "@/scripts/engine/search";
 import type { TableBench } from "./bench";
 
@@ -47,7 +48,7 @@ export const bench: TableBench = {
 };
 
 function makeCapture(folder: string, number: number): Made {
-  const made = spawnSync("python3", [SCRIPT, folder, String(number), String(number + 1)], {
+  const made = spawnSync(pythonCommand(), [SCRIPT, folder, String(number), String(number + 1)], {
     encoding: "utf8",
     env: { ...process.env, PYTHONDONTWRITEBYTECODE: "1" },
   });

@@ -1,8 +1,7 @@
 """
 Synthesis of complex 8-bit samples in numpy: satellites with data bits and code Doppler in white noise, satellite by satellite
 over the whole length, complex64 where it suffices (phases need double), noise from single-precision normal draws.
-Whole arrays are how this is usually written. Cut into blocks of a millisecond, which stay in the cache, the same lines take
-about a third of the time.
+Whole arrays are how this is usually written; cut into blocks that stay in the cache, the same lines take much less time.
 """
 
 import json
