@@ -197,5 +197,5 @@ const sentence = (message: string) => {
 function worked({ map: { finding }, request }: One): string {
   const { peak, threshold, found, cn0DbHz } = finding;
   const ratio = String.raw`K=${texNumber(request.sums)},\ T=${texQuantity(request.coherentMs, "ms")}:\quad 10\log_{10}\frac{${texNumber(peak, 2)}}{${texNumber(threshold, 2)}}=${texQuantity(10 * Math.log10(peak / threshold), "dB", 1)}`;
-  return found ? String.raw`${ratio},\quad \tfrac{C}{N_0}=${texQuantity(cn0DbHz, "dB-Hz", 1)}` : ratio;
+  return found ? String.raw`${ratio},\quad \tfrac{C}{N_0}=${texQuantity(cn0DbHz, "dB\\text{-}Hz", 1)}` : ratio;
 }

@@ -128,4 +128,4 @@ function cellOf({ map }: FalseLocks, { dopplerHz, lagChips }: FalsePeak): Cell {
 }
 
 const worked = ({ inputs }: FalseLocks, { levelDb, apparentCn0DbHz, dopplerHz, lagChips }: FalsePeak) =>
-  String.raw`\Delta f=${texQuantity(inputs.dopplerHz - dopplerHz, "Hz")},\ k=${lagChips}:\quad ${texNumber(inputs.cn0DbHz, 1)}${texNumber(levelDb, 2)}=${texQuantity(apparentCn0DbHz, "dB-Hz", 1)}`;
+  String.raw`\Delta f=${texQuantity(inputs.dopplerHz - dopplerHz, "Hz")},\ k=${lagChips}:\quad ${texNumber(inputs.cn0DbHz, 1)}${texNumber(levelDb, 2)}=${texQuantity(apparentCn0DbHz, "dB\\text{-}Hz", 1)}`;

@@ -9,11 +9,11 @@ export function FalsePeakTable({ peaks }: { peaks: readonly FalsePeak[] }) {
   const more = peaks.length - SHOWN;
   return (
     <>
-      <Table caption="False peaks, highest first" showCaption>
+      <Table caption="False peaks, highest first; lag after the strong satellite’s code" showCaption>
         <thead>
           <Tr>
             <Th>Doppler</Th>
-            <Th figure>after the strong one’s code</Th>
+            <Th figure>lag</Th>
             <Th figure>apparent C/N0</Th>
             <Th figure>chance</Th>
           </Tr>
@@ -21,7 +21,7 @@ export function FalsePeakTable({ peaks }: { peaks: readonly FalsePeak[] }) {
         <tbody>
           {peaks.slice(0, SHOWN).map(({ dopplerHz, lagChips, apparentCn0DbHz, detection }) => (
             <Tr key={`${dopplerHz}/${lagChips}`}>
-              <RowHead className="figures">{formatNumber(dopplerHz, 0, true)} Hz</RowHead>
+              <RowHead className="whitespace-nowrap figures">{formatNumber(dopplerHz, 0, true)} Hz</RowHead>
               <Td figure>{lagChips} chip</Td>
               <Td figure>{formatNumber(apparentCn0DbHz, 1)} dB-Hz</Td>
               <Td figure>{formatNumber(100 * detection, 1)} %</Td>

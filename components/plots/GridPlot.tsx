@@ -31,8 +31,8 @@ const HINTS = [
   { keys: ["←", "→", "↑", "↓"], word: "one cell" },
   { keys: ["Shift"], word: "ten" },
   { keys: ["P"], word: "next peak" },
-  { keys: ["Enter"], word: "take" },
 ];
+const TAKE = { keys: ["Enter"], word: "take" };
 
 /** Search grid: Doppler up, code phase across, a crosshair that reads one cell of the full grid. */
 export function GridPlot({
@@ -80,7 +80,7 @@ export function GridPlot({
           ],
           start: column,
         }}
-        hints={HINTS}
+        hints={cursor.onTake ? [...HINTS, TAKE] : HINTS}
         legend={<HeatScale topDb={topDb} />}
       >
         <GridCells

@@ -45,13 +45,16 @@ export function PlotFrame({
           height={Math.max(0, g.bottom - g.top + 2)}
         />
       </clipPath>
-      <rect
-        x={g.left}
-        y={g.top}
-        width={Math.max(0, g.right - g.left)}
-        height={g.bottom - g.top}
-        className="plot-ground"
-      />
+      {/* Without lines the frame lies over a picture, which a ground would hide. */}
+      {grid !== "none" && (
+        <rect
+          x={g.left}
+          y={g.top}
+          width={Math.max(0, g.right - g.left)}
+          height={g.bottom - g.top}
+          className="plot-ground"
+        />
+      )}
       <Grid g={g} grid={grid} />
       {bands.map((band, at) => (
         <BandShape key={at} g={g} band={band} />

@@ -27,6 +27,10 @@ function grid(given: { cell?: Cell; onMove?: (cell: Cell) => void; onTake?: (cel
 }
 const reading = () => screen.getByRole("application").getAttribute("aria-label");
 
+test("nothing is painted over the cells", () => {
+  expect(grid().container.querySelector(".plot-ground")).toBeNull();
+});
+
 test("P visits the peaks, strongest first, and reads the cell of the full grid", async () => {
   grid();
   await userEvent.tab();
