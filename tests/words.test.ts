@@ -8,7 +8,6 @@ const COURSE_WORDS =
 // Other people's words that only look like them.
 const NOT_OURS = [
   /\bof course\b/gi,
-  /run(s|ning)? (its|their) course|run(s)?-?_?its-?_?course/gi,
   /student's t\b/gi,
   /oscillator('s)? grades?|grades? of (the |an )?oscillators?/gi,
   /delivery attempts?/gi,
@@ -35,7 +34,7 @@ test.each([
   ["/api/quiz-results", ["quiz"]],
   ["Your score", ["score"]],
   ["Enrol now", ["enrol"]],
-  ["of course; Student's t; an oscillator grade; hasRunItsCourse; degrade, underscore, upgraded", []],
+  ["of course; Student's t; an oscillator grade; degrade, underscore, upgraded", []],
 ])("%j is seen for what it is", (text, words) => {
   expect(courseWordsIn(text)).toEqual(words);
 });

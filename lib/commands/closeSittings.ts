@@ -1,7 +1,7 @@
 import "server-only";
 import { select } from "@/lib/db";
 import type { DecidableCase } from "@/lib/policies/decidability";
-import { hasRunItsCourse } from "@/lib/policies/hasRunItsCourse";
+import { isSittingComplete } from "@/lib/policies/isSittingComplete";
 import { Closing, Decision, Employer, Release, Sitting } from "@/models";
 import { tellDeciders } from "./tellDeciders";
 import { transact } from "./transact";
@@ -32,11 +32,11 @@ async function closeSitting(id: string, publicOrigin: string, now: Date): Promis
     const cases = await select<DecidableCase & { number: number }>(CASES, { id }, transaction);
     // A case that was asked for before the last day ended is marked first; this is looked at again then.
     if (cases.some(({ state }) => state !== "marked")) return false;
-    const unfinished = !hasRunItsCourse(release.checks, release.frontMatter.sitting, cases);
+    const unfinished = !isSittingComplete(release.checks, release.frontMatter.sitting, cases);
     await Closing.create({ sittingId: id, unfinished, closedAt: now }, { transaction });
     const marked = new Set(cases.map(({ checkId }) => checkId)).size;
     const why = `Its last day, ${sitting.lastDay}, has passed; ${marked} of ${release.checks.length} checks have a marking record.`;
-    // One that had run its course was told when its last case was marked.
+    // One that was complete was told when its last case was marked.
     if (unfinished) await tellDeciders({ sitting, release, employer }, { publicOrigin, now, why }, transaction);
     return true;
   });

@@ -5,7 +5,7 @@ import { ENGINE_VERSION } from "@/lib/checks/engineVersion";
 import type { Marking } from "@/lib/checks/kind";
 import { select } from "@/lib/db";
 import type { DecidableCase } from "@/lib/policies/decidability";
-import { hasRunItsCourse } from "@/lib/policies/hasRunItsCourse";
+import { isSittingComplete } from "@/lib/policies/isSittingComplete";
 import { CaseSecret, HandIn, MarkingRecord, Person, Progress, Sitting } from "@/models";
 import { openSecret } from "./caseSecret";
 import type { Engine } from "./engine";
@@ -62,7 +62,7 @@ const fields = ({ marking, rows, quantities, withinCount, needs, met, workings }
 // True once in a sitting: afterwards no case can be opened in it, so none is marked.
 async function runsOut({ sitting, release }: FoundCase, transaction: Transaction): Promise<boolean> {
   const cases = await select<DecidableCase & { number: number }>(CASES, { sittingId: sitting.id }, transaction);
-  return hasRunItsCourse(release.checks, release.frontMatter.sitting, cases);
+  return isSittingComplete(release.checks, release.frontMatter.sitting, cases);
 }
 
 async function tellTechnician(

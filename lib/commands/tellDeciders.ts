@@ -10,15 +10,15 @@ import { writeMail } from "./writeMail";
 
 type Decider = { personId: string; email: string };
 
-const RUN = "It has run its course: every check has its marking record.";
+const COMPLETE = "It is complete: every check has its marking record.";
 
 /**
  * A sitting is there to be decided: a mail to every decider of the employer whom nothing bars from deciding on it.
- * @param why a sentence for the mail; that it has run its course, when left out
+ * @param why a sentence for the mail; that it is complete, when left out
  */
 export async function tellDeciders(
   { sitting, release, employer }: Pick<FoundCase, "sitting" | "release" | "employer">,
-  { publicOrigin, now, why = RUN }: { publicOrigin: string; now: Date; why?: string },
+  { publicOrigin, now, why = COMPLETE }: { publicOrigin: string; now: Date; why?: string },
   transaction: Transaction,
 ): Promise<void> {
   const technician = await Person.findByPk(sitting.technicianId, { transaction, rejectOnEmpty: true });

@@ -65,7 +65,7 @@ test("so does one with a fresh case unused, and one in which nothing was opened"
   expect(await mails()).toHaveLength(2);
 });
 
-test("one that had run its course was told when it was marked, and is not told again", async () => {
+test("one that was complete was told when it was marked, and is not told again", async () => {
   await makeMarkingRecord(firm, { sitting: await sittingOf(["reading"]) });
   expect(await close()).toBe(1);
   expect(await closings()).toMatchObject([{ unfinished: false }]);

@@ -2,7 +2,7 @@ import type { DecidableCase } from "./decidability";
 import type { FreshCaseRule } from "./nextCase";
 
 /** Nothing is left to sit before the last day: every check is met, or has used up the cases the release allows. */
-export const hasRunItsCourse = (
+export const isSittingComplete = (
   checks: readonly { id: string }[],
   rule: Pick<FreshCaseRule, "freshCases">,
   cases: readonly (DecidableCase & { number: number })[],

@@ -1,7 +1,7 @@
 import { expect, test } from "vitest";
-import { hasRunItsCourse } from "@/lib/policies/hasRunItsCourse";
+import { isSittingComplete } from "@/lib/policies/isSittingComplete";
 
-type Cases = Parameters<typeof hasRunItsCourse>[2];
+type Cases = Parameters<typeof isSittingComplete>[2];
 const one = (checkId: string, number: number, met: boolean | null): Cases[number] => ({
   ...{ checkId, number, met, state: met === null ? "handed in" : "marked" },
 });
@@ -18,5 +18,5 @@ test.each<[string, number, Cases, boolean]>([
   ["the fresh case not met", 1, [one("reading", 1, true), one("delay", 1, false), one("delay", 2, false)], true],
   ["the fresh case met", 2, [one("delay", 2, true), one("delay", 1, false), one("reading", 1, true)], true],
 ])("%s, %i fresh cases allowed", (_what, freshCases, cases, expected) => {
-  expect(hasRunItsCourse(CHECKS, { freshCases }, cases)).toBe(expected);
+  expect(isSittingComplete(CHECKS, { freshCases }, cases)).toBe(expected);
 });
