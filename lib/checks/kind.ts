@@ -1,4 +1,5 @@
 import type { Unit } from "@/lib/gnss/units";
+import type { Random } from "@/lib/numeric/random";
 
 /** As typed, by field id; a field of a repeated section has its line number in the id, `satellites.3.doppler`. */
 export type Answers = Readonly<Record<string, string>>;
@@ -130,7 +131,27 @@ export interface CheckKind<P = unknown, T = unknown> {
   /** The right method with a careful reading, from the public case and its files alone. */
   solve(built: BuiltCase<T>, plan: CheckPlan<P>): Answers;
   readonly wrongMethods: Readonly<Record<string, WrongMethod<P, T>>>;
+  /** How the release check tries the kind; absent only where no machine marks. */
+  readonly trial?: Trial<P, T>;
 }
+
+/** People who never existed, each with a case of their own. Same seed and same draws, same outcome. */
+export interface Trial<P = unknown, T = unknown> {
+  /** Whether `build` makes the whole case; a search kind leaves its samples out here and is tried whole on a few cases. */
+  readonly whole: boolean;
+  /** The case as far as the methods below and the wrong methods look at it. */
+  build(seedHex: string, plan: CheckPlan<P>): BuiltCase<T>;
+  /** What `mark` finds for that case, without what only its workings need. */
+  judge(built: BuiltCase<T>, plan: CheckPlan<P>, answers: Answers): Marking;
+  /** The right method as competent people carry it out: every reading off by what eye, cursor and noise make of it. */
+  read(built: BuiltCase<T>, plan: CheckPlan<P>, random: Random): Answers;
+  /** Somebody who knows the form and the usual ranges, and looks at nothing else. */
+  guess(publicCase: PublicCase, plan: CheckPlan<P>, random: Random): Answers;
+  /** How hard this case is. A case outside one of its bands is unfair. */
+  difficulty(built: BuiltCase<T>, plan: CheckPlan<P>): Difficulty[];
+}
+
+export type Difficulty = { label: string; unit: Unit; value: number; from: number; to: number };
 
 export interface WrongMethod<P = unknown, T = unknown> {
   readonly label: string;
