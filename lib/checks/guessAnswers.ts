@@ -24,12 +24,7 @@ export function guessAnswers(
   return Object.fromEntries(entries);
 }
 
-function guessOf(
-  section: string,
-  field: FieldSpec,
-  guesses: Readonly<Record<string, Guess>>,
-  random: Random,
-): string {
+function guessOf(section: string, field: FieldSpec, guesses: Readonly<Record<string, Guess>>, random: Random): string {
   const name = `${section}.${field.id}`;
   const guess = Object.hasOwn(guesses, name) ? guesses[name] : null;
   if (typeof guess === "function") return guess(random);
