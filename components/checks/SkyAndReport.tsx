@@ -1,3 +1,5 @@
+import { SkyDial } from "@/components/plots/SkyDial";
+import { hiddenPath, skyPlace } from "@/components/plots/skyGeometry";
 import { SectionHead } from "@/components/ui/SectionHead";
 import { RowHead, Table, Td, Th, Tr } from "@/components/ui/Table";
 
@@ -6,10 +8,6 @@ export type SkyData = {
   wall: { fromAzimuthDeg: number; toAzimuthDeg: number; topElevationDeg: number };
   report: { prn: number; tracked: boolean; cn0DbHz: number | null }[];
 };
-
-const SIZE = 300;
-const RADIUS = 118;
-const CENTRE = SIZE / 2;
 
 /** Where each satellite stands, what the wall hides, and what the receiver says of it. */
 export function SkyAndReport({ data }: { data: SkyData }) {
@@ -51,41 +49,12 @@ export function SkyAndReport({ data }: { data: SkyData }) {
 
 function SkyPlot({ data: { sky, wall } }: { data: SkyData }) {
   const summary = `Sky plot of ${sky.length} satellites; a wall from azimuth ${wall.fromAzimuthDeg}° to ${wall.toAzimuthDeg}° up to ${wall.topElevationDeg}°. The same values stand in the table beside it.`;
+  const { fromAzimuthDeg: fromDeg, toAzimuthDeg: toDeg, topElevationDeg: topDeg } = wall;
+  const hidden = hiddenPath([{ fromDeg, toDeg, topDeg }]);
   return (
-    <svg
-      viewBox={`0 0 ${SIZE} ${SIZE}`}
-      width={SIZE}
-      className="mt-2 block h-auto max-w-full"
-      role="img"
-      aria-label={summary}
-    >
-      <path d={wallPath(wall)} fill="var(--heat-1)" stroke="var(--ink)" strokeWidth="1.25" />
-      {[0, 30, 60].map((elevation) => (
-        <circle
-          key={elevation}
-          cx={CENTRE}
-          cy={CENTRE}
-          r={radius(elevation)}
-          fill="none"
-          stroke={elevation === 0 ? "var(--ink)" : "var(--rule)"}
-          strokeWidth={elevation === 0 ? 1.25 : 0.75}
-        />
-      ))}
-      {[30, 60].map((elevation) => (
-        <text key={elevation} x={CENTRE + 3} y={CENTRE - radius(elevation) + 12} fontSize="11" fill="var(--ink-3)">
-          {elevation}°
-        </text>
-      ))}
-      {(["N", "E", "S", "W"] as const).map((name, quarter) => {
-        const [x, y] = place(quarter * 90, -9);
-        return (
-          <text key={name} x={x} y={y + 4} fontSize="12" fontWeight="600" textAnchor="middle" fill="var(--ink-2)">
-            {name}
-          </text>
-        );
-      })}
+    <SkyDial summary={summary} under={<path d={hidden} fill="var(--heat-1)" stroke="var(--ink)" strokeWidth="1.25" />}>
       {sky.map(({ prn, azimuthDeg, elevationDeg }) => {
-        const [x, y] = place(azimuthDeg, elevationDeg);
+        const [x, y] = skyPlace(azimuthDeg, elevationDeg);
         const side = labelSide(sky, prn);
         return (
           <g key={prn}>
@@ -106,7 +75,7 @@ function SkyPlot({ data: { sky, wall } }: { data: SkyData }) {
           </g>
         );
       })}
-    </svg>
+    </SkyDial>
   );
 }
 
@@ -114,29 +83,11 @@ const LABEL = { width: 26, height: 16 };
 
 /** 1: number at the right of its square; -1: at the left, where the right is taken by another square or its number. */
 function labelSide(sky: SkyData["sky"], prn: number): 1 | -1 {
-  const places = sky.map((one) => ({ prn: one.prn, at: place(one.azimuthDeg, one.elevationDeg) }));
+  const places = sky.map((one) => ({ prn: one.prn, at: skyPlace(one.azimuthDeg, one.elevationDeg) }));
   const [x, y] = places.find((one) => one.prn === prn)!.at;
   const crowded = places.some(({ prn: other, at: [otherX, otherY] }) => {
     const right = otherX - x;
     return (right > 0 || (right === 0 && other > prn)) && right < LABEL.width && Math.abs(otherY - y) < LABEL.height;
   });
   return crowded ? -1 : 1;
-}
-
-const radius = (elevationDeg: number) => (RADIUS * (90 - elevationDeg)) / 90;
-
-function place(azimuthDeg: number, elevationDeg: number): [number, number] {
-  const angle = (azimuthDeg * Math.PI) / 180;
-  return [CENTRE + radius(elevationDeg) * Math.sin(angle), CENTRE - radius(elevationDeg) * Math.cos(angle)];
-}
-
-/** The ring sector from the horizon up to the wall's top; it may cross north. */
-function wallPath({ fromAzimuthDeg, toAzimuthDeg, topElevationDeg }: SkyData["wall"]): string {
-  const span = (toAzimuthDeg - fromAzimuthDeg + 360) % 360;
-  const steps = Array.from({ length: span + 1 }, (_, step) => fromAzimuthDeg + step);
-  const points = [
-    ...steps.map((azimuth) => place(azimuth, 0)),
-    ...steps.reverse().map((azimuth) => place(azimuth, topElevationDeg)),
-  ];
-  return `M${points.map(([x, y]) => `${x.toFixed(1)} ${y.toFixed(1)}`).join("L")}Z`;
 }
