@@ -103,7 +103,7 @@ function AnswerField({ spec, row, value, onChange }: AnswerFieldProps) {
       label={shown}
       aria-label={label}
       unit={unit === "1" ? undefined : formatQuantity(0, unit, 0).replace(/^0\s?/, "")}
-      signed={spec.id === "doppler"} // a step or a bin has no sign
+      signed={isSigned(spec)}
       value={value}
       error={error}
       help={spec.help}
@@ -115,3 +115,6 @@ function AnswerField({ spec, row, value, onChange }: AnswerFieldProps) {
     />
   );
 }
+
+/** A level in dBm has a sign as a rule; of frequencies a Doppler has one, a step or a bin has none. */
+const isSigned = ({ id, unit }: FieldSpec) => id === "doppler" || unit === "dBm";

@@ -6,6 +6,7 @@ import { TraceReader } from "@/components/calculators/TraceReader";
 import { SectionHead } from "@/components/ui/SectionHead";
 import type { PublicCase } from "@/lib/checks/kind";
 import { SkyAndReport, type SkyData } from "./SkyAndReport";
+import { StandOffSite, type StandOffData } from "./StandOffSite";
 
 type WorkspaceProps = { view: PublicCase; filesAddress: string; onTake?: (reading: Reading) => void };
 type CaptureData = {
@@ -53,6 +54,8 @@ export function Workspace({ view, filesAddress, onTake }: WorkspaceProps) {
           </div>
         </>
       );
+    case "stand-off":
+      return <StandOffSite data={view.data as StandOffData} />;
     default:
       return <p className="text-dense text-ink-2">Work with the files of this case and type your answers.</p>;
   }

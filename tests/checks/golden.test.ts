@@ -6,6 +6,7 @@ import { drawScene } from "@/lib/checks/satellites/drawScene";
 import { publicCase as satellitesCase } from "@/lib/checks/satellites/publicCase";
 import { satellites } from "@/lib/checks/satellites/satellites";
 import { searchPlan } from "@/lib/checks/search-plan/searchPlan";
+import { standOff } from "@/lib/checks/stand-off/standOff";
 import { sceneFor } from "./false-lock/sceneFor";
 import { GOLDEN } from "./goldenHashes";
 import { goldenOf } from "./goldenOf";
@@ -51,5 +52,12 @@ describe("false-lock@1", () => {
   });
   test.each(list(GOLDEN.falseLockCaptures))("capture of seed %i", { timeout: SLOW }, (n, hash) =>
     expect(goldenOf(falseLock.build(seedOf(n), plan))).toBe(hash),
+  );
+});
+
+describe("stand-off@1", () => {
+  const plan = planOf(standOff);
+  test.each(list(GOLDEN.standOff))("seed %i", (n, hash) =>
+    expect(goldenOf(standOff.build(seedOf(n), plan))).toBe(hash),
   );
 });

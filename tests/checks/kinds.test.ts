@@ -17,6 +17,7 @@ import { drawCase as drawPlan } from "@/lib/checks/search-plan/drawCase";
 import { markAnswers as markPlan } from "@/lib/checks/search-plan/markAnswers";
 import { publicCase as planCase } from "@/lib/checks/search-plan/publicCase";
 import { searchPlan } from "@/lib/checks/search-plan/searchPlan";
+import { standOff } from "@/lib/checks/stand-off/standOff";
 import { UNITS, isConvertible } from "@/lib/gnss/units";
 import { sceneFor } from "./false-lock/sceneFor";
 import { planOf, seedOf } from "./planOf";
@@ -53,15 +54,23 @@ const samples = {
     const { truth } = drawPlan(seed, plan.parameters);
     return { truth, shown: planCase(truth, plan), mark: (answers: Answers) => markPlan(seed, truth, plan, answers) };
   },
+  "stand-off": () => sampleOf(standOff),
 };
+/** For a kind whose case is quickly made. */
+function sampleOf<P, T extends object>(kind: CheckKind<P, T>) {
+  const plan = planOf(kind);
+  const { truth, publicCase } = kind.build(seed, plan);
+  return { truth, shown: publicCase, mark: (answers: Answers) => kind.mark(seed, plan, answers) };
+}
 const kinds: [keyof typeof samples, CheckKind][] = KINDS.map((kind) => [kind.id as keyof typeof samples, kind]);
 
-test("four kinds, found by name and version", () => {
+test("every kind, found by name and version", () => {
   expect(KINDS.map(({ id, letter, version }) => `${letter} ${id}@${version}`)).toEqual([
     "A1 correlator-reading@1",
     "A2 false-lock@1",
     "B1 satellites@1",
     "B2 search-plan@1",
+    "F2 stand-off@1",
   ]);
   for (const kind of KINDS) {
     expect(kindOf(kind.id)).toBe(kind);

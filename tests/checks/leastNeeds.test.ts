@@ -17,6 +17,7 @@ import { drawCase as drawPlan } from "@/lib/checks/search-plan/drawCase";
 import { markAnswers as markPlan } from "@/lib/checks/search-plan/markAnswers";
 import { publicCase as planCase } from "@/lib/checks/search-plan/publicCase";
 import { searchPlan } from "@/lib/checks/search-plan/searchPlan";
+import { standOff } from "@/lib/checks/stand-off/standOff";
 import { sceneFor } from "./false-lock/sceneFor";
 import { planOf, seeds } from "./planOf";
 
@@ -56,7 +57,14 @@ const MARKED: Readonly<Record<string, (one: Tried) => Marking>> = {
     const built: BuiltCase<typeof truth> = { truth, publicCase: planCase(truth, plan), files: [], draws: 1 };
     return markPlan(seed, truth, plan, searchPlan.wrongMethods[method]!.solve(built, plan));
   },
+  "stand-off": (one) => markedOf(standOff, one),
 };
+
+/** For a kind whose case is quickly made. */
+function markedOf<P, T>(kind: CheckKind<P, T>, { needs, method, seed }: Tried): Marking {
+  const plan = { ...planOf(kind), needs };
+  return kind.mark(seed, plan, kind.wrongMethods[method]!.solve(kind.build(seed, plan), plan));
+}
 
 test("every kind is tried", () => expect(Object.keys(MARKED).sort()).toEqual(KINDS.map(({ id }) => id).sort()));
 
