@@ -5,6 +5,7 @@ import { StandingCalculator } from "@/components/calculators/StandingCalculator"
 import { TraceReader } from "@/components/calculators/TraceReader";
 import { SectionHead } from "@/components/ui/SectionHead";
 import type { PublicCase } from "@/lib/checks/kind";
+import { PeakTrace, type PeakTraceData } from "./PeakTrace";
 import { SkyAndReport, type SkyData } from "./SkyAndReport";
 import { StandOffSite, type StandOffData } from "./StandOffSite";
 
@@ -26,6 +27,8 @@ export function Workspace({ view, filesAddress, onTake }: WorkspaceProps) {
       const { trace, stepChips } = view.data as TraceData;
       return <TraceReader trace={trace} stepChips={stepChips} onTake={onTake} />;
     }
+    case "side-peak":
+      return <PeakTrace data={view.data as PeakTraceData} onTake={onTake} />;
     case "satellites":
     case "false-lock": {
       const { captureFile, rateHz, windowHz, search } = view.data as CaptureData;
