@@ -6,6 +6,7 @@ import { drawScene } from "@/lib/checks/satellites/drawScene";
 import { publicCase as satellitesCase } from "@/lib/checks/satellites/publicCase";
 import { satellites } from "@/lib/checks/satellites/satellites";
 import { searchPlan } from "@/lib/checks/search-plan/searchPlan";
+import { sidePeak } from "@/lib/checks/side-peak/sidePeak";
 import { standOff } from "@/lib/checks/stand-off/standOff";
 import { sceneFor } from "./false-lock/sceneFor";
 import { GOLDEN } from "./goldenHashes";
@@ -52,6 +53,13 @@ describe("false-lock@1", () => {
   });
   test.each(list(GOLDEN.falseLockCaptures))("capture of seed %i", { timeout: SLOW }, (n, hash) =>
     expect(goldenOf(falseLock.build(seedOf(n), plan))).toBe(hash),
+  );
+});
+
+describe("side-peak@1", () => {
+  const plan = planOf(sidePeak);
+  test.each(list(GOLDEN.sidePeak))("seed %i", (n, hash) =>
+    expect(goldenOf(sidePeak.build(seedOf(n), plan))).toBe(hash),
   );
 });
 

@@ -1,5 +1,5 @@
 import { describe, expect, test } from "vitest";
-import type { Answers, CheckKind, PublicCase } from "@/lib/checks/kind";
+import type { Answers, CheckKind, Marking, PublicCase } from "@/lib/checks/kind";
 import { correlatorReading } from "@/lib/checks/correlator-reading/correlatorReading";
 import { drawCase } from "@/lib/checks/correlator-reading/drawCase";
 import { markAnswers as markReading } from "@/lib/checks/correlator-reading/markAnswers";
@@ -17,15 +17,16 @@ import { drawCase as drawPlan } from "@/lib/checks/search-plan/drawCase";
 import { markAnswers as markPlan } from "@/lib/checks/search-plan/markAnswers";
 import { publicCase as planCase } from "@/lib/checks/search-plan/publicCase";
 import { searchPlan } from "@/lib/checks/search-plan/searchPlan";
-import { standOff } from "@/lib/checks/stand-off/standOff";
 import { UNITS, isConvertible } from "@/lib/gnss/units";
 import { sceneFor } from "./false-lock/sceneFor";
 import { planOf, seedOf } from "./planOf";
 
 const seed = seedOf(31);
 
-/** Each kind's public case and marking, without making a capture. */
-const samples = {
+type Sample = { truth: object; shown: PublicCase; mark: (answers: Answers) => Marking };
+
+/** Public case and marking of the kinds that make a capture, without making it, and of those that came before trials. */
+const samples: Readonly<Record<string, () => Sample>> = {
   "correlator-reading": () => {
     const plan = planOf(correlatorReading);
     const { truth } = drawCase(seed, plan.parameters);
@@ -54,20 +55,21 @@ const samples = {
     const { truth } = drawPlan(seed, plan.parameters);
     return { truth, shown: planCase(truth, plan), mark: (answers: Answers) => markPlan(seed, truth, plan, answers) };
   },
-  "stand-off": () => sampleOf(standOff),
 };
-/** For a kind whose case is quickly made. */
-function sampleOf<P, T extends object>(kind: CheckKind<P, T>) {
+
+/** Any other kind: its case is quickly made. */
+function sampleOf(kind: CheckKind): Sample {
   const plan = planOf(kind);
   const { truth, publicCase } = kind.build(seed, plan);
-  return { truth, shown: publicCase, mark: (answers: Answers) => kind.mark(seed, plan, answers) };
+  return { truth: truth as object, shown: publicCase, mark: (answers) => kind.mark(seed, plan, answers) };
 }
-const kinds: [keyof typeof samples, CheckKind][] = KINDS.map((kind) => [kind.id as keyof typeof samples, kind]);
+const kinds = KINDS.map((kind) => [kind.id, kind] as const);
 
 test("every kind, found by name and version", () => {
   expect(KINDS.map(({ id, letter, version }) => `${letter} ${id}@${version}`)).toEqual([
     "A1 correlator-reading@1",
     "A2 false-lock@1",
+    "A3 side-peak@1",
     "B1 satellites@1",
     "B2 search-plan@1",
     "F2 stand-off@1",
@@ -76,22 +78,22 @@ test("every kind, found by name and version", () => {
     expect(kindOf(kind.id)).toBe(kind);
     expect(kindOf(kind.id, kind.version)).toBe(kind);
   }
-  expect(() => kindOf("side-peak")).toThrow(/no kind side-peak$/);
+  expect(() => kindOf("no-such-kind")).toThrow(/no kind no-such-kind$/);
   expect(() => kindOf("satellites", 2)).toThrow(/no kind satellites of version 2/);
   expect(() => kindOf("constructor")).toThrow(RangeError);
 });
 
 test("the engine says its version", () => expect(ENGINE_VERSION).toMatch(/^\d+\.\d+\.\d+$/));
 
-test("critical are: detection, verdicts, satellites found, none invented", () => {
+test("critical are: detection, verdicts, tracked peak, satellites found, none invented", () => {
   const critical = KINDS.flatMap((kind) =>
     kind.quantities.filter((one) => one.critical).map((one) => `${kind.letter} ${one.id}`),
   );
-  expect(critical).toEqual(["A1 detection", "A2 verdict", "B1 found", "B1 invented"]);
+  expect(critical).toEqual(["A1 detection", "A2 verdict", "A3 peak", "B1 found", "B1 invented"]);
 });
 
 describe.each(kinds)("%s", (id, kind) => {
-  const { truth, shown, mark } = samples[id]();
+  const { truth, shown, mark } = samples[id]?.() ?? sampleOf(kind);
   const fields = shown.sections.flatMap((section) => section.fields.map((field) => ({ section, field })));
 
   test("every parameter has a default inside its own bounds", () => {

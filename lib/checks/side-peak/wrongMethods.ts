@@ -8,6 +8,15 @@ type Wrong = WrongMethod<SidePeakParameters, SidePeakTruth>;
 
 /** Typical wrong readings; each differs from the right one in the named step alone. */
 export const wrongMethods: Readonly<Record<string, Wrong>> = {
+  "ten-log": {
+    label: "10 log of magnitudes instead of 20 log",
+    misses: ["sideLevel"],
+    solve({ publicCase }) {
+      const right = solve(publicCase);
+      const half = (field: string) => (Number(right[field]) / 2).toFixed(1);
+      return { ...right, "earlier.level": half("earlier.level"), "later.level": half("later.level") };
+    },
+  },
   "lock-trusted": {
     label: "The lock believed: tracked peak called the main one, side peaks written down by formula",
     misses: ["sideLevel"],
@@ -32,15 +41,6 @@ export const wrongMethods: Readonly<Record<string, Wrong>> = {
     label: "Sign of the bias turned round: a later peak taken for a range too short",
     misses: ["sideBias"],
     solve: ({ publicCase }) => withBiases(publicCase, (bias) => -bias),
-  },
-  "ten-log": {
-    label: "10 log of magnitudes instead of 20 log",
-    misses: ["sideLevel"],
-    solve({ publicCase }) {
-      const right = solve(publicCase);
-      const half = (field: string) => (Number(right[field]) / 2).toFixed(1);
-      return { ...right, "earlier.level": half("earlier.level"), "later.level": half("later.level") };
-    },
   },
   reflection: {
     label: "Unequal peaks put down to a reflection",
