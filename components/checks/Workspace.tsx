@@ -7,6 +7,7 @@ import { SectionHead } from "@/components/ui/SectionHead";
 import type { PublicCase } from "@/lib/checks/kind";
 import { PeakTrace, type PeakTraceData } from "./PeakTrace";
 import { SkyAndReport, type SkyData } from "./SkyAndReport";
+import { SkySurvey, type SkySurveyData } from "./SkySurvey";
 import { StandOffSite, type StandOffData } from "./StandOffSite";
 
 type WorkspaceProps = { view: PublicCase; filesAddress: string; onTake?: (reading: Reading) => void };
@@ -59,6 +60,8 @@ export function Workspace({ view, filesAddress, onTake }: WorkspaceProps) {
       );
     case "stand-off":
       return <StandOffSite data={view.data as StandOffData} />;
+    case "sky-view":
+      return <SkySurvey data={view.data as SkySurveyData} />;
     default:
       return <p className="text-dense text-ink-2">Work with the files of this case and type your answers.</p>;
   }

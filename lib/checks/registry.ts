@@ -4,10 +4,19 @@ import type { CheckKind } from "./kind";
 import { satellites } from "./satellites/satellites";
 import { searchPlan } from "./search-plan/searchPlan";
 import { sidePeak } from "./side-peak/sidePeak";
+import { skyView } from "./sky-view/skyView";
 import { standOff } from "./stand-off/standOff";
 
 /** Every version of every kind that a release may name; a released version stays here for ever. Newest of a kind first. */
-export const KINDS: readonly CheckKind[] = [correlatorReading, falseLock, sidePeak, satellites, searchPlan, standOff];
+export const KINDS: readonly CheckKind[] = [
+  correlatorReading,
+  falseLock,
+  sidePeak,
+  satellites,
+  searchPlan,
+  skyView,
+  standOff,
+];
 
 /**
  * A kind by its name, the newest version unless one is given.

@@ -120,14 +120,11 @@ export const LATER_TAGS: readonly string[] = [
 
 /** Kinds of the language that this release does not have yet; the others stand in the registry of kinds. */
 export const LATER_KINDS: readonly string[] = [
-  "side-peak",
   "cn0",
   "lost-decibels",
   "chain",
-  "sky-view",
   "witnessed",
   "interferer",
-  "stand-off",
   "locate",
   "jammed-or-not",
   "multipath-log",

@@ -8,6 +8,7 @@ import { satellites } from "@/lib/checks/satellites/satellites";
 import { searchPlan } from "@/lib/checks/search-plan/searchPlan";
 import { sidePeak } from "@/lib/checks/side-peak/sidePeak";
 import { standOff } from "@/lib/checks/stand-off/standOff";
+import { skyView } from "@/lib/checks/sky-view/skyView";
 import { sceneFor } from "./false-lock/sceneFor";
 import { GOLDEN } from "./goldenHashes";
 import { goldenOf } from "./goldenOf";
@@ -32,6 +33,11 @@ describe("search-plan@1", () => {
   test.each(list(GOLDEN.searchPlan))("seed %i", { timeout: SLOW }, (n, hash) =>
     expect(goldenOf(searchPlan.build(seedOf(n), plan))).toBe(hash),
   );
+});
+
+describe("sky-view@1", () => {
+  const plan = planOf(skyView);
+  test.each(list(GOLDEN.skyView))("seed %i", (n, hash) => expect(goldenOf(skyView.build(seedOf(n), plan))).toBe(hash));
 });
 
 describe("satellites@1", () => {

@@ -72,6 +72,7 @@ test("every kind, found by name and version", () => {
     "A3 side-peak@1",
     "B1 satellites@1",
     "B2 search-plan@1",
+    "E3 sky-view@1",
     "F2 stand-off@1",
   ]);
   for (const kind of KINDS) {
@@ -89,7 +90,7 @@ test("critical are: detection, verdicts, tracked peak, satellites found, none in
   const critical = KINDS.flatMap((kind) =>
     kind.quantities.filter((one) => one.critical).map((one) => `${kind.letter} ${one.id}`),
   );
-  expect(critical).toEqual(["A1 detection", "A2 verdict", "A3 peak", "B1 found", "B1 invented"]);
+  expect(critical).toEqual(["A1 detection", "A2 verdict", "A3 peak", "B1 found", "B1 invented", "E3 choice"]);
 });
 
 describe.each(kinds)("%s", (id, kind) => {
