@@ -7,4 +7,5 @@ export type Reading = {
   lagChips?: number;
   magnitude?: number;
   binHz?: number;
+  timeNs?: number;
 };

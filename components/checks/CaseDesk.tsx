@@ -94,7 +94,7 @@ export function CaseDesk({
         </Pane>
         <Pane id="search" current={step} className="border-rule bg-sheet desk:border-x-hair">
           <Workspace view={open.view} filesAddress={`${base}/files`} onTake={over ? undefined : take} />
-          <TakenLine taken={taken} />
+          <TakenLine taken={taken} kind={open.view.kind} />
         </Pane>
         <Pane id="answers" current={step} className="bg-ground">
           <div className="flex items-baseline justify-between gap-4 border-b-strong border-ink pb-2">

@@ -5,6 +5,7 @@ import { StandingCalculator } from "@/components/calculators/StandingCalculator"
 import { TraceReader } from "@/components/calculators/TraceReader";
 import { SectionHead } from "@/components/ui/SectionHead";
 import type { PublicCase } from "@/lib/checks/kind";
+import { DelayEntryWork, type DelayEntryData } from "./DelayEntryWork";
 import { PeakTrace, type PeakTraceData } from "./PeakTrace";
 import { SkyAndReport, type SkyData } from "./SkyAndReport";
 import { SkySurvey, type SkySurveyData } from "./SkySurvey";
@@ -62,6 +63,8 @@ export function Workspace({ view, filesAddress, onTake }: WorkspaceProps) {
       return <StandOffSite data={view.data as StandOffData} />;
     case "sky-view":
       return <SkySurvey data={view.data as SkySurveyData} />;
+    case "delay-entry":
+      return <DelayEntryWork data={view.data as DelayEntryData} onTake={onTake} />;
     default:
       return <p className="text-dense text-ink-2">Work with the files of this case and type your answers.</p>;
   }

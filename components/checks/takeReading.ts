@@ -13,8 +13,13 @@ const PARTS: Readonly<Record<string, (reading: Reading) => string | null>> = {
   cn0: ({ cn0DbHz }) => text(cn0DbHz, 1),
   lag: ({ lagChips }) => text(lagChips, 3),
 };
-/** These are taken only while they are open: which satellite stands behind another is for the person to say. */
-const WHEN_OPEN: typeof PARTS = { ...PARTS, parent: PARTS.prn! };
+/** These are taken only while they are open: which satellite stands behind another, and which echo is which, is for the person to say. */
+const WHEN_OPEN: typeof PARTS = {
+  ...PARTS,
+  parent: PARTS.prn!,
+  lead: ({ timeNs }) => text(timeNs, 1),
+  end: ({ timeNs }) => text(timeNs, 1),
+};
 
 /** The verdict that makes a satellite the one whose false lock is asked about. */
 const CALLED_FALSE = "cross-correlation";

@@ -1,4 +1,5 @@
 import { correlatorReading } from "./correlator-reading/correlatorReading";
+import { delayEntry } from "./delay-entry/delayEntry";
 import { falseLock } from "./false-lock/falseLock";
 import type { CheckKind } from "./kind";
 import { satellites } from "./satellites/satellites";
@@ -16,6 +17,7 @@ export const KINDS: readonly CheckKind[] = [
   searchPlan,
   skyView,
   standOff,
+  delayEntry,
 ];
 
 /**

@@ -1,5 +1,6 @@
 import { describe, expect, test } from "vitest";
 import { correlatorReading } from "@/lib/checks/correlator-reading/correlatorReading";
+import { delayEntry } from "@/lib/checks/delay-entry/delayEntry";
 import { falseLock } from "@/lib/checks/false-lock/falseLock";
 import { publicCase as falseLockCase } from "@/lib/checks/false-lock/publicCase";
 import { drawScene } from "@/lib/checks/satellites/drawScene";
@@ -25,6 +26,13 @@ describe("correlator-reading@1", () => {
   const plan = planOf(correlatorReading);
   test.each(list(GOLDEN.correlatorReading))("seed %i", (n, hash) =>
     expect(goldenOf(correlatorReading.build(seedOf(n), plan))).toBe(hash),
+  );
+});
+
+describe("delay-entry@1", () => {
+  const plan = planOf(delayEntry);
+  test.each(list(GOLDEN.delayEntry))("seed %i", (n, hash) =>
+    expect(goldenOf(delayEntry.build(seedOf(n), plan))).toBe(hash),
   );
 });
 

@@ -81,3 +81,10 @@ test("a reading of a trace is written where it is asked for", () => {
   expect(written(asked, {}, { lagChips: 88.75, magnitude: 0.5 }, null)).toEqual({ "reading.lag": "88.750" });
   expect(written(asked, {}, { lagChips: 88.75 }, "reading.threshold")).toEqual({ "reading.lag": "88.750" });
 });
+
+test("an echo is written into the open field only: which echo it is, the person says", () => {
+  const fields = ["lead", "end"].map((id) => ({ id, label: id, input: "number", unit: "ns", quantity: "echo" }));
+  const sections = [{ id: "trace", title: "Echoes", fields }] as unknown as Parameters<typeof takeReading>[0];
+  expect(written(sections, {}, { timeNs: 430.5 }, null)).toEqual({});
+  expect(written(sections, {}, { timeNs: 430.5 }, "trace.end")).toEqual({ "trace.end": "430.5" });
+});
