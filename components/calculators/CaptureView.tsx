@@ -154,7 +154,11 @@ function FoundGrid({ one: { map, overview, request }, busy }: { one: One; busy: 
   const { finding, dopplersHz, lagsChips, power } = map;
   const result = useMemo(() => {
     const settings = { ...request, dopplerStepHz: 500 / request.coherentMs };
-    return { prn: finding.prn, settings, grid: { dopplersHz, lagsChips, power, overview, threshold: finding.threshold } };
+    return {
+      prn: finding.prn,
+      settings,
+      grid: { dopplersHz, lagsChips, power, overview, threshold: finding.threshold },
+    };
   }, [finding, request, dopplersHz, lagsChips, power, overview]);
   const top = overview.peaks[0];
   const columns = lagsChips.length;

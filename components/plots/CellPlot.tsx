@@ -43,7 +43,20 @@ const TAKE = { keys: ["Enter"], word: "take" };
 
 /** Cells over two axes in the heat ramp, with a crosshair that reads one cell of the full grid. */
 export function CellPlot(props: CellPlotProps) {
-  const { across, up, overview, ramp, summary, reading, lines, columns, height = 290, margins, note, ...cursor } = props;
+  const {
+    across,
+    up,
+    overview,
+    ramp,
+    summary,
+    reading,
+    lines,
+    columns,
+    height = 290,
+    margins,
+    note,
+    ...cursor
+  } = props;
   const [box, width] = useWidth<HTMLDivElement>(640);
   const clipId = useId();
   const x = useMemo(() => axisOf(across), [across]);

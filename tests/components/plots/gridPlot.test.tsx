@@ -25,7 +25,16 @@ POWER[30 * COLUMNS + 100] = 5;
 const OVERVIEW = gridOverview(POWER, COLUMNS);
 
 function grid(given: { cell?: Cell; onMove?: (cell: Cell) => void; onTake?: (cell: Cell) => void } = {}) {
-  return render(<GridPlot dopplersHz={DOPPLERS} lagsChips={LAGS} power={POWER} overview={OVERVIEW} summary="Search grid." {...given} />);
+  return render(
+    <GridPlot
+      dopplersHz={DOPPLERS}
+      lagsChips={LAGS}
+      power={POWER}
+      overview={OVERVIEW}
+      summary="Search grid."
+      {...given}
+    />,
+  );
 }
 const reading = () => screen.getByRole("application").getAttribute("aria-label");
 
