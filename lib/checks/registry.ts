@@ -2,6 +2,7 @@ import { correlatorReading } from "./correlator-reading/correlatorReading";
 import { delayEntry } from "./delay-entry/delayEntry";
 import { falseLock } from "./false-lock/falseLock";
 import type { CheckKind } from "./kind";
+import { locate } from "./locate/locate";
 import { satellites } from "./satellites/satellites";
 import { searchPlan } from "./search-plan/searchPlan";
 import { sidePeak } from "./side-peak/sidePeak";
@@ -17,6 +18,7 @@ export const KINDS: readonly CheckKind[] = [
   searchPlan,
   skyView,
   standOff,
+  locate,
   delayEntry,
 ];
 
