@@ -74,6 +74,7 @@ test("every kind, found by name and version", () => {
     "B2 search-plan@1",
     "E3 sky-view@1",
     "F2 stand-off@1",
+    "F4 locate@1",
     "H1 delay-entry@1",
   ]);
   for (const kind of KINDS) {
@@ -98,6 +99,7 @@ test("critical is what alone makes the work worthless", () => {
     "B1 found",
     "B1 invented",
     "E3 choice",
+    "F4 action",
     "H1 entry",
   ]);
 });
