@@ -8,9 +8,4 @@ export type Reading = {
   magnitude?: number;
   binHz?: number;
   timeNs?: number;
-  eastM?: number;
-  northM?: number;
-  semiMajorM?: number;
-  semiMinorM?: number;
-  azimuthDeg?: number;
 };

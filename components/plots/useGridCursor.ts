@@ -1,5 +1,6 @@
 "use client";
-import { useRef, useState, type KeyboardEvent, type PointerEvent } from "react";
+import { useMemo, useRef, useState, type KeyboardEvent, type PointerEvent } from "react";
+import { gridPeaks } from "./peaks";
 
 export type Cell = { row: number; column: number };
 
@@ -10,16 +11,14 @@ export type GridCursor = {
   onTake?: (cell: Cell) => void;
 };
 
-type Grid = {
-  /** Cells in the order in which P visits them. */
-  peaks: readonly number[];
-  rows: number;
-  columns: number;
-  cellAt: (px: number, py: number) => Cell;
-};
+type Grid = { power: ArrayLike<number>; rows: number; columns: number; cellAt: (px: number, py: number) => Cell };
+
+/** Two peaks closer than this are one: a chip across, the width of the Doppler response up. */
+const APART = { rows: 3, columns: 5 };
 
 /** Cursor over a search grid: arrows one cell, Shift ten, P next peak, Home and End along the row, Enter takes. */
-export function useGridCursor(cursor: GridCursor, { peaks, rows, columns, cellAt }: Grid) {
+export function useGridCursor(cursor: GridCursor, { power, rows, columns, cellAt }: Grid) {
+  const peaks = useMemo(() => gridPeaks(power, columns, APART), [power, columns]);
   const [own, setOwn] = useState<Cell>({ row: Math.floor(rows / 2), column: Math.floor(columns / 2) });
   const cell = cursor.cell ?? own;
   const drag = useRef<{ px: number; py: number; from: Cell } | null>(null);
