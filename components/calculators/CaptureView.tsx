@@ -150,20 +150,20 @@ function PlaceReadings({ one: { map } }: { one: One }) {
   );
 }
 
-function FoundGrid({ one: { map, request }, busy }: { one: One; busy: boolean }) {
+function FoundGrid({ one: { map, overview, request }, busy }: { one: One; busy: boolean }) {
   const { finding, dopplersHz, lagsChips, power } = map;
   const result = useMemo(() => {
     const settings = { ...request, dopplerStepHz: 500 / request.coherentMs };
-    return { prn: finding.prn, settings, grid: { dopplersHz, lagsChips, power, threshold: finding.threshold } };
-  }, [finding, request, dopplersHz, lagsChips, power]);
-  const start = useMemo(() => highestCell(power, lagsChips.length), [power, lagsChips]);
+    return {
+      prn: finding.prn,
+      settings,
+      grid: { dopplersHz, lagsChips, power, overview, threshold: finding.threshold },
+    };
+  }, [finding, request, dopplersHz, lagsChips, power, overview]);
+  const top = overview.peaks[0];
+  const columns = lagsChips.length;
+  const start = useMemo(() => ({ row: Math.floor(top / columns), column: top % columns }), [top, columns]);
   return <GridReading result={result} busy={busy} start={start} />;
-}
-
-function highestCell(power: Float32Array, columns: number) {
-  let at = 0;
-  for (let n = 1; n < power.length; n++) if (power[n] > power[at]) at = n;
-  return { row: Math.floor(at / columns), column: at % columns };
 }
 
 function BusyLine({ busy, onCancel }: { busy: CaptureBusy; onCancel: () => void }) {

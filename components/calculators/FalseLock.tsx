@@ -95,7 +95,7 @@ function Places({ locks, same }: { locks: FalseLocks | null; same: boolean }) {
 }
 
 function PlaceMap({ locks }: { locks: FalseLocks }) {
-  const { map, peaks, inputs } = locks;
+  const { map, overview, peaks, inputs } = locks;
   const [moved, setMoved] = useState<{ of: FalseLocks; cell: Cell } | null>(null);
   const cell = moved?.of === locks ? moved.cell : cellOf(locks, peaks[0]);
   const power = map.power[cell.row * map.lagsChips.length + cell.column];
@@ -106,6 +106,7 @@ function PlaceMap({ locks }: { locks: FalseLocks }) {
         dopplersHz={map.dopplersHz}
         lagsChips={map.lagsChips}
         power={map.power}
+        overview={overview}
         cell={cell}
         onMove={(next) => setMoved({ of: locks, cell: next })}
         lines={() => [

@@ -1,5 +1,5 @@
 "use client";
-import { useMemo, useState } from "react";
+import { useState } from "react";
 import { BarPlot } from "@/components/plots/BarPlot";
 import { columnCut, rowCut } from "@/components/plots/gridCuts";
 import { GridPlot } from "@/components/plots/GridPlot";
@@ -22,7 +22,7 @@ const CUT_CELLS = 20;
 export function GridReading({ result, onTake, busy, start }: GridReadingProps) {
   const { prn, settings, grid } = result;
   const columns = grid.lagsChips.length;
-  const top = useMemo(() => highestCell(grid.power, columns), [grid, columns]);
+  const top = grid.power[grid.overview.peaks[0]!]!;
   const [moved, setMoved] = useState<{ of: SearchResult; cell: Cell } | null>(null);
   const cell =
     moved?.of === result ? moved.cell : (start ?? { row: grid.dopplersHz.length >> 1, column: columns >> 1 });
@@ -51,6 +51,7 @@ export function GridReading({ result, onTake, busy, start }: GridReadingProps) {
         dopplersHz={grid.dopplersHz}
         lagsChips={grid.lagsChips}
         power={grid.power}
+        overview={grid.overview}
         cell={cell}
         onMove={setCell}
         onTake={onTake ? take : undefined}
@@ -106,14 +107,6 @@ export function GridReading({ result, onTake, busy, start }: GridReadingProps) {
       )}
     </div>
   );
-}
-
-function highestCell(power: Float32Array, columns: number): number {
-  let top = 0;
-  for (let at = 0; at < power.length; at += columns) {
-    for (let n = at; n < at + columns; n++) if (power[n]! > top) top = power[n]!;
-  }
-  return top;
 }
 
 /** The row around a column, going round the end of the code. */

@@ -8,4 +8,9 @@ export type Reading = {
   magnitude?: number;
   binHz?: number;
   timeNs?: number;
+  eastM?: number;
+  northM?: number;
+  semiMajorM?: number;
+  semiMinorM?: number;
+  azimuthDeg?: number;
 };

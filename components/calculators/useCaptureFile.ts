@@ -1,5 +1,6 @@
 "use client";
 import { useCallback, useEffect, useRef, useState } from "react";
+import type { GridOverview } from "@/components/plots/gridOverview";
 import type { SearchRequest } from "@/lib/gnss/search/searchPlanOf";
 import type { SearchMap } from "@/lib/gnss/search/searchMap";
 import type { SkySearch } from "@/lib/gnss/search/searchSky";
@@ -10,7 +11,7 @@ export type CaptureBusy = { step: "read" | "search"; done?: number; total?: numb
 export type CaptureFileState = {
   busy: CaptureBusy | null;
   description: CaptureDescription | null;
-  one: { map: SearchMap; request: SearchRequest } | null;
+  one: { map: SearchMap; overview: GridOverview; request: SearchRequest } | null;
   all: { sky: SkySearch; request: SearchRequest } | null;
   refused: string | null;
 };

@@ -14,8 +14,8 @@ export function useFalseLock(inputs: FalseLockInputs): FalseLocks | null {
   const [answer, setAnswer] = useState<FalseLocks | null>(null);
   useEffect(() => {
     const own = new Worker(new URL("./workers/falseLock.worker.ts", import.meta.url), { type: "module" });
-    own.addEventListener("message", ({ data: { run, peaks, map } }: MessageEvent<FalseLockAnswer>) => {
-      if (run === newest.current.run) setAnswer({ peaks, map, inputs: newest.current.inputs });
+    own.addEventListener("message", ({ data: { run, ...found } }: MessageEvent<FalseLockAnswer>) => {
+      if (run === newest.current.run) setAnswer({ ...found, inputs: newest.current.inputs });
     });
     worker.current = own;
     return () => own.terminate();

@@ -118,4 +118,4 @@ function AnswerField({ spec, row, value, onChange }: AnswerFieldProps) {
 
 /** A level in dBm has a sign as a rule; of frequencies a Doppler has one, a step or a bin has none. */
 const isSigned = ({ id, unit }: FieldSpec) => SIGNED.has(id) || unit === "dBm";
-const SIGNED: ReadonlySet<string> = new Set(["doppler", "value", "mean"]);
+const SIGNED: ReadonlySet<string> = new Set(["doppler", "value", "mean", "east", "north"]);

@@ -7,6 +7,7 @@ import { SectionHead } from "@/components/ui/SectionHead";
 import type { PublicCase } from "@/lib/checks/kind";
 import { DelayEntryWork, type DelayEntryData } from "./DelayEntryWork";
 import { PeakTrace, type PeakTraceData } from "./PeakTrace";
+import { PatrolLog, type PatrolData } from "./PatrolLog";
 import { SkyAndReport, type SkyData } from "./SkyAndReport";
 import { SkySurvey, type SkySurveyData } from "./SkySurvey";
 import { StandOffSite, type StandOffData } from "./StandOffSite";
@@ -65,6 +66,8 @@ export function Workspace({ view, filesAddress, onTake }: WorkspaceProps) {
       return <SkySurvey data={view.data as SkySurveyData} />;
     case "delay-entry":
       return <DelayEntryWork data={view.data as DelayEntryData} onTake={onTake} />;
+    case "locate":
+      return <PatrolLog data={view.data as PatrolData} onTake={onTake} />;
     default:
       return <p className="text-dense text-ink-2">Work with the files of this case and type your answers.</p>;
   }

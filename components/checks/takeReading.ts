@@ -12,6 +12,11 @@ const PARTS: Readonly<Record<string, (reading: Reading) => string | null>> = {
   doppler: ({ dopplerHz }) => text(dopplerHz, 0),
   cn0: ({ cn0DbHz }) => text(cn0DbHz, 1),
   lag: ({ lagChips }) => text(lagChips, 3),
+  east: ({ eastM }) => text(eastM, 0),
+  north: ({ northM }) => text(northM, 0),
+  major: ({ semiMajorM }) => text(semiMajorM, 0),
+  minor: ({ semiMinorM }) => text(semiMinorM, 0),
+  azimuth: ({ azimuthDeg }) => text(azimuthDeg, 0),
 };
 /** These are taken only while they are open: which satellite stands behind another, and which echo is which, is for the person to say. */
 const WHEN_OPEN: typeof PARTS = {

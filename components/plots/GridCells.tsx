@@ -1,27 +1,29 @@
 "use client";
 import { useEffect, useMemo, useRef } from "react";
 import { useTheme } from "@/components/ui/useTheme";
-import { heatAt, heatPlace, rgbOf } from "./heat";
-import { mergeCells } from "./mergeCells";
+import { heatAt, heatPlace, rgbOf, type HeatRamp } from "./heat";
+import { mergeCells, type Cells } from "./mergeCells";
 
-/** Narrowest column on the screen; finer grids merge into it. */
-const CELL_PX = 4;
+/** Narrowest column and row on the screen; finer grids merge into them. */
+const CELL_PX = { across: 4, up: 1 };
 const STOPS = [0, 1, 2, 3, 4, 5];
+const COLOURS = 256;
 
 type GridCellsProps = {
-  power: Float32Array;
-  columns: number;
-  topDb: number;
+  cells: Cells;
+  ramp: HeatRamp;
   place: { left: number; top: number; width: number; height: number };
 };
 
 /** The cells of a grid as rectangles, without interpolation, in the heat ramp of the theme. */
-export function GridCells({ power, columns, topDb, place }: GridCellsProps) {
+export function GridCells({ cells, ramp, place }: GridCellsProps) {
   const canvas = useRef<HTMLCanvasElement>(null);
   const theme = useTheme();
-  const rows = Math.floor(power.length / columns);
-  const shown = Math.max(1, Math.min(columns, Math.floor(place.width / CELL_PX)));
-  const cells = useMemo(() => mergeCells(power, columns, shown), [power, columns, shown]);
+  const mostColumns = Math.max(1, Math.floor(place.width / CELL_PX.across));
+  const mostRows = Math.max(1, Math.floor(place.height / CELL_PX.up));
+  const shown = useMemo(() => mergeCells(cells, mostRows, mostColumns), [cells, mostRows, mostColumns]);
+  const { power, columns } = shown;
+  const rows = power.length / columns;
 
   useEffect(() => {
     const context = canvas.current?.getContext("2d");
@@ -32,16 +34,22 @@ export function GridCells({ power, columns, topDb, place }: GridCellsProps) {
       context.fillStyle = style.getPropertyValue(`--heat-${stop}`).trim();
       return rgbOf(String(context.fillStyle));
     });
-    const image = context.createImageData(shown, rows);
+    const colours = Array.from({ length: COLOURS }, (_, at) => heatAt(stops, at / (COLOURS - 1)));
+    const image = context.createImageData(columns, rows);
     for (let row = 0; row < rows; row++) {
-      for (let column = 0; column < shown; column++) {
-        const [red, green, blue] = heatAt(stops, heatPlace(cells[row * shown + column], topDb));
-        // Doppler goes up, rows of an image go down.
-        image.data.set([red, green, blue, 255], ((rows - 1 - row) * shown + column) * 4);
+      for (let column = 0; column < columns; column++) {
+        const level = Math.round(heatPlace(power[row * columns + column], ramp) * (COLOURS - 1));
+        const [red, green, blue] = colours[Math.min(COLOURS - 1, Math.max(0, level))];
+        // The first row stands at the foot, rows of an image go down.
+        const at = ((rows - 1 - row) * columns + column) * 4;
+        image.data[at] = red;
+        image.data[at + 1] = green;
+        image.data[at + 2] = blue;
+        image.data[at + 3] = 255;
       }
     }
     context.putImageData(image, 0, 0);
-  }, [cells, rows, shown, topDb, theme]);
+  }, [power, columns, rows, ramp, theme]);
 
-  return <canvas ref={canvas} width={shown} height={rows} className="plot-canvas" style={place} aria-hidden />;
+  return <canvas ref={canvas} width={columns} height={rows} className="plot-canvas" style={place} aria-hidden />;
 }

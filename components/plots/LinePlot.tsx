@@ -78,6 +78,8 @@ export function LinePlot({
       cursor={cursor && "line"}
       onCursorKey={cursor && line.onKey}
       onPointer={cursor && line.onPointer}
+      onNudge={line.nudge}
+      onNextPeak={line.nextPeak}
       table={{ columns: columns ?? tableColumns(x, y, curves), start: cursor ? line.index : 0 }}
       hints={cursor ? hints : []}
     >

@@ -2,6 +2,7 @@
 import { useState, type KeyboardEvent, type PointerEvent, type ReactNode, type RefObject } from "react";
 import { Key } from "@/components/ui/Key";
 import { KeyCap } from "@/components/ui/KeyCap";
+import { NudgeKeys } from "./NudgeKeys";
 import { PlotTable, type TableColumn } from "./PlotTable";
 import { useSpoken } from "./useSpoken";
 
@@ -16,6 +17,9 @@ type PlotStageProps = {
   /** Answers a key of the cursor; returns true when it was one. */
   onCursorKey?: (event: KeyboardEvent) => boolean;
   onPointer?: (event: PointerEvent<HTMLDivElement>) => void;
+  /** The cursor by keys for fingers, where the plot is touched or the page is narrow. */
+  onNudge?: (across: number, up: number) => void;
+  onNextPeak?: () => void;
   table: { columns: readonly TableColumn[]; start?: number };
   /** Words of the hint line by key, in the order shown. */
   hints?: readonly { keys: readonly string[]; word: string }[];
@@ -32,6 +36,8 @@ export function PlotStage({
   cursor,
   onCursorKey,
   onPointer,
+  onNudge,
+  onNextPeak,
   table,
   hints = [],
   legend,
@@ -84,6 +90,7 @@ export function PlotStage({
           </Key>
         </span>
       </div>
+      {cursor && onNudge && <NudgeKeys cursor={cursor} onNudge={onNudge} onNextPeak={onNextPeak} />}
       {open && <PlotTable caption={summary} {...table} />}
     </figure>
   );

@@ -57,6 +57,7 @@ export function WhiskerPlot({ y, bars, summary, limits, cursor, columns, height 
       cursor="line"
       onCursorKey={line.onKey}
       onPointer={line.onPointer}
+      onNudge={line.nudge}
       table={{ columns, start: line.index }}
       hints={HINTS}
     >

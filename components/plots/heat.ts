@@ -17,5 +17,11 @@ export function rgbOf(hex: string): Rgb {
   return [(value >> 16) & 255, (value >> 8) & 255, value & 255];
 }
 
-/** Place of a power on the ramp, in even steps of amplitude: noise (1) at the end of the sheet, `topDb` above it at the other. */
-export const heatPlace = (power: number, topDb: number) => (Math.sqrt(power) - 1) / (10 ** (topDb / 20) - 1);
+/** From a power of 1 at the end of the sheet, which `from` names, to `topDb` above it, in even steps of amplitude or of level. */
+export type HeatRamp = { steps: "amplitude" | "level"; topDb: number; from: string };
+
+/** Place of a power on the ramp: 0 and 1 at its ends, beyond them outside. */
+export const heatPlace = (power: number, { steps, topDb }: HeatRamp): number =>
+  steps === "amplitude"
+    ? (Math.sqrt(power) - 1) / (10 ** (topDb / 20) - 1)
+    : (10 * Math.log10(Math.max(power, 1e-30))) / topDb;

@@ -1,6 +1,5 @@
 "use client";
-import { useMemo, useRef, useState, type KeyboardEvent, type PointerEvent } from "react";
-import { gridPeaks } from "./peaks";
+import { useRef, useState, type KeyboardEvent, type PointerEvent } from "react";
 
 export type Cell = { row: number; column: number };
 
@@ -11,14 +10,16 @@ export type GridCursor = {
   onTake?: (cell: Cell) => void;
 };
 
-type Grid = { power: ArrayLike<number>; rows: number; columns: number; cellAt: (px: number, py: number) => Cell };
-
-/** Two peaks closer than this are one: a chip across, the width of the Doppler response up. */
-const APART = { rows: 3, columns: 5 };
+type Grid = {
+  /** Cells in the order in which P visits them. */
+  peaks: readonly number[];
+  rows: number;
+  columns: number;
+  cellAt: (px: number, py: number) => Cell;
+};
 
 /** Cursor over a search grid: arrows one cell, Shift ten, P next peak, Home and End along the row, Enter takes. */
-export function useGridCursor(cursor: GridCursor, { power, rows, columns, cellAt }: Grid) {
-  const peaks = useMemo(() => gridPeaks(power, columns, APART), [power, columns]);
+export function useGridCursor(cursor: GridCursor, { peaks, rows, columns, cellAt }: Grid) {
   const [own, setOwn] = useState<Cell>({ row: Math.floor(rows / 2), column: Math.floor(columns / 2) });
   const cell = cursor.cell ?? own;
   const drag = useRef<{ px: number; py: number; from: Cell } | null>(null);

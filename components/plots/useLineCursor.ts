@@ -26,8 +26,16 @@ export function useLineCursor(cursor: LineCursor | undefined, { x, y, toPx }: Dr
   };
   const nearest = (px: number) => nearestIndex(x, count, px, toPx);
 
+  const nextPeak = () => {
+    const peaks = rowPeaks(y).slice(0, MOST_PEAKS);
+    move(peaks[(peaks.indexOf(index) + 1) % peaks.length] ?? index);
+  };
   const onKey = (event: KeyboardEvent): boolean => {
-    const target = nextIndex(event, index, y, count);
+    if (event.key === "p" || event.key === "P") {
+      nextPeak();
+      return true;
+    }
+    const target = nextIndex(event, index, count);
     if (target !== null) move(target);
     else if (event.key === "Enter" && cursor?.onTake) cursor.onTake(index);
     else return false;
@@ -48,11 +56,13 @@ export function useLineCursor(cursor: LineCursor | undefined, { x, y, toPx }: Dr
       drag.current = null;
     }
   };
-  return { index, move, onKey, onPointer };
+  return { index, nudge: (across: number) => move(index + across), nextPeak, onKey, onPointer };
 }
 
-/** Arrows one point, Shift ten, Home and End, P the next peak by strength. Null for any other key. */
-function nextIndex(event: KeyboardEvent, index: number, y: ArrayLike<number>, count: number): number | null {
+const MOST_PEAKS = 12; // that P visits by their strength before it begins anew
+
+/** Arrows one point, Shift ten, Home and End. Null for any other key. */
+function nextIndex(event: KeyboardEvent, index: number, count: number): number | null {
   const step = event.shiftKey ? 10 : 1;
   switch (event.key) {
     case "ArrowRight":
@@ -63,11 +73,6 @@ function nextIndex(event: KeyboardEvent, index: number, y: ArrayLike<number>, co
       return 0;
     case "End":
       return count - 1;
-    case "p":
-    case "P": {
-      const peaks = rowPeaks(y).slice(0, 12);
-      return peaks[(peaks.indexOf(index) + 1) % peaks.length] ?? index;
-    }
     default:
       return null;
   }

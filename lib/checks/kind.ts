@@ -143,6 +143,8 @@ export interface Trial<P = unknown, T = unknown> {
   build(seedHex: string, plan: CheckPlan<P>): BuiltCase<T>;
   /** What `mark` finds for that case, without what only its workings need. */
   judge(built: BuiltCase<T>, plan: CheckPlan<P>, answers: Answers): Marking;
+  /** What the right method finds, nothing read wrong; only where `solve` needs the samples that this case leaves out. */
+  solve?(built: BuiltCase<T>, plan: CheckPlan<P>): Answers;
   /** The right method as competent people carry it out: every reading off by what eye, cursor and noise make of it. */
   read(built: BuiltCase<T>, plan: CheckPlan<P>, random: Random): Answers;
   /** Somebody who knows the form and the usual ranges, and looks at nothing else. */

@@ -2,7 +2,7 @@ import { correlatorReading } from "./correlator-reading/correlatorReading";
 import { delayEntry } from "./delay-entry/delayEntry";
 import { falseLock } from "./false-lock/falseLock";
 import type { CheckKind } from "./kind";
-import { lostDecibels } from "./lost-decibels/lostDecibels";
+import { locate } from "./locate/locate";
 import { satellites } from "./satellites/satellites";
 import { searchPlan } from "./search-plan/searchPlan";
 import { sidePeak } from "./side-peak/sidePeak";
@@ -16,9 +16,9 @@ export const KINDS: readonly CheckKind[] = [
   sidePeak,
   satellites,
   searchPlan,
-  lostDecibels,
   skyView,
   standOff,
+  locate,
   delayEntry,
 ];
 

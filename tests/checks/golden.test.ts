@@ -3,7 +3,7 @@ import { correlatorReading } from "@/lib/checks/correlator-reading/correlatorRea
 import { delayEntry } from "@/lib/checks/delay-entry/delayEntry";
 import { falseLock } from "@/lib/checks/false-lock/falseLock";
 import { publicCase as falseLockCase } from "@/lib/checks/false-lock/publicCase";
-import { lostDecibels } from "@/lib/checks/lost-decibels/lostDecibels";
+import { locate } from "@/lib/checks/locate/locate";
 import { drawScene } from "@/lib/checks/satellites/drawScene";
 import { publicCase as satellitesCase } from "@/lib/checks/satellites/publicCase";
 import { satellites } from "@/lib/checks/satellites/satellites";
@@ -85,9 +85,7 @@ describe("stand-off@1", () => {
   );
 });
 
-describe("lost-decibels@1", () => {
-  const plan = planOf(lostDecibels);
-  test.each(list(GOLDEN.lostDecibels))("seed %i", (n, hash) =>
-    expect(goldenOf(lostDecibels.build(seedOf(n), plan))).toBe(hash),
-  );
+describe("locate@1", () => {
+  const plan = planOf(locate);
+  test.each(list(GOLDEN.locate))("seed %i", (n, hash) => expect(goldenOf(locate.build(seedOf(n), plan))).toBe(hash));
 });

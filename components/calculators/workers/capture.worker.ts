@@ -1,3 +1,4 @@
+import { gridOverview, type GridOverview } from "@/components/plots/gridOverview";
 import { searchMap, type SearchMap } from "@/lib/gnss/search/searchMap";
 import type { SampledCapture } from "@/lib/gnss/search/sampledCapture";
 import type { SearchRequest } from "@/lib/gnss/search/searchPlanOf";
@@ -14,7 +15,7 @@ export type CaptureOrder = { job: number; file: number; source: CaptureSource; t
 export type CaptureAnswer = { job: number } & (
   | { kind: "progress"; step: "read" | "search"; done: number; total: number }
   | { kind: "opened"; description: CaptureDescription }
-  | { kind: "one"; map: SearchMap; request: SearchRequest }
+  | { kind: "one"; map: SearchMap; overview: GridOverview; request: SearchRequest }
   | { kind: "all"; sky: SkySearch; request: SearchRequest }
   | { kind: "done" }
   | { kind: "refused"; message: string }
@@ -42,7 +43,8 @@ addEventListener("message", async ({ data: { job, file, source, task } }: Messag
     }
     if (task.kind === "one") {
       const map = searchMap(open.capture, SIGNAL, task.prn, task.request, progress("search"));
-      answer({ job, kind: "one", map, request: task.request }, [map.power.buffer]);
+      const overview = gridOverview(map.power, map.lagsChips.length);
+      answer({ job, kind: "one", map, overview, request: task.request }, [map.power.buffer]);
     } else if (task.kind === "all") {
       const sky = searchSky(open.capture, SIGNAL, PRNS, [], task.request, progress("search"));
       answer({ job, kind: "all", sky, request: task.request });

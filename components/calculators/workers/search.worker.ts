@@ -1,3 +1,4 @@
+import { gridOverview, type GridOverview } from "@/components/plots/gridOverview";
 import { searchGrid, type SearchSettings } from "@/lib/gnss/acquire";
 
 export type SearchRequest =
@@ -7,6 +8,7 @@ export type SearchedGrid = {
   dopplersHz: Float64Array;
   lagsChips: Float64Array;
   power: Float32Array;
+  overview: GridOverview;
   threshold: number;
 };
 export type SearchAnswer =
@@ -25,7 +27,8 @@ addEventListener("message", ({ data }: MessageEvent<SearchRequest>) => {
   try {
     if (!capture) throw new RangeError("search: there is no capture yet");
     const grid = searchGrid(capture, prn, settings);
-    answer({ kind: "grid", run, prn, settings, grid }, [grid.power.buffer]);
+    const overview = gridOverview(grid.power, grid.lagsChips.length);
+    answer({ kind: "grid", run, prn, settings, grid: { ...grid, overview } }, [grid.power.buffer]);
   } catch (error) {
     if (!(error instanceof RangeError)) throw error;
     answer({ kind: "refused", run, message: error.message });

@@ -7,7 +7,7 @@ import { between, drawSatellite } from "../drawSatellite";
 import { drawStart } from "../drawStart";
 import { ALL_PRNS } from "../searchCapture";
 import { drawBehindWall, drawInOpenSky, drawWall, type SkyPlace, type Wall } from "./sky";
-import { expectedDetection } from "./expectedDetection";
+import { expectedDetection } from "../search-trial/expectedDetection";
 import { offWholeKilohertz } from "./offWholeKilohertz";
 import type { FalseLockParameters } from "./parameters";
 import type { Verdict } from "./quantities";
@@ -38,7 +38,7 @@ const MOTION_HZ = 4500;
 const CLOCK_PPM = 0.5; // a receiver that tracks knows its own clock; the search window is 6 kHz
 const WORST_PEAK_DB = { from: -22, to: -21 } as const;
 const CLEAR_OF_PARENT_HZ = 2 * RESOLUTION_HZ; // data bits spread a false peak over a bin to either side
-const LEAST_DETECTION = 0.99;
+export const LEAST_DETECTION = 0.99;
 const VICTIMS_TRIED = 6;
 
 /**

@@ -5,6 +5,7 @@ import { mark } from "./mark";
 import { falseLockParameters, type FalseLockParameters } from "./parameters";
 import { falseLockCautions, falseLockQuantities } from "./quantities";
 import { solve } from "./solve";
+import { falseLockTrial } from "./trial";
 import { wrongMethods } from "./wrongMethods";
 
 /** A2: a false lock on a blocked satellite. */
@@ -21,4 +22,5 @@ export const falseLock: CheckKind<FalseLockParameters, FalseLockTruth> = {
   mark,
   solve,
   wrongMethods,
+  trial: falseLockTrial,
 };

@@ -6,9 +6,9 @@ import { REFERENCE_SEARCH } from "./referenceSearch";
 import { LARGEST_CELL_LOSS_DB, STRONG_FROM_DBHZ, unborrowedPeak } from "./unborrowedPeak";
 
 // Of the tolerances of 50 Hz and 1.5 dB, so much may be used up by the noise of this capture.
-const LARGEST_OWN_ERROR_HZ = 30;
-const LARGEST_OWN_ERROR_DB = 1;
-const CLEAR_OF_WEAKEST_DB = 1;
+export const LARGEST_OWN_ERROR_HZ = 30;
+export const LARGEST_OWN_ERROR_DB = 1;
+export const CLEAR_OF_WEAKEST_DB = 1;
 
 /** Whether the false lock and the weak satellite, there or not, show in the capture as a right reading needs them. */
 export function isReadable(truth: FalseLockTruth, capture: Capture): boolean {

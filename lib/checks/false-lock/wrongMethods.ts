@@ -1,8 +1,7 @@
-import type { Answers, WrongMethod } from "../kind";
-import { acceptedFalsePeaks, type FalseLockTruth, type ListedSatellite } from "./drawScene";
+import type { WrongMethod } from "../kind";
+import { answersFor } from "./answersFor";
+import type { FalseLockTruth } from "./drawScene";
 import type { FalseLockParameters } from "./parameters";
-import type { Verdict } from "./quantities";
-import { verdictAnswers } from "./solve";
 
 type Wrong = WrongMethod<FalseLockParameters, FalseLockTruth>;
 
@@ -42,16 +41,3 @@ export const wrongMethods: Readonly<Record<string, Wrong>> = {
     }),
   },
 };
-
-/** All of it right but for the verdicts. */
-function answersFor(truth: FalseLockTruth, verdictOf: (satellite: ListedSatellite) => Verdict): Answers {
-  const [peak] = acceptedFalsePeaks(truth);
-  return {
-    ...verdictAnswers(truth.listed.map((satellite) => ({ prn: satellite.prn, verdict: verdictOf(satellite) }))),
-    "falseLock.parent": String(truth.parentPrn),
-    "falseLock.doppler": peak.dopplerHz.toFixed(0),
-    "falseLock.cn0": peak.apparentCn0DbHz.toFixed(1),
-    "falseLock.test": "doppler-modulo",
-    "falseLock.remedy": "compare",
-  };
-}

@@ -5,6 +5,7 @@ import { mark } from "./mark";
 import { satellitesParameters, type SatellitesParameters } from "./parameters";
 import { satellitesCautions, satellitesQuantities } from "./quantities";
 import { solve } from "./solve";
+import { satellitesTrial } from "./trial";
 import { wrongMethods } from "./wrongMethods";
 
 /** B1: which satellites are in the capture. */
@@ -28,4 +29,5 @@ export const satellites: CheckKind<SatellitesParameters, SatellitesTruth> = {
   mark,
   solve,
   wrongMethods,
+  trial: satellitesTrial,
 };

@@ -6,7 +6,8 @@ import { MOST_LINES } from "./publicCase";
 
 export type Listed = { prn: number; codePhaseChips: number; dopplerHz: number; cn0DbHz: number };
 
-const READING_ERROR_DB = 3; // so that no satellite that must be found is left out
+/** So much under the level asked for is listed still, so that no satellite that must be found is left out. */
+export const LISTED_BELOW_DB = 3;
 
 /**
  * The right method, from the public case and its files: search the whole window, list what passes the threshold and can be
@@ -14,7 +15,7 @@ const READING_ERROR_DB = 3; // so that no satellite that must be found is left o
  */
 export function solve({ publicCase, files }: { publicCase: PublicCase; files: readonly CaseFile[] }): Answers {
   const dopplerHalfWidthHz = publicCase.data.windowHz as number;
-  const weakest = (publicCase.data.foundFromDbHz as number) - READING_ERROR_DB;
+  const weakest = (publicCase.data.foundFromDbHz as number) - LISTED_BELOW_DB;
   const searched = searchCapture(readCapture(files), { ...REFERENCE_SEARCH, dopplerHalfWidthHz });
   return answersFor(searched.filter(({ found, cn0DbHz }) => found && cn0DbHz >= weakest));
 }

@@ -1,6 +1,6 @@
 import { describe, expect, test } from "vitest";
 import { acceptedFalsePeaks, type FalseLockTruth } from "@/lib/checks/false-lock/drawScene";
-import { expectedDetection } from "@/lib/checks/false-lock/expectedDetection";
+import { expectedDetection } from "@/lib/checks/search-trial/expectedDetection";
 import { falseLock as kind } from "@/lib/checks/false-lock/falseLock";
 import { publicCase } from "@/lib/checks/false-lock/publicCase";
 import { REFERENCE_SEARCH } from "@/lib/checks/false-lock/referenceSearch";

@@ -4,6 +4,7 @@ import userEvent from "@testing-library/user-event";
 import { afterEach, beforeEach, expect, test, vi } from "vitest";
 import { pairOf } from "@/components/calculators/CaptureChooser";
 import { CaptureView } from "@/components/calculators/CaptureView";
+import { gridOverview } from "@/components/plots/gridOverview";
 import type { CaptureAnswer, CaptureOrder } from "@/components/calculators/workers/capture.worker";
 import { startValues } from "@/lib/calculators/calculator";
 import { CAPTURE_VIEW } from "@/lib/calculators/captureView";
@@ -42,7 +43,8 @@ class AnsweringWorker {
     if (task.kind === "all") return answer({ job, kind: "progress", step: "search", done: 3, total: 57 });
     if (task.kind === "one") {
       const map = searchMap(capture, searchSignalOf(gpsL1Ca), task.prn, task.request);
-      answer({ job, kind: "one", map, request: task.request });
+      const overview = gridOverview(map.power, map.lagsChips.length);
+      answer({ job, kind: "one", map, overview, request: task.request });
     }
     answer({ job, kind: "done" });
   }

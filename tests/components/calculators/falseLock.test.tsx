@@ -3,6 +3,7 @@ import { cleanup, render, screen } from "@testing-library/react";
 import userEvent from "@testing-library/user-event";
 import { afterEach, beforeEach, expect, test, vi } from "vitest";
 import { FalseLock } from "@/components/calculators/FalseLock";
+import { gridOverview } from "@/components/plots/gridOverview";
 import { startValues, type ValuesOf } from "@/lib/calculators/calculator";
 import { FALSE_LOCK } from "@/lib/calculators/falseLock";
 import { falsePeaks } from "@/lib/gnss/falseLock";
@@ -16,7 +17,9 @@ class AnsweringWorker {
     this.listen = listen;
   }
   postMessage({ run, question }: FalseLockRequest) {
-    this.listen({ data: { run, peaks: falsePeaks(question), map: falsePeakMap(question) } });
+    const map = falsePeakMap(question);
+    const overview = gridOverview(map.power, map.lagsChips.length);
+    this.listen({ data: { run, peaks: falsePeaks(question), map, overview } });
   }
   terminate() {}
 }

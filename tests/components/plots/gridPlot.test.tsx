@@ -2,6 +2,7 @@
 import { cleanup, fireEvent, render, screen } from "@testing-library/react";
 import userEvent from "@testing-library/user-event";
 import { afterEach, beforeEach, expect, test, vi } from "vitest";
+import { gridOverview } from "@/components/plots/gridOverview";
 import { GridPlot } from "@/components/plots/GridPlot";
 import type { Cell } from "@/components/plots/useGridCursor";
 
@@ -21,9 +22,19 @@ const LAGS = Float64Array.from({ length: COLUMNS }, (_, column) => column / 4);
 const POWER = new Float32Array(ROWS * COLUMNS).fill(1);
 POWER[11 * COLUMNS + 355] = 10.43;
 POWER[30 * COLUMNS + 100] = 5;
+const OVERVIEW = gridOverview(POWER, COLUMNS);
 
 function grid(given: { cell?: Cell; onMove?: (cell: Cell) => void; onTake?: (cell: Cell) => void } = {}) {
-  return render(<GridPlot dopplersHz={DOPPLERS} lagsChips={LAGS} power={POWER} summary="Search grid." {...given} />);
+  return render(
+    <GridPlot
+      dopplersHz={DOPPLERS}
+      lagsChips={LAGS}
+      power={POWER}
+      overview={OVERVIEW}
+      summary="Search grid."
+      {...given}
+    />,
+  );
 }
 const reading = () => screen.getByRole("application").getAttribute("aria-label");
 

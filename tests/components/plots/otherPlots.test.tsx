@@ -35,11 +35,23 @@ test("bars are 6 px wide, and narrower only where they would touch", () => {
     const { container } = render(
       <BarPlot x={x} y={{ name: "power", from: 0, to: 2 }} bars={bars(count)} summary="Flat." />,
     );
-    return Number(container.querySelector("g[clip-path] rect")!.getAttribute("width"));
+    return Number(container.querySelector("[data-bars]")!.getAttribute("stroke-width"));
   };
   expect(width(20)).toBe(6);
   // 420 px until measured, 372 between the axes: a bar every 3.72 px, one px free.
   expectNear(width(100), 2.72, 1e-9, "width of a bar, px");
+});
+
+test("of bars on one px the highest is drawn", () => {
+  const x = Array.from({ length: 4000 }, (_, at) => at);
+  const y = x.map((at) => (at === 2001 ? 2 : 1));
+  const { container } = render(
+    <BarPlot x={{ name: "bin", from: 0, to: 4000 }} y={{ name: "power", from: 0, to: 2 }} bars={{ x, y }} summary="" />,
+  );
+  const path = container.querySelector("[data-bars]")!.getAttribute("d")!;
+  const tops = [...path.matchAll(/V([\d.]+)/g)].map(([, top]) => Number(top));
+  expect(tops.length).toBeLessThan(400);
+  expect(tops.filter((top) => top === 24)).toHaveLength(1); // the upper edge of the plot
 });
 
 test("the cursor of a bar plot reads a bin", async () => {

@@ -1,6 +1,7 @@
 import { expect, test } from "vitest";
 import { columnCut, rowCut } from "@/components/plots/gridCuts";
 import { heatAt, heatPlace, rgbOf } from "@/components/plots/heat";
+import { gridOverview } from "@/components/plots/gridOverview";
 import { mergeCells } from "@/components/plots/mergeCells";
 import { gridPeaks, rowPeaks } from "@/components/plots/peaks";
 import { expectNear } from "../../support/expectNear";
@@ -38,23 +39,34 @@ test("what is close to a stronger peak is no peak of its own, across the ends of
 });
 
 test("merged cells keep the strongest", () => {
-  const merged = mergeCells(
-    grid([
-      [0, 7, 3],
-      [4, 39, 9],
-    ]),
-    COLUMNS,
-    10,
-  );
-  expect(merged).toHaveLength(50);
-  expect(merged[1]).toBe(3);
-  expect(merged[49]).toBe(9);
-  expect(Math.max(...merged.slice(2, 48))).toBe(1);
+  const power = grid([
+    [0, 7, 3],
+    [4, 39, 9],
+  ]);
+  const merged = mergeCells({ power, columns: COLUMNS }, 2, 10);
+  expect(merged.columns).toBe(10);
+  expect(merged.power).toHaveLength(20);
+  expect(merged.power[1]).toBe(3);
+  expect(merged.power[19]).toBe(9);
+  expect(Math.max(...merged.power.slice(2, 18))).toBe(1);
 });
 
-test("as many columns shown as there are: nothing is merged", () => {
-  const power = grid([[2, 13, 4]]);
-  expect(mergeCells(power, COLUMNS, COLUMNS)).toEqual(power);
+test("as many rows and columns shown as there are: nothing is merged", () => {
+  const cells = { power: grid([[2, 13, 4]]), columns: COLUMNS };
+  expect(mergeCells(cells, 5, COLUMNS)).toEqual(cells);
+  expect(mergeCells(cells, 600, 900)).toEqual(cells);
+});
+
+test("an overview knows the highest cell and holds it, however fine the grid", () => {
+  const [rows, columns] = [1000, 2048];
+  const power = new Float32Array(rows * columns).fill(1);
+  power[777 * columns + 1501] = 8;
+  power[3 * columns + 2] = 5;
+  const { peaks, cells } = gridOverview(power, columns);
+  expect(peaks.slice(0, 2)).toEqual([777 * columns + 1501, 3 * columns + 2]);
+  expect(cells.columns).toBe(512);
+  expect(cells.power).toHaveLength(256 * 512);
+  expect(cells.power[Math.floor((777 * 256) / 1000) * 512 + Math.floor(1501 / 4)]).toBe(8);
 });
 
 test("cuts go along one row and one column", () => {
@@ -68,8 +80,14 @@ test("cuts go along one row and one column", () => {
 });
 
 test("noise is at one end of the ramp, the given level above it at the other", () => {
-  expectNear(heatPlace(1, 10), 0, 1e-12, "place of noise");
-  expectNear(heatPlace(10, 10), 1, 1e-12, "place of +10 dB");
+  for (const steps of ["amplitude", "level"] as const) {
+    const ramp = { steps, topDb: 10, from: "noise" };
+    expectNear(heatPlace(1, ramp), 0, 1e-12, "place of noise");
+    expectNear(heatPlace(10, ramp), 1, 1e-12, "place of +10 dB");
+  }
+  // Half way: half the decibels, or half the amplitude, (1 + sqrt 10)/2 by hand.
+  expectNear(heatPlace(10 ** 0.5, { steps: "level", topDb: 10, from: "noise" }), 0.5, 1e-12, "place of +5 dB");
+  expectNear(heatPlace(4.3311388, { steps: "amplitude", topDb: 10, from: "noise" }), 0.5, 1e-7, "half the amplitude");
 });
 
 test("the ramp runs straight between its stops and stays inside them", () => {

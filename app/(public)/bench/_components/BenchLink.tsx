@@ -10,9 +10,11 @@ export function BenchLink({ id, ...rest }: BenchLinkProps) {
     if (event.metaKey || event.ctrlKey || event.shiftKey || event.altKey) return;
     event.preventDefault();
     goTo(id);
-    window.scrollTo(0, 0);
     // The heading of what has opened, once it stands.
-    requestAnimationFrame(() => document.getElementById(id === null ? "bench" : "open-calculator")?.focus());
+    requestAnimationFrame(() => {
+      document.getElementById(id === null ? "bench" : "open-calculator")?.focus();
+      window.scrollTo(0, 0);
+    });
   };
   return <a {...rest} href={benchHref(id)} onClick={follow} />;
 }
