@@ -46,7 +46,7 @@ export class Tally {
     const begun = Date.now();
     const results = path.join(this.#logs, `${project}.json`);
     const reporters = ["--reporter=default", "--reporter=json", `--outputFile.json=${results}`];
-    const args = [bin("vitest", "vitest.mjs"), "run", "--project", project, ...reporters];
+    const args = [bin("vitest", "vitest.mjs"), "run", "--project", `${project}*`, ...reporters];
     const log = path.join(this.#logs, `${project}.log`);
     const { code, output } = await run("node", args, { cwd: this.#root, env: { ...env, NO_COLOR: "1" }, log });
     const counts = readCounts(results);

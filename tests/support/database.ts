@@ -1,4 +1,4 @@
-import { afterAll, beforeEach, expect } from "vitest";
+import { beforeEach, expect } from "vitest";
 import "./settings";
 
 // One process has one role. Tests of the worker's tasks are the worker, all others are the web process.
@@ -9,11 +9,7 @@ for (const name of ["OWNER_DATABASE_URL", needed]) {
 }
 delete process.env[isWorker ? "DATABASE_URL" : "WORKER_DATABASE_URL"];
 
-const { owner } = await import("./owner");
+// The connections stay open from file to file; they end with the process.
 const { emptyTables } = await import("./emptyTables");
-const { db } = await import("@/lib/db");
 
 beforeEach(emptyTables);
-afterAll(async () => {
-  await Promise.all([db.close(), owner.end()]);
-});
