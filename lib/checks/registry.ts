@@ -3,6 +3,7 @@ import { delayEntry } from "./delay-entry/delayEntry";
 import { falseLock } from "./false-lock/falseLock";
 import type { CheckKind } from "./kind";
 import { locate } from "./locate/locate";
+import { lostDecibels } from "./lost-decibels/lostDecibels";
 import { satellites } from "./satellites/satellites";
 import { searchPlan } from "./search-plan/searchPlan";
 import { sidePeak } from "./side-peak/sidePeak";
@@ -16,6 +17,7 @@ export const KINDS: readonly CheckKind[] = [
   sidePeak,
   satellites,
   searchPlan,
+  lostDecibels,
   skyView,
   standOff,
   locate,

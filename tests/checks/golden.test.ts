@@ -4,6 +4,7 @@ import { delayEntry } from "@/lib/checks/delay-entry/delayEntry";
 import { falseLock } from "@/lib/checks/false-lock/falseLock";
 import { publicCase as falseLockCase } from "@/lib/checks/false-lock/publicCase";
 import { locate } from "@/lib/checks/locate/locate";
+import { lostDecibels } from "@/lib/checks/lost-decibels/lostDecibels";
 import { drawScene } from "@/lib/checks/satellites/drawScene";
 import { publicCase as satellitesCase } from "@/lib/checks/satellites/publicCase";
 import { satellites } from "@/lib/checks/satellites/satellites";
@@ -88,4 +89,11 @@ describe("stand-off@1", () => {
 describe("locate@1", () => {
   const plan = planOf(locate);
   test.each(list(GOLDEN.locate))("seed %i", (n, hash) => expect(goldenOf(locate.build(seedOf(n), plan))).toBe(hash));
+});
+
+describe("lost-decibels@1", () => {
+  const plan = planOf(lostDecibels);
+  test.each(list(GOLDEN.lostDecibels))("seed %i", (n, hash) =>
+    expect(goldenOf(lostDecibels.build(seedOf(n), plan))).toBe(hash),
+  );
 });

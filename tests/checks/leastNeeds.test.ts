@@ -58,12 +58,32 @@ const MARKED: Readonly<Record<string, (one: Tried) => Marking>> = {
   },
 };
 
+const made = new Map<string, BuiltCase>();
+
+/** A case as the kind's trial makes it, once for all methods. */
+function caseOf(kind: CheckKind, seed: string): BuiltCase {
+  const name = `${kind.id} ${seed}`;
+  const known = made.get(name) ?? (kind.trial ?? kind).build(seed, planOf(kind));
+  made.set(name, known);
+  return known;
+}
+
 /** Any other kind: its case is quickly made. */
 function markedOf(kind: CheckKind, tried: Tried): Marking {
   if (MARKED[kind.id]) return MARKED[kind.id]!(tried);
   const { needs, method, seed } = tried;
   const plan = { ...planOf(kind), needs };
-  return kind.mark(seed, plan, kind.wrongMethods[method]!.solve(kind.build(seed, plan), plan));
+  const built = caseOf(kind, seed);
+  const answers = kind.wrongMethods[method]!.solve(built, plan);
+  return kind.trial ? kind.trial.judge(built, plan, answers) : kind.mark(seed, plan, answers);
+}
+
+/** A method that goes wrong in some cases only, such as those with one cause, says in the others what the right one says. */
+function saysTheRight(kind: CheckKind, method: string, seed: string): boolean {
+  if (MARKED[kind.id] || kind.wrongMethods[method]!.misses.length > 0) return false;
+  const built = caseOf(kind, seed);
+  const plan = planOf(kind);
+  return JSON.stringify(kind.wrongMethods[method]!.solve(built, plan)) === JSON.stringify(kind.solve(built, plan));
 }
 
 const methods = KINDS.flatMap((kind) => Object.keys(kind.wrongMethods).map((method) => [kind, method] as const));
@@ -82,6 +102,7 @@ describe.each(methods.map(([kind, method]) => [`${kind.id} ${method}`, kind, met
     test("does not meet a check that needs as many as it must", { timeout: SLOW }, () => {
       const least = leastNeeds(kind, quantitiesOf(kind));
       for (const seed of SEEDS) {
+        if (saysTheRight(kind, method, seed)) continue;
         expect(markedOf(kind, { needs: least?.needs ?? 1, method, seed }).met, seed).toBe(false);
       }
     });
