@@ -27,22 +27,33 @@ function direct(x: ArrayLike<number>, y: ArrayLike<number>, count: number, g: Pi
 }
 
 function thinned(x: ArrayLike<number>, y: ArrayLike<number>, count: number, g: Pick<PlotGeometry, "x" | "y">): string {
-  const kept: number[] = [];
+  const path: string[] = [];
+  let pen = "M";
   let at = 0;
   while (at < count) {
     const column = Math.floor(g.x(x[at]));
-    let low = at;
-    let high = at;
+    const drawn: number[] = [];
     let next = at;
-    while (next < count && Math.floor(g.x(x[next])) === column) {
-      if (y[next] < y[low]) low = next;
-      if (y[next] > y[high]) high = next;
-      next++;
+    for (; next < count && Math.floor(g.x(x[next])) === column; next++) if (Number.isFinite(y[next])) drawn.push(next);
+    for (const index of outermost(drawn, y)) {
+      path.push(`${pen}${place(g.x(x[index]))} ${place(g.y(y[index]))}`);
+      pen = "L";
     }
-    kept.push(...[...new Set([at, low, high, next - 1])].sort((a, b) => a - b));
+    if (drawn.length < next - at) pen = "M";
     at = next;
   }
-  return kept.map((index, order) => `${order ? "L" : "M"}${place(g.x(x[index]))} ${place(g.y(y[index]))}`).join("");
+  return path.join("");
+}
+
+/** First, lowest, highest and last of the points of one column, in their order. */
+function outermost(drawn: readonly number[], y: ArrayLike<number>): number[] {
+  if (drawn.length === 0) return [];
+  let [low, high] = [drawn[0], drawn[0]];
+  for (const at of drawn) {
+    if (y[at] < y[low]) low = at;
+    if (y[at] > y[high]) high = at;
+  }
+  return [...new Set([drawn[0], low, high, drawn[drawn.length - 1]])].sort((a, b) => a - b);
 }
 
 /** Hundredths of a px are below what a screen shows. */

@@ -22,3 +22,15 @@ test("of many points no peak one sample wide is lost", () => {
   expect(path).toContain(" 4");
   expect(path.split("L").length).toBeLessThan(4 * 101);
 });
+
+// A day of readings with a gap was drawn as a path with NaN in it, which shows nothing at all.
+test("of many points as well a value that is not a number breaks the line", () => {
+  const count = 10_000;
+  const x = Float64Array.from({ length: count }, (_, at) => (at * 100) / count);
+  const y = new Float64Array(count).fill(1);
+  y.fill(NaN, 3_000, 5_000);
+  const path = curvePath({ x, y }, g);
+  expect(path).not.toContain("NaN");
+  expect(path.match(/M/g)).toHaveLength(2);
+  expect(path).toMatch(/L29\.99 -1M50 -1L/);
+});
