@@ -8,6 +8,7 @@ import type { PublicCase } from "@/lib/checks/kind";
 import { DelayEntryWork, type DelayEntryData } from "./DelayEntryWork";
 import { PeakTrace, type PeakTraceData } from "./PeakTrace";
 import { PatrolLog, type PatrolData } from "./PatrolLog";
+import { PromptView, type PromptData } from "./PromptView";
 import { SkyAndReport, type SkyData } from "./SkyAndReport";
 import { SkySurvey, type SkySurveyData } from "./SkySurvey";
 import { StandOffSite, type StandOffData } from "./StandOffSite";
@@ -32,6 +33,8 @@ export function Workspace({ view, filesAddress, onTake }: WorkspaceProps) {
     }
     case "side-peak":
       return <PeakTrace data={view.data as PeakTraceData} onTake={onTake} />;
+    case "cn0":
+      return <PromptView data={view.data as PromptData} />;
     case "satellites":
     case "false-lock": {
       const { captureFile, rateHz, windowHz, search } = view.data as CaptureData;

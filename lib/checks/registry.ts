@@ -1,3 +1,4 @@
+import { cn0 } from "./cn0/cn0";
 import { correlatorReading } from "./correlator-reading/correlatorReading";
 import { delayEntry } from "./delay-entry/delayEntry";
 import { falseLock } from "./false-lock/falseLock";
@@ -17,6 +18,7 @@ export const KINDS: readonly CheckKind[] = [
   sidePeak,
   satellites,
   searchPlan,
+  cn0,
   lostDecibels,
   skyView,
   standOff,
