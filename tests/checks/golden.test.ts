@@ -1,4 +1,5 @@
 import { describe, expect, test } from "vitest";
+import { cn0 } from "@/lib/checks/cn0/cn0";
 import { correlatorReading } from "@/lib/checks/correlator-reading/correlatorReading";
 import { delayEntry } from "@/lib/checks/delay-entry/delayEntry";
 import { falseLock } from "@/lib/checks/false-lock/falseLock";
@@ -70,6 +71,11 @@ describe("false-lock@1", () => {
   test.each(list(GOLDEN.falseLockCaptures))("capture of seed %i", { timeout: SLOW }, (n, hash) =>
     expect(goldenOf(falseLock.build(seedOf(n), plan))).toBe(hash),
   );
+});
+
+describe("cn0@1", () => {
+  const plan = planOf(cn0);
+  test.each(list(GOLDEN.cn0))("seed %i", (n, hash) => expect(goldenOf(cn0.build(seedOf(n), plan))).toBe(hash));
 });
 
 describe("side-peak@1", () => {

@@ -72,6 +72,7 @@ test("every kind, found by name and version", () => {
     "A3 side-peak@1",
     "B1 satellites@1",
     "B2 search-plan@1",
+    "D1 cn0@1",
     "D2 lost-decibels@1",
     "E3 sky-view@1",
     "F2 stand-off@1",
