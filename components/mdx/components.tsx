@@ -8,8 +8,10 @@ import { CheckCard } from "./CheckCard";
 export const components = {
   ...calculators(),
   Check: CheckCard,
-  // Quantities are shown on the card of their check.
+  // What is asked is shown on the card of its check; givens are drawn, and wrong ways are nobody's business beforehand.
   Quantity: () => null,
+  Given: () => null,
+  Wrong: () => null,
   Caution,
 } as const satisfies Record<string, ComponentType<never>>;
 

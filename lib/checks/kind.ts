@@ -11,6 +11,8 @@ export type FieldSpec = {
   label: string;
   input: "number" | "choice" | "text";
   unit?: Unit;
+  /** The number may be below zero: a phone's keyboard of figures has no minus. */
+  signed?: boolean;
   choices?: readonly Choice[];
   help?: string;
   quantity: string;
@@ -122,6 +124,7 @@ export interface CheckKind<P = unknown, T = unknown> {
   readonly title: string;
   readonly defaultMinutes: number;
   readonly parameters: readonly ParameterSpec[];
+  /** Empty where the plan brings its own; ask `quantitiesOf`. */
   readonly quantities: readonly QuantityDefinition[];
   readonly cautions: readonly CautionTopic[];
   /** Parameters that are each in range and still cannot be drawn from together; null when they can. */
@@ -130,9 +133,18 @@ export interface CheckKind<P = unknown, T = unknown> {
   mark(seedHex: string, plan: CheckPlan<P>, answers: Answers, progress?: Progress): Marking;
   /** The right method with a careful reading, from the public case and its files alone. */
   solve(built: BuiltCase<T>, plan: CheckPlan<P>): Answers;
+  /** Empty where the plan brings its own; ask `wrongMethodsOf`. */
   readonly wrongMethods: Readonly<Record<string, WrongMethod<P, T>>>;
+  /** Where the lead defines the check: what the plan brings in place of the kind's own lists. */
+  readonly ofPlan?: PlanDefinitions<P, T>;
   /** How the release check tries the kind; absent only where no machine marks. */
   readonly trial?: Trial<P, T>;
+}
+
+/** What a lead has written into a plan, in the form that a catalogue kind has it. */
+export interface PlanDefinitions<P = unknown, T = unknown> {
+  quantities(plan: CheckPlan<P>): readonly QuantityDefinition[];
+  wrongMethods(plan: CheckPlan<P>): Readonly<Record<string, WrongMethod<P, T>>>;
 }
 
 /** People who never existed, each with a case of their own. Same seed and same draws, same outcome. */

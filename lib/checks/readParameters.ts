@@ -81,5 +81,7 @@ function rangeEnds(written: unknown): [string | number, string | number] | null 
 const example = (spec: ParameterSpec & { input: "range" }) =>
   `"${formatUnderstood(spec.default[0], "1")} to ${formatUnderstood(spec.default[1], spec.unit)}"`;
 
-const unknownName = (name: string, specs: readonly ParameterSpec[]) =>
-  `This kind of check has no attribute ${name}. It has ${specs.map((spec) => spec.name).join(", ")}.`;
+const unknownName = (name: string, specs: readonly ParameterSpec[]) => {
+  const known = specs.length > 0 ? `It has ${specs.map((spec) => spec.name).join(", ")}.` : "Delete it.";
+  return `This kind of check has no attribute ${name}. ${known}`;
+};

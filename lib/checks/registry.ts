@@ -2,6 +2,7 @@ import { cn0 } from "./cn0/cn0";
 import { correlatorReading } from "./correlator-reading/correlatorReading";
 import { delayEntry } from "./delay-entry/delayEntry";
 import { falseLock } from "./false-lock/falseLock";
+import { formula } from "./formula/formula";
 import type { CheckKind } from "./kind";
 import { locate } from "./locate/locate";
 import { lostDecibels } from "./lost-decibels/lostDecibels";
@@ -24,6 +25,7 @@ export const KINDS: readonly CheckKind[] = [
   standOff,
   locate,
   delayEntry,
+  formula,
 ];
 
 /**

@@ -2,7 +2,8 @@ import { formatNumber, formatUnit } from "@/lib/checks/formatQuantity";
 import { inputText } from "@/lib/calculators/inputText";
 import { readInput } from "@/lib/calculators/readInput";
 import { parseQuantity } from "@/lib/checks/parseQuantity";
-import type { Unit } from "@/lib/gnss/units";
+import { unitNamed } from "@/lib/checks/unitNamed";
+import { UNITS, type Unit } from "@/lib/gnss/units";
 import type { Literal } from "@/lib/mdx/literal";
 import { CAUTION_TOPICS, type AttributeSpec } from "@/lib/mdx/tags";
 
@@ -21,6 +22,18 @@ export function attributeValue(spec: AttributeSpec, written: Literal): Attribute
     case "name":
       if (typeof written === "string" && NAME.test(written)) return { value: written };
       return { problem: `${spec.name} is letters, figures and hyphens in quotes, such as ${spec.sample}.` };
+    case "symbol":
+      if (typeof written === "string" && SYMBOL.test(written)) return { value: written };
+      return { problem: `${spec.name} is a letter with letters, figures or _ after it, such as ${spec.sample}.` };
+    case "unit": {
+      const unit = typeof written === "number" ? String(written) : written;
+      const found = unit === "1" ? unit : typeof unit === "string" ? unitNamed(unit.trim()) : undefined;
+      return found ? { value: found } : { problem: `${spec.name} is one of ${Object.keys(UNITS).join(", ")}.` };
+    }
+    case "quantity":
+      if (typeof written === "number" || (typeof written === "string" && written.trim() !== ""))
+        return { value: written };
+      return { problem: `${spec.name} is a number, such as ${spec.sample}.` };
     case "topics":
       return topics(spec, written);
     case "described": {
@@ -38,6 +51,8 @@ export function attributeValue(spec: AttributeSpec, written: Literal): Attribute
 }
 
 const NAME = /^(?=.{1,40}$)[a-z][a-zA-Z0-9]*(-[a-zA-Z0-9]+)*$/;
+
+const SYMBOL = /^[A-Za-z][A-Za-z0-9_]{0,23}$/;
 
 /** A bare number in the unit of the attribute, or a text with a unit of its own. */
 export function numberValue(

@@ -1,3 +1,4 @@
+import { quantitiesOf } from "@/lib/checks/definitionsOf";
 import { formatUnderstood } from "@/lib/checks/formatUnderstood";
 import type { CheckKind, CheckPlan, QuantityDefinition } from "@/lib/checks/kind";
 import { KINDS } from "@/lib/checks/registry";
@@ -21,8 +22,9 @@ export function checkCards(
 
 function cardOf(plan: CheckPlan, kinds: readonly CheckKind[]): CheckCardView {
   const kind = kinds.find(({ id, version }) => id === plan.kind && version === plan.version);
+  const definitions = kind ? quantitiesOf(kind, plan) : [];
   const quantities = plan.quantities.map((planned) => {
-    const definition = kind?.quantities.find(({ id }) => id === planned.of);
+    const definition = definitions.find(({ id }) => id === planned.of);
     return {
       id: planned.of,
       label: definition?.label ?? planned.of,

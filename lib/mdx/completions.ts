@@ -3,6 +3,7 @@ import type { CheckKind, ParameterSpec, QuantityDefinition } from "@/lib/checks/
 import { KINDS } from "@/lib/checks/registry";
 import { FRONT_MATTER_EXAMPLES } from "@/lib/mdx/frontMatter";
 import { TAGS, type TagName, type TagSpec } from "@/lib/mdx/tags";
+import { OWN_TAGS } from "@/lib/mdx/ownTags";
 import { toleranceText } from "@/lib/mdx/toleranceText";
 
 /** One offer of the editor: `insert` is what is typed for the lead. */
@@ -17,6 +18,8 @@ export type Completions = {
   /** Attributes of `<Check>` and values of `of`, by kind. */
   kindAttributes: Record<string, CompletionRow[]>;
   quantities: Record<string, CompletionRow[]>;
+  /** By kind that leaves them to the lead: the tags inside its `<Check>`, together a whole check. */
+  ownTags: Readonly<Record<string, CompletionRow[]>>;
 };
 
 export function completions(kinds: readonly CheckKind[] = KINDS): Completions {
@@ -34,9 +37,14 @@ export function completions(kinds: readonly CheckKind[] = KINDS): Completions {
         attributes.map((one) => ({ label: one.name, detail: one.help, insert: `${one.name}=${one.sample}` })),
       ]),
     ) as Completions["attributes"],
-    kinds: newest.map(({ id, letter, title }) => ({ label: id, detail: `${letter} ${title}`, insert: `kind="${id}"` })),
+    kinds: newest.map(({ id, letter, title }) => ({
+      label: id,
+      detail: `${letter} ${title}`.trim(),
+      insert: `kind="${id}"`,
+    })),
     kindAttributes: Object.fromEntries(newest.map((kind) => [kind.id, kind.parameters.map(parameterRow)])),
     quantities: Object.fromEntries(newest.map((kind) => [kind.id, kind.quantities.map(quantityRow)])),
+    ownTags: OWN_TAGS,
   };
 }
 

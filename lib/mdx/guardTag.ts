@@ -6,7 +6,7 @@ import type { TreeProperty } from "@/lib/mdx/moduleTree";
 import type { Tag } from "@/lib/mdx/nodes";
 import { problemAt, type Range } from "@/lib/mdx/problem";
 import { readAttributes, type WrittenAttribute } from "@/lib/mdx/readAttributes";
-import { LATER_TAGS, TAGS, tagNamed, type TagSpec } from "@/lib/mdx/tags";
+import { LATER_TAGS, TAGS, tagNamed, type TagName, type TagSpec } from "@/lib/mdx/tags";
 import type { WrittenCheck } from "@/lib/mdx/writtenTag";
 
 /** Name, place, inside and attributes of one tag. What passes is entered in `kept` and, for checks, in `checks`. */
@@ -26,12 +26,12 @@ export function guardTag(node: Tag, range: Range, ancestors: readonly Nodes[], c
   }
   const properties = readProperties(spec, written, opening, context);
   if (spec.name === "Check") {
-    const started: WrittenCheck = { range: opening, attributes: written, quantities: [] };
+    const started: WrittenCheck = { range: opening, attributes: written, parts: [] };
     context.checks.push(started);
     if (!misplaced && typeof properties.id === "string") context.kept.set(node, { id: properties.id });
-  } else if (spec.name === "Quantity") {
-    // Quantities belong to the card of their check and not to the text of the brief.
-    if (!misplaced) check?.quantities.push({ range: opening, attributes: written });
+  } else if (spec.place === "check") {
+    // Quantities and the like belong to the card of their check and not to the text of the brief.
+    if (!misplaced) check?.parts.push({ tag: spec.name as TagName, range: opening, attributes: written });
   } else if (!misplaced) {
     context.kept.set(node, properties);
   }
@@ -105,11 +105,6 @@ function readProperties(
 }
 
 function unknownAttribute(spec: TagSpec, name: string): string {
-  if (spec.name === "Quantity" && FORMULA_ATTRIBUTES.has(name)) {
-    return `${name} belongs to checks of kind "formula", which are not available in this release.`;
-  }
   const known = spec.attributes.map((one) => one.name).join(", ");
   return `<${spec.name}> has no attribute ${name.slice(0, 40)}. It has ${known}.`;
 }
-
-const FORMULA_ATTRIBUTES = new Set(["id", "label", "unit", "answer"]);

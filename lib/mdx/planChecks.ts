@@ -1,6 +1,8 @@
+import { wrongMethodsOf } from "@/lib/checks/definitionsOf";
 import type { CheckKind, CheckPlan } from "@/lib/checks/kind";
 import { leastNeeds, type LeastNeeds } from "@/lib/checks/leastNeeds";
 import { LIMITS } from "@/lib/mdx/limits";
+import { OWN_PLANS, type OwnPlan } from "@/lib/mdx/ownPlans";
 import { planParameters } from "@/lib/mdx/planParameters";
 import { planQuantities } from "@/lib/mdx/planQuantities";
 import { problemAt, type Problem } from "@/lib/mdx/problem";
@@ -45,39 +47,51 @@ function planCheck(check: WrittenCheck, kinds: readonly CheckKind[]): PlanReadin
   if (!kind)
     return { plans: [], problems: [problemAt(rangeOfAttribute(check, "kind"), "check", kindFault(kindId, kinds))] };
 
-  const own = new Set<string>(TAGS.Check.attributes.map(({ name }) => name));
-  const parameters = planParameters(
-    kind,
-    check.attributes.filter(({ name }) => !own.has(name)),
-    check.range,
-  );
-  const quantities = planQuantities(kind, check);
-  const problems = [...parameters.problems, ...quantities.problems];
+  const { title, parameters, quantities, problems } = inside(kind, check);
   const needs = plainAttribute(check, "Check", "needs");
-  const count = quantities.quantities.length;
-  if (typeof needs === "number" && needs > count) {
+  const count = quantities.length;
+  if (typeof needs === "number" && needs > count && count > 0) {
     const message = `This check has ${count} ${count === 1 ? "quantity" : "quantities"}, so needs={${needs}} could never be met. Write ${count} or fewer.`;
     problems.push(problemAt(rangeOfAttribute(check, "needs"), "check", message));
   }
-  const faulty = quantities.problems.some(({ severity }) => severity === "error");
-  const least = faulty ? null : leastNeeds(kind, quantities.quantities);
+  const id = plainAttribute(check, "Check", "id");
+  const minutes = plainAttribute(check, "Check", "minutes");
+  const plan: CheckPlan = {
+    id: typeof id === "string" ? id : "",
+    kind: kind.id,
+    version: kind.version,
+    title,
+    minutes: typeof minutes === "number" ? minutes : kind.defaultMinutes,
+    needs: typeof needs === "number" ? needs : null,
+    parameters,
+    quantities,
+  };
+  const faulty = problems.some(({ severity }) => severity === "error");
+  if (faulty && kind.ofPlan) return { plans: [], problems };
+  const least = faulty ? null : leastNeeds({ wrongMethods: wrongMethodsOf(kind, plan) }, quantities);
   if (typeof needs === "number" && least && needs < least.needs) {
     problems.push(problemAt(rangeOfAttribute(check, "needs"), "check", tooFew(needs, least)));
   }
-  const id = plainAttribute(check, "Check", "id");
-  const minutes = plainAttribute(check, "Check", "minutes");
-  if (typeof id !== "string") return { plans: [], problems };
-  const plan: CheckPlan = {
-    id,
-    kind: kind.id,
-    version: kind.version,
+  return { plans: typeof id === "string" ? [plan] : [], problems };
+}
+
+/** What the attributes of the check and the tags inside it say, in the way of its kind. */
+function inside(kind: CheckKind, check: WrittenCheck): OwnPlan {
+  const own = new Set<string>(TAGS.Check.attributes.map(({ name }) => name));
+  const written = check.attributes.filter(({ name }) => !own.has(name));
+  const parameters = planParameters(kind, written, check.range);
+  const planOwn = Object.hasOwn(OWN_PLANS, kind.id) ? OWN_PLANS[kind.id] : undefined;
+  if (planOwn) {
+    const planned = planOwn(check);
+    return { ...planned, problems: [...parameters.problems, ...planned.problems] };
+  }
+  const { quantities, problems } = planQuantities(kind, check);
+  return {
     title: kind.title,
-    minutes: typeof minutes === "number" ? minutes : kind.defaultMinutes,
-    needs: typeof needs === "number" ? needs : null,
     parameters: parameters.values,
-    quantities: quantities.quantities,
+    quantities,
+    problems: [...parameters.problems, ...problems],
   };
-  return { plans: [plan], problems };
 }
 
 function tooFew(needs: number, { needs: least, method, misses }: LeastNeeds): string {

@@ -1,7 +1,7 @@
 import type { CheckKind, CheckPlan, QuantityDefinition } from "@/lib/checks/kind";
 import { planTolerance } from "@/lib/mdx/planTolerance";
 import { problemAt, warningAt, type Problem } from "@/lib/mdx/problem";
-import { plainAttribute, rangeOfAttribute, type WrittenCheck, type WrittenTag } from "@/lib/mdx/writtenTag";
+import { partsOf, plainAttribute, rangeOfAttribute, type WrittenCheck, type WrittenTag } from "@/lib/mdx/writtenTag";
 
 type PlannedQuantity = CheckPlan["quantities"][number];
 
@@ -11,9 +11,14 @@ export function planQuantities(
   check: WrittenCheck,
 ): { quantities: PlannedQuantity[]; problems: Problem[] } {
   const problems: Problem[] = [];
-  if (check.quantities.length === 0) return { quantities: kind.quantities.map(asDefined), problems };
+  for (const { tag, range } of check.parts) {
+    if (tag !== "Quantity") problems.push(problemAt(range, "quantity", `<${tag}> ${OWN}`));
+  }
+  const tags = partsOf(check, "Quantity");
+  if (tags.length === 0) return { quantities: kind.quantities.map(asDefined), problems };
   const named = new Map<string, WrittenTag>();
-  for (const tag of check.quantities) {
+  for (const tag of tags) {
+    problems.push(...attributeProblems(tag));
     const of = plainAttribute(tag, "Quantity", "of");
     if (typeof of !== "string") continue;
     const at = rangeOfAttribute(tag, "of");
@@ -34,6 +39,16 @@ export function planQuantities(
     return [];
   });
   return { quantities, problems };
+}
+
+const OWN = 'belongs to checks of kind "formula". Delete it, or choose that kind.';
+
+/** A quantity of the catalogue is named by `of`; what a lead writes about an own quantity stands in its kind already. */
+function attributeProblems(tag: WrittenTag): Problem[] {
+  const own = tag.attributes.filter(({ name }) => ["id", "label", "unit", "answer"].includes(name));
+  const problems = own.map(({ name, range }) => problemAt(range, "attribute", `${name} ${OWN}`));
+  if (tag.attributes.some(({ name }) => name === "of")) return problems;
+  return [...problems, problemAt(tag.range, "attribute", '<Quantity> needs of. Write, for instance, of="doppler".')];
 }
 
 const asDefined = ({ id, tolerance, critical }: QuantityDefinition): PlannedQuantity => ({

@@ -6,7 +6,8 @@ import { CALCULATOR_TAGS } from "@/lib/mdx/calculatorTags";
 /** How the value of an attribute is read. A number may be bare, in the unit given, or in quotes with a unit of its own. */
 export type AttributeSpec = { name: string; help: string; sample: string; required?: true } & (
   | { input: "number"; unit: Unit; from: number; to: number; whole?: true }
-  | { input: "name" | "text" | "flag" | "topics" }
+  // A symbol is a name that can stand in a formula; a quantity is a number whose unit stands in another attribute.
+  | { input: "name" | "symbol" | "unit" | "quantity" | "text" | "flag" | "topics" }
   // A word of a list or the rows of a table: the calculator's own description says how it is read.
   | { input: "described"; of: ChoiceInput | RowsInput }
 );
@@ -69,8 +70,13 @@ export const TAGS = {
     help: "One quantity of the check that is judged; without any, all of its kind are",
     inside: "nothing",
     place: "check",
+    // Which of these are needed depends on the kind of the check: see planQuantities and planFormula.
     attributes: [
-      { name: "of", help: "quantity of the kind", sample: '"doppler"', input: "name", required: true },
+      { name: "of", help: "quantity of the kind", sample: '"doppler"', input: "name" },
+      { name: "id", help: "own quantity: its name in formulas", sample: '"delay"', input: "symbol" },
+      { name: "label", help: "own quantity: what is asked", sample: '"cable delay"', input: "text" },
+      { name: "unit", help: "own quantity: unit of the answer", sample: '"ns"', input: "unit" },
+      { name: "answer", help: "own quantity: formula of the right value", sample: '"L / (0.66 * c)"', input: "text" },
       {
         name: "tolerance",
         help: "largest difference that is within, with its unit",
@@ -78,6 +84,32 @@ export const TAGS = {
         input: "text",
       },
       { name: "critical", help: "outside this quantity the check is not met", sample: "{true}", input: "flag" },
+    ],
+  },
+  Given: {
+    name: "Given",
+    help: "A number that is drawn for each case, for the formulas of the check",
+    inside: "nothing",
+    place: "check",
+    attributes: [
+      { name: "id", help: "its name in formulas", sample: '"L"', input: "symbol", required: true },
+      { name: "label", help: "what it is", sample: '"cable length"', input: "text", required: true },
+      { name: "unit", help: "its unit, 1 for a plain number", sample: '"m"', input: "unit", required: true },
+      { name: "from", help: "smallest value", sample: "{8}", input: "quantity", required: true },
+      { name: "to", help: "largest value, from plus whole steps", sample: "{120}", input: "quantity", required: true },
+      { name: "step", help: "from one value to the next", sample: "{0.5}", input: "quantity", required: true },
+    ],
+  },
+  Wrong: {
+    name: "Wrong",
+    help: "A known wrong way to a quantity, named on the marking record of whoever went it",
+    inside: "nothing",
+    place: "check",
+    attributes: [
+      { name: "id", help: "its name in this check", sample: '"air"', input: "name", required: true },
+      { name: "label", help: "what was done wrong", sample: '"speed of light in air"', input: "text", required: true },
+      { name: "of", help: "the quantity it leads to", sample: '"delay"', input: "symbol", required: true },
+      { name: "answer", help: "formula of the wrong value", sample: '"L / c"', input: "text", required: true },
     ],
   },
   Caution: {
@@ -112,8 +144,6 @@ export const LATER_TAGS: readonly string[] = [
   "MixProducts",
   "MultipathError",
   "SkyMask",
-  "Given",
-  "Wrong",
   "WitnessLine",
   "Figure",
 ];
@@ -132,6 +162,5 @@ export const LATER_KINDS: readonly string[] = [
   "pulse-acceptance",
   "log-timeline",
   "own-capture",
-  "formula",
   "written",
 ];

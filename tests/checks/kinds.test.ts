@@ -1,13 +1,15 @@
 import { describe, expect, test } from "vitest";
-import type { Answers, CheckKind, Marking, PublicCase } from "@/lib/checks/kind";
+import type { Answers, CheckKind, CheckPlan, Marking, PublicCase } from "@/lib/checks/kind";
 import { correlatorReading } from "@/lib/checks/correlator-reading/correlatorReading";
 import { drawCase } from "@/lib/checks/correlator-reading/drawCase";
 import { markAnswers as markReading } from "@/lib/checks/correlator-reading/markAnswers";
 import { publicCase as readingCase } from "@/lib/checks/correlator-reading/publicCase";
 import { ENGINE_VERSION } from "@/lib/checks/engineVersion";
+import { quantitiesOf } from "@/lib/checks/definitionsOf";
 import { falseLock } from "@/lib/checks/false-lock/falseLock";
 import { markAnswers as markFalseLock } from "@/lib/checks/false-lock/markAnswers";
 import { publicCase as falseLockCase } from "@/lib/checks/false-lock/publicCase";
+import { formula } from "@/lib/checks/formula/formula";
 import { KINDS, kindOf } from "@/lib/checks/registry";
 import { drawScene } from "@/lib/checks/satellites/drawScene";
 import { markAnswers as markSatellites } from "@/lib/checks/satellites/markAnswers";
@@ -19,11 +21,12 @@ import { publicCase as planCase } from "@/lib/checks/search-plan/publicCase";
 import { searchPlan } from "@/lib/checks/search-plan/searchPlan";
 import { UNITS, isConvertible } from "@/lib/gnss/units";
 import { sceneFor } from "./false-lock/sceneFor";
+import { CHAIN, planFrom } from "./formula/plan";
 import { planOf, seedOf } from "./planOf";
 
 const seed = seedOf(31);
 
-type Sample = { truth: object; shown: PublicCase; mark: (answers: Answers) => Marking };
+type Sample = { truth: object; shown: PublicCase; mark: (answers: Answers) => Marking; plan?: CheckPlan };
 
 /** Public case and marking of the kinds that make a capture, without making it, and of those that came before trials. */
 const samples: Readonly<Record<string, () => Sample>> = {
@@ -55,13 +58,13 @@ const samples: Readonly<Record<string, () => Sample>> = {
     const { truth } = drawPlan(seed, plan.parameters);
     return { truth, shown: planCase(truth, plan), mark: (answers: Answers) => markPlan(seed, truth, plan, answers) };
   },
+  formula: () => sampleOf(formula as CheckKind, planFrom(CHAIN)),
 };
 
 /** Any other kind: its case is quickly made. */
-function sampleOf(kind: CheckKind): Sample {
-  const plan = planOf(kind);
+function sampleOf(kind: CheckKind, plan: CheckPlan = planOf(kind)): Sample {
   const { truth, publicCase } = kind.build(seed, plan);
-  return { truth: truth as object, shown: publicCase, mark: (answers) => kind.mark(seed, plan, answers) };
+  return { truth: truth as object, shown: publicCase, mark: (answers) => kind.mark(seed, plan, answers), plan };
 }
 const kinds = KINDS.map((kind) => [kind.id, kind] as const);
 
@@ -78,6 +81,7 @@ test("every kind, found by name and version", () => {
     "F2 stand-off@1",
     "F4 locate@1",
     "H1 delay-entry@1",
+    " formula@1",
   ]);
   for (const kind of KINDS) {
     expect(kindOf(kind.id)).toBe(kind);
@@ -108,7 +112,8 @@ test("critical is what alone makes the work worthless", () => {
 });
 
 describe.each(kinds)("%s", (id, kind) => {
-  const { truth, shown, mark } = samples[id]?.() ?? sampleOf(kind);
+  const { truth, shown, mark, plan = planOf(kind) } = samples[id]?.() ?? sampleOf(kind);
+  const definitions = quantitiesOf(kind, plan);
   const fields = shown.sections.flatMap((section) => section.fields.map((field) => ({ section, field })));
 
   test("every parameter has a default inside its own bounds", () => {
@@ -125,7 +130,7 @@ describe.each(kinds)("%s", (id, kind) => {
   });
 
   test("every default tolerance lies in the range a lead may set", () => {
-    for (const { tolerance, toleranceRange } of kind.quantities) {
+    for (const { tolerance, toleranceRange } of definitions) {
       expect(tolerance === null).toBe(toleranceRange === null);
       if (!tolerance || !toleranceRange) continue;
       expect(isConvertible(tolerance.unit, toleranceRange.unit)).toBe(true);
@@ -134,7 +139,7 @@ describe.each(kinds)("%s", (id, kind) => {
   });
 
   test("every field belongs to a quantity, and every quantity asked has its tolerance published", () => {
-    const ids = kind.quantities.map((quantity) => quantity.id);
+    const ids = definitions.map((quantity) => quantity.id);
     for (const { field } of fields) expect(ids).toContain(field.quantity);
     expect(shown.tolerances.map(({ quantity }) => quantity)).toEqual(ids);
     for (const { tolerance, reason } of shown.tolerances) expect(tolerance && reason).toBeTruthy();

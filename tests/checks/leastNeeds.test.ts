@@ -111,7 +111,8 @@ describe.each(methods.map(([kind, method]) => [`${kind.id} ${method}`, kind, met
 
 test("one fewer is met by the method that is named", { timeout: SLOW }, () => {
   for (const kind of KINDS) {
-    const least = leastNeeds(kind, quantitiesOf(kind))!;
+    const least = leastNeeds(kind, quantitiesOf(kind));
+    if (!least) continue; // any number will do
     const [method] = Object.entries(kind.wrongMethods).find(([, { label }]) => label === least.method)!;
     const met = SEEDS.map((seed) => markedOf(kind, { needs: least.needs - 1, method, seed }).met);
     expect(met, kind.id).toContain(true);

@@ -3,8 +3,10 @@ import { expect, test } from "vitest";
 import { checkCards } from "@/lib/mdx/checkCards";
 import type { ModuleTree, TreeNode } from "@/lib/mdx/moduleTree";
 import type { Problem } from "@/lib/mdx/problem";
+import { kindOf } from "@/lib/checks/registry";
 import { readModule } from "@/lib/mdx/readModule";
 import { startingSource } from "@/lib/mdx/startingSource";
+import { DELAY, planFrom } from "../checks/formula/plan";
 import { SAMPLE_KIND } from "./kinds";
 import { FRONT_MATTER, moduleOf, problemsOf } from "./moduleText";
 
@@ -87,19 +89,35 @@ test("cautions, text and calculator of the printed example stand on lines of the
   ]);
 });
 
-test("the formula check of the printed example is refused as not available, each tag in words", async () => {
-  const problems = await problemsOf(
-    [
-      '<Check id="delay" kind="formula" minutes={25}>',
-      "Work out the delay of the cable on your drawing.",
-      '<Given id="L" label="cable length" unit="m" from={8} to={120} step={0.5} />',
-      '<Quantity id="delay" label="cable delay" unit="ns" answer="L / (vf * c)" tolerance="1 ns" critical />',
-      '<Wrong id="air" of="delay" label="speed of light in air" answer="L / c" />',
-      "</Check>",
-    ].join("\n"),
+test("the formula check of the printed example is planned, drawn, solved and marked", async () => {
+  const source = [
+    '<Check id="delay" kind="formula" minutes={25}>',
+    "Work out the delay of the cable on your drawing.",
+    '<Given id="L" label="cable length" unit="m" from={8} to={120} step={0.5} />',
+    '<Given id="vf" label="velocity factor" unit="1" from={0.66} to={0.88} step={0.01} />',
+    '<Quantity id="delay" label="cable delay" unit="ns" answer="L / (vf * c)" tolerance="1 ns" critical />',
+    '<Wrong id="air" of="delay" label="speed of light in air" answer="L / c" />',
+    "</Check>",
+  ].join("\n");
+  const { module, problems } = await readModule(moduleOf(source).replace("[reading]", "[reading, delay]"));
+  expect(problems).toEqual([]);
+  const plan = module!.checks.at(-1)!;
+  expect(plan).toEqual(planFrom(DELAY));
+  const seed = "5e".repeat(32);
+  const kind = kindOf("formula");
+  const built = kind.build(seed, plan);
+  const { L, vf } = (built.truth as { givens: Record<string, number> }).givens;
+  expect(kind.solve(built, plan)["quantities.delay"]).toBe(
+    String(Number(((L! / (vf! * 0.299792458)) as number).toPrecision(9))),
   );
-  const unavailable = problems.filter(({ message }) => message.includes("not available in this release"));
-  expect([...new Set(unavailable.map(({ line }) => line))]).toEqual([1, 3, 4, 5]);
+  expect(kind.mark(seed, plan, kind.solve(built, plan)).met).toBe(true);
+  expect(checkCards([plan]).delay).toMatchObject({
+    title: "Cable delay",
+    needs: 1,
+    quantities: [{ label: "Cable delay", tolerance: "±1\u00a0ns", critical: true }],
+  });
+  // Its formulas are nowhere in what a technician reads.
+  expect(JSON.stringify(module!.tree)).not.toContain("vf");
 });
 
 test("the brief of a check is its text; its quantities are in the plan alone", async () => {

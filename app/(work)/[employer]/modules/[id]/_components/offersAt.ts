@@ -22,6 +22,7 @@ export function offersAt(completions: Completions, before: string): Offers | nul
     return {
       from: opening.index,
       rows: [
+        ...(kind ? (completions.ownTags[kind] ?? []) : []),
         ...quantities.map((row) => ({ ...row, label: `<Quantity ${row.label}` })),
         ...completions.tags.map((row) => ({ ...row, label: `<${row.label}` })),
       ],
