@@ -6,7 +6,7 @@ import { OWN_PLANS, type OwnPlan } from "@/lib/mdx/ownPlans";
 import { planParameters } from "@/lib/mdx/planParameters";
 import { planQuantities } from "@/lib/mdx/planQuantities";
 import { problemAt, type Problem } from "@/lib/mdx/problem";
-import { LATER_KINDS, TAGS } from "@/lib/mdx/tags";
+import { LANGUAGE_KINDS, TAGS } from "@/lib/mdx/tags";
 import { plainAttribute, rangeOfAttribute, type WrittenCheck } from "@/lib/mdx/writtenTag";
 
 export type PlanReading = { plans: CheckPlan[]; problems: Problem[] };
@@ -101,6 +101,6 @@ function tooFew(needs: number, { needs: least, method, misses }: LeastNeeds): st
 
 function kindFault(id: string, kinds: readonly CheckKind[]): string {
   const known = `Kinds are ${kinds.map((kind) => kind.id).join(", ")}.`;
-  if (LATER_KINDS.includes(id)) return `Checks of kind "${id}" are not available in this release. ${known}`;
+  if (LANGUAGE_KINDS.includes(id)) return `Checks of kind "${id}" are not available in this release. ${known}`;
   return `"${id}" is not a kind of check. ${known}`;
 }

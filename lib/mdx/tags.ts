@@ -148,13 +148,20 @@ export const LATER_TAGS: readonly string[] = [
   "Figure",
 ];
 
-/** Kinds of the language that this release does not have yet; the others stand in the registry of kinds. */
-export const LATER_KINDS: readonly string[] = [
+/** Every kind that the language names; one that is not in the registry of kinds is not available in this release. */
+export const LANGUAGE_KINDS: readonly string[] = [
+  "correlator-reading",
+  "false-lock",
+  "side-peak",
+  "satellites",
+  "search-plan",
   "cn0",
   "lost-decibels",
   "chain",
+  "sky-view",
   "witnessed",
   "interferer",
+  "stand-off",
   "locate",
   "jammed-or-not",
   "multipath-log",
@@ -162,5 +169,6 @@ export const LATER_KINDS: readonly string[] = [
   "pulse-acceptance",
   "log-timeline",
   "own-capture",
+  "formula",
   "written",
 ];
