@@ -2,7 +2,6 @@
 import { useId } from "react";
 import { plotGeometry, type Axis, type PlotGeometry } from "@/components/plots/geometry";
 import { GridCursorShape } from "@/components/plots/GridCursorShape";
-import { NudgeKeys } from "@/components/plots/NudgeKeys";
 import { PlotFrame } from "@/components/plots/PlotFrame";
 import { PlotStage } from "@/components/plots/PlotStage";
 import { useGridCursor } from "@/components/plots/useGridCursor";
@@ -27,7 +26,7 @@ type BearingMapProps = {
 };
 
 const STEP_M = 5;
-const NO_POWER: readonly number[] = []; // there is no next peak on a map
+const NO_PEAKS: readonly number[] = []; // a map has none to go to
 const HINTS = [
   { keys: ["←", "→", "↑", "↓"], word: "5 m" },
   { keys: ["Shift"], word: "50 m" },
@@ -54,37 +53,33 @@ export function BearingMap({ stops, leftOut, ellipse, place, onMove, onTake, clo
         onMove({ eastM: whole.eastFrom + column * STEP_M, northM: whole.northFrom + row * STEP_M }),
       onTake,
     },
-    { power: NO_POWER, rows, columns, cellAt: (px, py) => cellOf({ eastM: g.xAt(px), northM: g.yAt(py) }) },
+    { peaks: NO_PEAKS, rows, columns, cellAt: (px, py) => cellOf({ eastM: g.xAt(px), northM: g.yAt(py) }) },
   );
   return (
-    <>
-      <PlotStage
-        box={box}
-        summary={summary}
-        reading={`east ${formatNumber(place.eastM)} m, north ${formatNumber(place.northM)} m`}
-        cursor="both"
-        onCursorKey={cursor.onKey}
-        onPointer={cursor.onPointer}
-        table={{ columns: tableColumns(stops) }}
-        hints={HINTS}
+    <PlotStage
+      box={box}
+      summary={summary}
+      reading={`east ${formatNumber(place.eastM)} m, north ${formatNumber(place.northM)} m`}
+      cursor="both"
+      onCursorKey={cursor.onKey}
+      onPointer={cursor.onPointer}
+      onNudge={cursor.nudge}
+      table={{ columns: tableColumns(stops) }}
+      hints={HINTS}
+    >
+      <PlotFrame
+        geometry={g}
+        x={EAST}
+        y={NORTH}
+        clipId={clipId}
+        over={<GridCursorShape g={g} x={g.x(place.eastM)} y={g.y(place.northM)} />}
       >
-        <PlotFrame
-          geometry={g}
-          x={EAST}
-          y={NORTH}
-          clipId={clipId}
-          over={<GridCursorShape g={g} x={g.x(place.eastM)} y={g.y(place.northM)} />}
-        >
-          {ellipse && <EllipseShape g={g} ellipse={ellipse} />}
-          {stops.map((stop) => (
-            <StopShape key={stop.stop} g={g} stop={stop} isOut={leftOut.has(stop.stop)} />
-          ))}
-        </PlotFrame>
-      </PlotStage>
-      <div className="mt-3 desk:hidden">
-        <NudgeKeys onNudge={cursor.nudge} />
-      </div>
-    </>
+        {ellipse && <EllipseShape g={g} ellipse={ellipse} />}
+        {stops.map((stop) => (
+          <StopShape key={stop.stop} g={g} stop={stop} isOut={leftOut.has(stop.stop)} />
+        ))}
+      </PlotFrame>
+    </PlotStage>
   );
 }
 
