@@ -45,7 +45,7 @@ test("freezes text, front matter, checks and tree of the draft under number 1.0"
     released_by: firm.lead.personId,
   });
   expect(stored!.front_matter).toMatchObject({ code: CODE, sitting: { days: 30, freshCases: 1, waitHours: 24 } });
-  expect(stored!.checks.map((check) => check.id)).toEqual(["reading", "plan", "satellites", "false-lock"]);
+  expect(stored!.checks.map((check) => check.id)).toEqual(["reading", "plan", "satellites", "false-lock", "side-peak", "cn0"]);
   expect(stored!.tree.type).toBe("root");
 });
 
