@@ -26,11 +26,7 @@ describe("from a draft to a stranger's verification", () => {
   test("the lead is told of a mistake by line and column, mends it, releases and assigns", async () => {
     const { page, faults } = await signedIn(browser, "lead");
     expect.soft(await brokenRules(page)).toEqual([]);
-    await page
-      .getByRole("row")
-      .filter({ hasText: "SBW-R2" })
-      .getByRole("link", { name: "Open", exact: true })
-      .click();
+    await page.getByRole("row").filter({ hasText: "SBW-R2" }).getByRole("link", { name: "Open", exact: true }).click();
     await page.waitForSelector(".cm-content");
     const end = async (text: string) => {
       await page.click(".cm-content");
