@@ -72,7 +72,7 @@ function AnswerField({ spec, row, value, onChange }: AnswerFieldProps) {
   if (spec.input === "choice") {
     return (
       <Select
-        label={shown}
+        label={row === null ? shown : `${shown} ${row}`}
         empty="Not answered"
         choices={spec.choices!}
         value={value}

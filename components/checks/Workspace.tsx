@@ -5,6 +5,7 @@ import { StandingCalculator } from "@/components/calculators/StandingCalculator"
 import { TraceReader } from "@/components/calculators/TraceReader";
 import { SectionHead } from "@/components/ui/SectionHead";
 import type { PublicCase } from "@/lib/checks/kind";
+import { ChainSite, type ChainSiteData } from "./ChainSite";
 import { DelayEntryWork, type DelayEntryData } from "./DelayEntryWork";
 import { PeakTrace, type PeakTraceData } from "./PeakTrace";
 import { PatrolLog, type PatrolData } from "./PatrolLog";
@@ -65,6 +66,8 @@ export function Workspace({ view, filesAddress, onTake }: WorkspaceProps) {
       );
     case "stand-off":
       return <StandOffSite data={view.data as StandOffData} />;
+    case "chain":
+      return <ChainSite data={view.data as ChainSiteData} />;
     case "sky-view":
       return <SkySurvey data={view.data as SkySurveyData} />;
     case "delay-entry":

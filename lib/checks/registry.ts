@@ -1,3 +1,4 @@
+import { chain } from "./chain/chain";
 import { cn0 } from "./cn0/cn0";
 import { correlatorReading } from "./correlator-reading/correlatorReading";
 import { delayEntry } from "./delay-entry/delayEntry";
@@ -21,6 +22,7 @@ export const KINDS: readonly CheckKind[] = [
   searchPlan,
   cn0,
   lostDecibels,
+  chain,
   skyView,
   standOff,
   locate,

@@ -1,5 +1,6 @@
 import { describe, expect, test } from "vitest";
 import { cn0 } from "@/lib/checks/cn0/cn0";
+import { chain } from "@/lib/checks/chain/chain";
 import { correlatorReading } from "@/lib/checks/correlator-reading/correlatorReading";
 import { delayEntry } from "@/lib/checks/delay-entry/delayEntry";
 import { falseLock } from "@/lib/checks/false-lock/falseLock";
@@ -44,6 +45,11 @@ describe("search-plan@1", () => {
   test.each(list(GOLDEN.searchPlan))("seed %i", { timeout: SLOW }, (n, hash) =>
     expect(goldenOf(searchPlan.build(seedOf(n), plan))).toBe(hash),
   );
+});
+
+describe("chain@1", () => {
+  const plan = planOf(chain);
+  test.each(list(GOLDEN.chain))("seed %i", (n, hash) => expect(goldenOf(chain.build(seedOf(n), plan))).toBe(hash));
 });
 
 describe("sky-view@1", () => {
