@@ -7,6 +7,8 @@ import { UsageError } from "./engine/UsageError";
 // Loaded when asked for, so that one subcommand does not wait for the code of another.
 const SUBCOMMANDS: Readonly<Record<string, () => Promise<Subcommand>>> = {
   codes: async () => (await import("./engine/codes")).codes,
+  case: async () => (await import("./engine/case")).drawCase,
+  mark: async () => (await import("./engine/mark")).mark,
   search: async () => (await import("./engine/search")).search,
 };
 
