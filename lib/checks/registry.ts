@@ -7,6 +7,7 @@ import { formula } from "./formula/formula";
 import type { CheckKind } from "./kind";
 import { locate } from "./locate/locate";
 import { lostDecibels } from "./lost-decibels/lostDecibels";
+import { pulseAcceptance } from "./pulse-acceptance/pulseAcceptance";
 import { satellites } from "./satellites/satellites";
 import { searchPlan } from "./search-plan/searchPlan";
 import { sidePeak } from "./side-peak/sidePeak";
@@ -28,6 +29,7 @@ export const KINDS: readonly CheckKind[] = [
   locate,
   delayEntry,
   formula,
+  pulseAcceptance,
 ];
 
 /**

@@ -32,13 +32,29 @@ export function median(values: ArrayLike<number>): number {
   return sorted.length % 2 === 1 ? sorted[half] : (sorted[half - 1] + sorted[half]) / 2;
 }
 
+const NORMAL_OVER_MEDIAN = 1.4826022185056018; // standard deviation of a normal law over its median distance
+
 /**
  * Spread that outliers do not move: median distance from the median, times 1.4826 so that it is the standard deviation
  * of a normal law. Hampel, "The influence curve and its role in robust estimation" (1974).
  */
-export function robustDeviation(values: ArrayLike<number>): number {
-  const middle = median(values);
-  return 1.4826022185056018 * median(Float64Array.from(values, (value) => Math.abs(value - middle)));
+export const robustDeviation = (values: ArrayLike<number>): number => robustSpread(values).deviation;
+
+/** The median and that spread at once, with one sort: the distances grow outwards from the middle on either side. */
+export function robustSpread(values: ArrayLike<number>): { middle: number; deviation: number } {
+  if (values.length === 0) throw new RangeError("robustSpread: at least one value");
+  const sorted = Float64Array.from(values).sort();
+  const count = sorted.length;
+  const half = count >> 1;
+  const middle = count % 2 === 1 ? sorted[half] : (sorted[half - 1] + sorted[half]) / 2;
+  let [below, above] = [half - 1, half];
+  let [last, before] = [0, 0];
+  for (let n = 0; n <= half; n++) {
+    before = last;
+    const nearerBelow = above >= count || (below >= 0 && middle - sorted[below] < sorted[above] - middle);
+    last = nearerBelow ? middle - sorted[below--] : sorted[above++] - middle;
+  }
+  return { middle, deviation: NORMAL_OVER_MEDIAN * (count % 2 === 1 ? last : (before + last) / 2) };
 }
 
 /** Straight line through points by least squares. @throws RangeError unless two places differ */

@@ -1,7 +1,7 @@
 import { expect, test } from "vitest";
 import { findMaximum } from "@/lib/numeric/findMaximum";
 import { seededRandom } from "@/lib/numeric/random";
-import { fitLine, mean, median, robustDeviation, standardDeviation } from "@/lib/numeric/statistics";
+import { fitLine, mean, median, robustDeviation, robustSpread, standardDeviation } from "@/lib/numeric/statistics";
 import { expectNear } from "@/tests/support/expectNear";
 
 // NIST/SEMATECH e-Handbook, Statistical Reference Datasets, "NumAcc1" and "NumAcc2": certified mean and deviation.
@@ -20,6 +20,22 @@ test("the robust deviation of normal draws is 1, outliers or not", () => {
   expectNear(robustDeviation(draws), 1, 0.02, "draws");
   draws.fill(1e6, 0, 100);
   expectNear(robustDeviation(draws), 1, 0.03, "one in 200 is far off");
+});
+
+// The definition itself, by two medians: Hampel 1974.
+test("median and robust deviation at once are the two worked one after the other", () => {
+  const random = seededRandom("5e".repeat(32), "spread");
+  for (let count = 1; count <= 40; count++) {
+    // Whole numbers, so that some are equal.
+    const values = Float64Array.from(
+      { length: count },
+      () => random.integer(-9, 9) * (random.uniform() < 0.1 ? 100 : 1),
+    );
+    const middle = median(values);
+    const deviation = 1.4826022185056018 * median(values.map((value) => Math.abs(value - middle)));
+    expect(robustSpread(values)).toEqual({ middle, deviation });
+  }
+  expect(() => robustSpread([])).toThrow(/^robustSpread/);
 });
 
 test("medians and lines by hand", () => {

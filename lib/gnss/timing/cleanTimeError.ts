@@ -1,4 +1,4 @@
-import { median, robustDeviation } from "@/lib/numeric/statistics";
+import { robustDeviation, robustSpread } from "@/lib/numeric/statistics";
 import type { TimeErrorSeries } from "./timeError";
 
 /**
@@ -21,8 +21,8 @@ export function findOutliers(
     if (Number.isNaN(valuesNs[n])) continue;
     const from = Math.max(0, Math.min(n - halfWindow, valuesNs.length - 2 * halfWindow - 1));
     const around = valuesNs.subarray(from, from + 2 * halfWindow + 1).filter((value) => !Number.isNaN(value));
-    const limit = times * Math.max(floorNs, robustDeviation(around));
-    if (Math.abs(valuesNs[n] - median(around)) > limit) found.push(n);
+    const { middle, deviation } = robustSpread(around);
+    if (Math.abs(valuesNs[n] - middle) > times * Math.max(floorNs, deviation)) found.push(n);
   }
   return found;
 }
