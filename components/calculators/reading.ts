@@ -8,6 +8,8 @@ export type Reading = {
   magnitude?: number;
   binHz?: number;
   timeNs?: number;
+  timeS?: number;
+  levelNs?: number;
   eastM?: number;
   northM?: number;
   semiMajorM?: number;

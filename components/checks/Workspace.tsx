@@ -10,6 +10,7 @@ import { DelayEntryWork, type DelayEntryData } from "./DelayEntryWork";
 import { PeakTrace, type PeakTraceData } from "./PeakTrace";
 import { PatrolLog, type PatrolData } from "./PatrolLog";
 import { PromptView, type PromptData } from "./PromptView";
+import { PulseAcceptanceWork, type PulseAcceptanceData } from "./PulseAcceptanceWork";
 import { SkyAndReport, type SkyData } from "./SkyAndReport";
 import { SkySurvey, type SkySurveyData } from "./SkySurvey";
 import { StandOffSite, type StandOffData } from "./StandOffSite";
@@ -74,6 +75,8 @@ export function Workspace({ view, filesAddress, onTake }: WorkspaceProps) {
       return <DelayEntryWork data={view.data as DelayEntryData} onTake={onTake} />;
     case "locate":
       return <PatrolLog data={view.data as PatrolData} onTake={onTake} />;
+    case "pulse-acceptance":
+      return <PulseAcceptanceWork data={view.data as PulseAcceptanceData} onTake={onTake} />;
     default:
       return <p className="text-dense text-ink-2">Work with the files of this case and type your answers.</p>;
   }

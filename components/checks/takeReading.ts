@@ -24,6 +24,8 @@ const WHEN_OPEN: typeof PARTS = {
   parent: PARTS.prn!,
   lead: ({ timeNs }) => text(timeNs, 1),
   end: ({ timeNs }) => text(timeNs, 1),
+  time: ({ timeS }) => (timeS === undefined ? null : text(timeS / 60, 1)),
+  maxTe: ({ levelNs }) => (levelNs === undefined ? null : text(Math.abs(levelNs), 1)),
 };
 
 /** The verdict that makes a satellite the one whose false lock is asked about. */

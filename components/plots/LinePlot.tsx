@@ -67,7 +67,8 @@ export function LinePlot({
   const g = plotGeometry(width, height, x, y, margins);
   const [subject] = curves;
   const line = useLineCursor(cursor, { x: subject.x, y: subject.y, toPx: g.x });
-  const at = { x: g.x(subject.x[line.index]), y: g.y(subject.y[line.index]) };
+  const level = subject.y[line.index];
+  const at = { x: g.x(subject.x[line.index]), y: Number.isNaN(level) ? g.bottom : g.y(level) }; // a missing value stands at the foot
   const lines = cursor?.lines(line.index) ?? [];
   const hints = cursor?.onTake ? [...HINTS, { keys: ["Enter"], word: "take" }] : HINTS;
   return (

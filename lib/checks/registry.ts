@@ -28,8 +28,8 @@ export const KINDS: readonly CheckKind[] = [
   standOff,
   locate,
   delayEntry,
-  formula,
   pulseAcceptance,
+  formula,
 ];
 
 /**

@@ -9,6 +9,7 @@ import { locate } from "@/lib/checks/locate/locate";
 import { lostDecibels } from "@/lib/checks/lost-decibels/lostDecibels";
 import { drawScene } from "@/lib/checks/satellites/drawScene";
 import { publicCase as satellitesCase } from "@/lib/checks/satellites/publicCase";
+import { pulseAcceptance } from "@/lib/checks/pulse-acceptance/pulseAcceptance";
 import { satellites } from "@/lib/checks/satellites/satellites";
 import { searchPlan } from "@/lib/checks/search-plan/searchPlan";
 import { sidePeak } from "@/lib/checks/side-peak/sidePeak";
@@ -37,6 +38,13 @@ describe("delay-entry@1", () => {
   const plan = planOf(delayEntry);
   test.each(list(GOLDEN.delayEntry))("seed %i", (n, hash) =>
     expect(goldenOf(delayEntry.build(seedOf(n), plan))).toBe(hash),
+  );
+});
+
+describe("pulse-acceptance@1", () => {
+  const plan = planOf(pulseAcceptance);
+  test.each(list(GOLDEN.pulseAcceptance))("seed %i", (n, hash) =>
+    expect(goldenOf(pulseAcceptance.build(seedOf(n), plan))).toBe(hash),
   );
 });
 

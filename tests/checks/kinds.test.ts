@@ -82,6 +82,7 @@ test("every kind, found by name and version", () => {
     "F2 stand-off@1",
     "F4 locate@1",
     "H1 delay-entry@1",
+    "H3 pulse-acceptance@1",
     " formula@1",
   ]);
   for (const kind of KINDS) {
@@ -110,6 +111,7 @@ test("critical is what alone makes the work worthless", () => {
     "E3 choice",
     "F4 action",
     "H1 entry",
+    "H3 verdict",
   ]);
 });
 

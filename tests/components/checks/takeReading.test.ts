@@ -88,3 +88,12 @@ test("an echo is written into the open field only: which echo it is, the person 
   expect(written(sections, {}, { timeNs: 430.5 }, null)).toEqual({});
   expect(written(sections, {}, { timeNs: 430.5 }, "trace.end")).toEqual({ "trace.end": "430.5" });
 });
+
+test("a reading of a log gives its time in minutes or its size, whichever is open", () => {
+  const fields = ["time", "maxTe", "mean"].map((id) => ({ id, label: id, input: "number", unit: "ns", quantity: id }));
+  const sections = [{ id: "log", title: "Log", fields }] as unknown as Parameters<typeof takeReading>[0];
+  const reading = { timeS: 43_230, levelNs: -87.25 };
+  expect(written(sections, {}, reading, "log.time")).toEqual({ "log.time": "720.5" });
+  expect(written(sections, {}, reading, "log.maxTe")).toEqual({ "log.maxTe": "87.3" });
+  expect(written(sections, {}, reading, "log.mean")).toEqual({});
+});

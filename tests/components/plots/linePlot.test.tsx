@@ -33,6 +33,14 @@ test("is one tab stop that says what is found and what the cursor reads", async 
   expect(reading()).toBe("One peak above the threshold. 10 chip, power 8");
 });
 
+test("a missing value under the cursor is drawn nowhere, and the cursor stands at the foot", () => {
+  const curves = [{ name: "power", x: [0, 1, 2], y: [5, NaN, 6] }];
+  const { container } = render(
+    <LinePlot {...AXES} curves={curves} summary="A gap." cursor={{ index: 1, lines: () => ["no reading"] }} />,
+  );
+  expect(container.innerHTML).not.toContain("NaN");
+});
+
 test.each([
   ["{ArrowRight}", 11],
   ["{ArrowLeft}", 9],
