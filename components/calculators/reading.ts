@@ -15,4 +15,6 @@ export type Reading = {
   semiMajorM?: number;
   semiMinorM?: number;
   azimuthDeg?: number;
+  /** hh:mm:ss */
+  utc?: string;
 };

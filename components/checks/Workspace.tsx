@@ -1,6 +1,8 @@
 "use client";
+import type { ComponentProps } from "react";
 import { CaptureSearch } from "@/components/calculators/CaptureSearch";
 import type { Reading } from "@/components/calculators/reading";
+import { ReceiverLog } from "@/components/calculators/ReceiverLog";
 import { StandingCalculator } from "@/components/calculators/StandingCalculator";
 import { TraceReader } from "@/components/calculators/TraceReader";
 import { SectionHead } from "@/components/ui/SectionHead";
@@ -22,6 +24,7 @@ type CaptureData = {
   windowHz?: number;
   search?: { dopplerHalfWidthHz: number };
 };
+type LogData = Pick<ComponentProps<typeof ReceiverLog>, "log" | "gainDb" | "currentMa">;
 type TraceData = { trace: number[]; stepChips: number };
 
 const ALL_PRNS = Array.from({ length: 32 }, (_, index) => index + 1);
@@ -77,6 +80,10 @@ export function Workspace({ view, filesAddress, onTake }: WorkspaceProps) {
       return <PatrolLog data={view.data as PatrolData} onTake={onTake} />;
     case "pulse-acceptance":
       return <PulseAcceptanceWork data={view.data as PulseAcceptanceData} onTake={onTake} />;
+    case "lost-decibels": {
+      const { log, gainDb, currentMa } = view.data as LogData;
+      return <ReceiverLog log={log} gainDb={gainDb} currentMa={currentMa} onTake={onTake} />;
+    }
     default:
       return <p className="text-dense text-ink-2">Work with the files of this case and type your answers.</p>;
   }

@@ -22,6 +22,10 @@ const PARTS: Readonly<Record<string, (reading: Reading) => string | null>> = {
 const WHEN_OPEN: typeof PARTS = {
   ...PARTS,
   parent: PARTS.prn!,
+  start: ({ utc }) => utc ?? null,
+  stop: ({ utc }) => utc ?? null,
+  azimuthFrom: ({ azimuthDeg }) => text(azimuthDeg, 0),
+  azimuthTo: ({ azimuthDeg }) => text(azimuthDeg, 0),
   lead: ({ timeNs }) => text(timeNs, 1),
   end: ({ timeNs }) => text(timeNs, 1),
   time: ({ timeS }) => (timeS === undefined ? null : text(timeS / 60, 1)),

@@ -124,3 +124,16 @@ test("without a cursor it is a picture with its finding as text, and still has i
   await userEvent.click(screen.getByRole("button", { name: "Values as a table" }));
   expect(screen.getByRole("table")).toBeTruthy();
 });
+
+// A log with a gap put NaN into the drawing when the cursor came into it.
+test("where there is no reading the cursor stands on the axis", () => {
+  const { container } = render(
+    <LinePlot
+      {...AXES}
+      curves={[{ name: "power", x: X, y: X.map(() => NaN) }]}
+      summary="Nothing was read."
+      cursor={{ index: 5, lines: () => ["no reading"] }}
+    />,
+  );
+  expect(container.innerHTML).not.toContain("NaN");
+});
