@@ -4,6 +4,7 @@ import { correlatorReading } from "./correlator-reading/correlatorReading";
 import { delayEntry } from "./delay-entry/delayEntry";
 import { falseLock } from "./false-lock/falseLock";
 import { formula } from "./formula/formula";
+import { jammedOrNot } from "./jammed-or-not/jammedOrNot";
 import type { CheckKind } from "./kind";
 import { locate } from "./locate/locate";
 import { lostDecibels } from "./lost-decibels/lostDecibels";
@@ -27,6 +28,7 @@ export const KINDS: readonly CheckKind[] = [
   skyView,
   standOff,
   locate,
+  jammedOrNot,
   delayEntry,
   pulseAcceptance,
   formula,

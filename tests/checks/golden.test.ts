@@ -5,6 +5,7 @@ import { correlatorReading } from "@/lib/checks/correlator-reading/correlatorRea
 import { delayEntry } from "@/lib/checks/delay-entry/delayEntry";
 import { falseLock } from "@/lib/checks/false-lock/falseLock";
 import { publicCase as falseLockCase } from "@/lib/checks/false-lock/publicCase";
+import { jammedOrNot } from "@/lib/checks/jammed-or-not/jammedOrNot";
 import { locate } from "@/lib/checks/locate/locate";
 import { lostDecibels } from "@/lib/checks/lost-decibels/lostDecibels";
 import { drawScene } from "@/lib/checks/satellites/drawScene";
@@ -115,5 +116,12 @@ describe("lost-decibels@1", () => {
   const plan = planOf(lostDecibels);
   test.each(list(GOLDEN.lostDecibels))("seed %i", (n, hash) =>
     expect(goldenOf(lostDecibels.build(seedOf(n), plan))).toBe(hash),
+  );
+});
+
+describe("jammed-or-not@1", () => {
+  const plan = planOf(jammedOrNot);
+  test.each(list(GOLDEN.jammedOrNot))("seed %i", (n, hash) =>
+    expect(goldenOf(jammedOrNot.build(seedOf(n), plan))).toBe(hash),
   );
 });

@@ -81,6 +81,7 @@ test("every kind, found by name and version", () => {
     "E3 sky-view@1",
     "F2 stand-off@1",
     "F4 locate@1",
+    "F5 jammed-or-not@1",
     "H1 delay-entry@1",
     "H3 pulse-acceptance@1",
     " formula@1",
@@ -110,6 +111,7 @@ test("critical is what alone makes the work worthless", () => {
     "E1 feed",
     "E3 choice",
     "F4 action",
+    "F5 verdict",
     "H1 entry",
     "H3 verdict",
   ]);

@@ -1,9 +1,7 @@
 import { turnDeg, wrapDeg, type Readings } from "@/lib/gnss/sky/receiverLog";
 import type { Random } from "@/lib/numeric/random";
 import type { SkyPass, SkyTimes } from "../receiver-log/drawSky";
-
-/** Clockwise from `fromDeg` to `toDeg`, which may be beyond north. */
-export type Sector = { fromDeg: number; toDeg: number };
+import type { Sector } from "../receiver-log/sector";
 
 /** What stands in the sector reaches so far up; satellites above it are not touched. */
 export const BLOCKED_BELOW_DEG = 60;
@@ -12,9 +10,6 @@ const LOWEST_SEEN_DEG = 10;
 /** So far to either side of an edge a satellite must have been seen, or nobody could tell where it is. */
 const EDGE_SEEN_DEG = 3;
 const TRIES = 60;
-
-export const isInSector = ({ fromDeg, toDeg }: Sector, azimuthDeg: number): boolean =>
-  wrapDeg(azimuthDeg - fromDeg) <= wrapDeg(toDeg - fromDeg);
 
 /** A sector with two edges that can be read from the log, or null when these tracks show none of such a width. */
 export function drawSector(

@@ -3,7 +3,8 @@ import type { Random } from "@/lib/numeric/random";
 import { between } from "../drawSatellite";
 import { lengthOf, type SkyPass, type SkyTimes } from "../receiver-log/drawSky";
 import { LOWEST_TRACKED_DBHZ, patternDbHz, type Loss, type Pattern } from "../receiver-log/levels";
-import { BLOCKED_BELOW_DEG, drawSector, isInSector, type Sector } from "./blockedSector";
+import { isInSector, type Sector } from "../receiver-log/sector";
+import { BLOCKED_BELOW_DEG, drawSector } from "./blockedSector";
 import type { LostDecibelsParameters } from "./parameters";
 import type { Cause } from "./quantities";
 

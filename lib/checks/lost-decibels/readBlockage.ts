@@ -1,6 +1,6 @@
 import { directionAt, wrapDeg, type Pass, type ReceiverLog, type Readings } from "@/lib/gnss/sky/receiverLog";
 import { BLOCKED_BELOW_DEG } from "./blockedSector";
-import { findSteps, type Step } from "./findSteps";
+import { findSteps, type Step } from "../receiver-log/findSteps";
 
 export type BlockageReading = { readings: Readings; fromDeg: number; toDeg: number };
 

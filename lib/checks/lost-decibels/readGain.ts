@@ -1,6 +1,6 @@
 import type { Readings } from "@/lib/gnss/sky/receiverLog";
 import { fitLine, mean } from "@/lib/numeric/statistics";
-import { findSteps } from "./findSteps";
+import { findSteps } from "../receiver-log/findSteps";
 
 /** What the gain control did: stepped, crept, or nothing. */
 export type GainReading = { change: "up" | "down" | "creeps" | "none"; readings: Readings | null; byDb: number };

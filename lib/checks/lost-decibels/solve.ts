@@ -1,6 +1,6 @@
 import { bandMeans, directionAt, utcOf, wrapDeg, type ReceiverLog, type Readings } from "@/lib/gnss/sky/receiverLog";
 import type { Answers, PublicCase } from "../kind";
-import { isInSector } from "./blockedSector";
+import { isInSector } from "../receiver-log/sector";
 import type { Cause } from "./quantities";
 import { readBlockage } from "./readBlockage";
 import { depthOfCreep, depthOfStep } from "./readDepth";

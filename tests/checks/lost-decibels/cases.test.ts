@@ -1,7 +1,7 @@
 import { describe, expect, test } from "vitest";
-import { isInSector } from "@/lib/checks/lost-decibels/blockedSector";
 import { shareAt } from "@/lib/checks/lost-decibels/drawFault";
 import { lostDecibels as kind } from "@/lib/checks/lost-decibels/lostDecibels";
+import { isInSector } from "@/lib/checks/receiver-log/sector";
 import { bandMeans, directionAt } from "@/lib/gnss/sky/receiverLog";
 import { seededRandom } from "@/lib/numeric/random";
 import { planOf, seeds } from "../planOf";
