@@ -37,7 +37,7 @@ export function drawColumns(random: Random, { intervalS, readings }: SkyTimes, e
     Array.from({ length: readings }, (_, reading) => {
       const noisy = noise * (reading >= event.first ? noisier : 1);
       const unit = decimals === 1 ? 10 : 100;
-      return Math.round(unit * (value(reading) + noisy * random.gaussian())) / unit;
+      return Math.round(unit * (value(reading) + noisy * random.gaussian())) / unit + 0; // no minus zero
     });
   const pulledS = (reading: number) => Math.max(0, reading - event.pullsFrom) * intervalS;
   const isPulled = (reading: number) => reading > event.pullsFrom;
