@@ -11,6 +11,7 @@ export type PromptData = { channels: readonly { prn: number; i: readonly number[
 
 const WINDOW_MS = 200; // ten data bits
 const STEP_MS = 10;
+const NAMES_AT = 0.86; // of the height, above most of the noise
 
 /** The prompts of one channel: I and Q against time, and one against the other. Nothing is estimated here. */
 export function PromptView({ data: { channels } }: { data: PromptData }) {
@@ -35,18 +36,25 @@ export function PromptView({ data: { channels } }: { data: PromptData }) {
         name="channel"
         label="Channel"
         showLabel
-        choices={channels.map((channel, n) => ({ value: String(n), label: `${n + 1}: PRN ${channel.prn}` }))}
+        choices={channels.map((_, n) => ({ value: String(n), label: String(n + 1) }))}
         value={String(chosen)}
         onChange={(value) => setChosen(Number(value))}
       />
       <section>
-        <h3 className="text-h3">{`I and Q of PRN ${prn}`}</h3>
+        <h3 className="text-h3">{`I and Q of channel ${chosen + 1}, PRN ${prn}`}</h3>
         <LinePlot
           x={{ name: "time, ms", from: fromMs, to: fromMs + WINDOW_MS }}
           y={axis("prompt, counts")}
           curves={[
-            { name: "I", role: "subject", x: shown.times, y: shown.i },
-            { name: "Q", role: "comparison", tone: "minus", x: shown.times, y: shown.q },
+            { name: "I", role: "subject", x: shown.times, y: shown.i, nameAt: { x: fromMs + 4, y: NAMES_AT * reach } },
+            {
+              name: "Q",
+              role: "comparison",
+              tone: "minus",
+              x: shown.times,
+              y: shown.q,
+              nameAt: { x: fromMs + 14, y: NAMES_AT * reach },
+            },
           ]}
           columns={columns}
           summary={`I in blue and Q in red of PRN ${prn}, one prompt a millisecond, from ${span}.`}

@@ -19,7 +19,7 @@ export const cn0Quantities: readonly QuantityDefinition[] = [
     tolerance: { value: 1, unit: "dB" },
     toleranceRange: { from: 0.6, to: 1, unit: "dB" },
     critical: false,
-    reason: "Narrow over wide power scatters by 0.1 to 0.2 dB over 2 s; below 33 dB-Hz twice the tolerance is allowed.",
+    reason: "A sound method scatters by 0.1 to 0.2 dB over 2 s; below 33 dB-Hz twice the tolerance is allowed.",
   },
   {
     id: "method",
@@ -29,7 +29,7 @@ export const cn0Quantities: readonly QuantityDefinition[] = [
     tolerance: null,
     toleranceRange: null,
     critical: false,
-    reason: "On the weakest channel single prompts are mostly noise: only sums over whole bits can be relied on.",
+    reason: "Not every method holds where a single prompt is mostly noise.",
   },
 ];
 

@@ -53,7 +53,7 @@ function baseLag(truth: SidePeakTruth, answers: Answers): { chips: number; words
 
 function biasError(value: number, computed: number, toleranceM: number): Finding["errorClass"] {
   const near = (wrong: number) => Math.abs(value - wrong) <= toleranceM;
-  if (near(-computed)) return "sign";
+  if (Math.abs(computed) > 2 * toleranceM && near(-computed)) return "sign";
   if (near(chipsToMetres(1)) || near(-chipsToMetres(1))) return "whole chip for half a chip";
   if (near(0)) return "bias left out";
   return null;

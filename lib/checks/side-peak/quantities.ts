@@ -44,7 +44,7 @@ export const sidePeakQuantities: readonly QuantityDefinition[] = [
     tolerance: { value: 5, unit: "m" },
     toleranceRange: { from: 3, to: 15, unit: "m" },
     critical: false,
-    reason: "Two readings of a trace, each good to a few points of 1.5 m.",
+    reason: "Read from the trace, judged from your own lag of the main peak; points are 1.5 m apart.",
   },
   {
     id: "sideLevel",

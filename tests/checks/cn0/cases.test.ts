@@ -105,3 +105,10 @@ test("people measure within the tolerances, guesses do not meet it", () => {
   expect(read).toBe(14);
   expect(guessed).toBe(0);
 });
+
+// The reasons beside the tolerances once named the right method.
+test("nothing that is shown says which method is sound, but for the list itself", () => {
+  const { sections, ...shown } = built[0].built.publicCase;
+  expect(sections[0]?.fields.at(-1)?.choices).toHaveLength(5);
+  expect(JSON.stringify({ ...shown, data: null })).not.toMatch(/narrow|wide power|whole|moment|sums/i);
+});

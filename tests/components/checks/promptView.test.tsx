@@ -15,9 +15,9 @@ const rows = () =>
 
 test("shows I and Q of the first channel, 200 ms of it, and of another when it is chosen", async () => {
   shown();
-  expect(screen.getByRole("heading", { name: `I and Q of PRN ${truth.channels[0]!.prn}` })).toBeTruthy();
-  await userEvent.click(screen.getByRole("radio", { name: `3: PRN ${truth.channels[2]!.prn}` }));
-  expect(screen.getByRole("heading", { name: `I and Q of PRN ${truth.channels[2]!.prn}` })).toBeTruthy();
+  expect(screen.getByRole("heading", { name: `I and Q of channel 1, PRN ${truth.channels[0]!.prn}` })).toBeTruthy();
+  await userEvent.click(screen.getByRole("radio", { name: "3" }));
+  expect(screen.getByRole("heading", { name: `I and Q of channel 3, PRN ${truth.channels[2]!.prn}` })).toBeTruthy();
   expect(screen.getByRole("img", { name: /^Q against I of PRN .* 200 prompts from 0 to 200 ms\.$/ })).toBeTruthy();
 });
 
