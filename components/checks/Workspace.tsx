@@ -2,6 +2,7 @@
 import type { ComponentProps } from "react";
 import { CaptureSearch } from "@/components/calculators/CaptureSearch";
 import type { Reading } from "@/components/calculators/reading";
+import { InstrumentLog, type InstrumentData } from "@/components/calculators/InstrumentLog";
 import { ReceiverLog } from "@/components/calculators/ReceiverLog";
 import { StandingCalculator } from "@/components/calculators/StandingCalculator";
 import { TraceReader } from "@/components/calculators/TraceReader";
@@ -80,6 +81,8 @@ export function Workspace({ view, filesAddress, onTake }: WorkspaceProps) {
       return <PatrolLog data={view.data as PatrolData} onTake={onTake} />;
     case "pulse-acceptance":
       return <PulseAcceptanceWork data={view.data as PulseAcceptanceData} onTake={onTake} />;
+    case "jammed-or-not":
+      return <InstrumentLog data={view.data as InstrumentData} onTake={onTake} />;
     case "lost-decibels": {
       const { log, gainDb, currentMa } = view.data as LogData;
       return <ReceiverLog log={log} gainDb={gainDb} currentMa={currentMa} onTake={onTake} />;
