@@ -3,6 +3,7 @@ import { useMemo, useState } from "react";
 import { BarPlot } from "@/components/plots/BarPlot";
 import { LinePlot } from "@/components/plots/LinePlot";
 import { formatNumber } from "@/components/ui/formatNumber";
+import { Notice } from "@/components/ui/Notice";
 import { Ledger } from "@/components/ui/Ledger";
 import type { SampleFacts } from "@/lib/formats/describeSamples";
 import type { Spectrum } from "@/lib/gnss/interference/spectrum";
@@ -39,13 +40,25 @@ export function CaptureFacts({ description }: { description: CaptureDescription 
             value: Number.isFinite(facts.levelDb) ? `${formatNumber(facts.levelDb, 1, true)} dB` : "silence",
             detail: percent === null ? "against 1" : "against the largest value of the format",
           },
+          ...(description.hash ? [hashRow(description.hash)] : []),
         ]}
       />
+      {description.hash === "differs" && (
+        <Notice tone="minus" fact="These are not the samples that the metadata were written for." live>
+          Their SHA-512 differs from core:sha512. The file is shown as it is; as evidence it does not serve.
+        </Notice>
+      )}
       {facts.rms > 0 && <SpectrumPlot spectrum={spectrum} />}
       <ValuesPlot facts={facts} />
     </>
   );
 }
+
+const hashRow = (hash: "fits" | "differs" | "cannot be checked") => ({
+  label: "SHA-512",
+  value: hash,
+  detail: hash === "cannot be checked" ? "browsers do so on pages that come by HTTPS" : "core:sha512 of the metadata",
+});
 
 function SpectrumPlot({ spectrum }: { spectrum: Spectrum }) {
   const [index, setIndex] = useState<number | null>(null);

@@ -40,7 +40,7 @@ export function LogEntry({ log, onChange, problem }: LogEntryProps) {
       onDrop={drop}
       className={over ? "bg-plus-wash" : undefined}
     >
-      <SectionHead title="The log" note="stays on this page and is not part of the link" />
+      <SectionHead title="The log" note="kept while this page is open; the link cannot carry it" />
       {log.name !== null ? (
         <p className="mt-3 flex flex-wrap items-center gap-4">
           <span className="font-semibold">{log.name}</span>

@@ -15,11 +15,16 @@ import { usePulseReport } from "./usePulseReport";
 import type { PulseAnswer } from "./workers/pulse.worker";
 
 const KEYS = ["source", "clock", "triggers", "offsetNs"] as const;
-const NO_LOG: PastedLog = { name: null, text: "" };
+/** The log of this page, for as long as the page is open: whoever looks at another calculator meanwhile finds it again. */
+let kept: PastedLog = { name: null, text: "" };
 
-/** A log of time errors against the limits of a class of clocks. The log stays on this page. */
+/** A log of time errors against the limits of a class of clocks. The log stays on this page, whose address cannot hold it. */
 export function PulseLog({ values, onChange }: CalculatorProps<typeof PULSE_ERROR>) {
-  const [log, setLog] = useState<PastedLog>(NO_LOG);
+  const [log, setLog] = useState(kept);
+  const take = (next: PastedLog) => {
+    kept = next;
+    setLog(next);
+  };
   const { clock, offsetNs, triggers } = values;
   const answer = usePulseReport({ text: log.text, clock, offsetNs, leaveOut: triggers === "leave-out" });
   const found = answer?.kind === "report" ? answer : null;
@@ -31,7 +36,7 @@ export function PulseLog({ values, onChange }: CalculatorProps<typeof PULSE_ERRO
       below={
         <LogEntry
           log={log}
-          onChange={setLog}
+          onChange={take}
           problem={answer?.kind === "refused" ? `Line ${answer.line}: ${answer.message}` : null}
         />
       }

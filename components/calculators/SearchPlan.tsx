@@ -9,6 +9,7 @@ import { CalculatorFrame } from "./CalculatorFrame";
 import type { CalculatorProps } from "./calculatorProps";
 import { Formula } from "./Formula";
 import { Reading } from "./Reading";
+import { startPlanWorker } from "./startWorkers";
 import { texNumber } from "./texNumber";
 import type { PlanAnswer, PlanInputs } from "./workers/plan.worker";
 
@@ -108,7 +109,7 @@ function usePlan(inputs: PlanInputs): PlanAnswer | null {
   const asked = useRef(new Map<number, PlanInputs>());
   const [answer, setAnswer] = useState<PlanAnswer | null>(null);
   useEffect(() => {
-    const own = new Worker(new URL("./workers/plan.worker.ts", import.meta.url), { type: "module" });
+    const own = startPlanWorker();
     const waiting = asked.current;
     own.addEventListener("message", ({ data }: MessageEvent<PlanAnswer>) => {
       const question = waiting.get(data.run);

@@ -2,6 +2,7 @@
 import { useEffect, useRef, useState } from "react";
 import type { FALSE_LOCK } from "@/lib/calculators/falseLock";
 import type { ValuesOf } from "@/lib/calculators/calculator";
+import { startFalseLockWorker } from "./startWorkers";
 import type { FalseLockAnswer, FalseLockRequest } from "./workers/falseLock.worker";
 
 export type FalseLockInputs = ValuesOf<typeof FALSE_LOCK>;
@@ -13,7 +14,7 @@ export function useFalseLock(inputs: FalseLockInputs): FalseLocks | null {
   const newest = useRef<{ run: number; inputs: FalseLockInputs }>({ run: 0, inputs });
   const [answer, setAnswer] = useState<FalseLocks | null>(null);
   useEffect(() => {
-    const own = new Worker(new URL("./workers/falseLock.worker.ts", import.meta.url), { type: "module" });
+    const own = startFalseLockWorker();
     own.addEventListener("message", ({ data: { run, ...found } }: MessageEvent<FalseLockAnswer>) => {
       if (run === newest.current.run) setAnswer({ ...found, inputs: newest.current.inputs });
     });

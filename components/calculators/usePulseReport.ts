@@ -1,4 +1,5 @@
 import { useEffect, useRef, useState } from "react";
+import { startPulseWorker } from "./startWorkers";
 import type { PulseAnswer, PulseQuestion } from "./workers/pulse.worker";
 
 /** The newest answer to a log; null while there is none, and for an empty log. A day of readings takes a while: in a worker. */
@@ -7,7 +8,7 @@ export function usePulseReport({ text, clock, leaveOut, offsetNs }: PulseQuestio
   const run = useRef(0);
   const [answer, setAnswer] = useState<PulseAnswer | null>(null);
   useEffect(() => {
-    const own = new Worker(new URL("./workers/pulse.worker.ts", import.meta.url), { type: "module" });
+    const own = startPulseWorker();
     own.addEventListener("message", ({ data }: MessageEvent<PulseAnswer>) => {
       if (data.run === run.current) setAnswer(data);
     });

@@ -1,6 +1,7 @@
 import { gridOverview, type GridOverview } from "@/components/plots/gridOverview";
 import { falsePeaks, type FalseLockQuestion, type FalsePeak } from "@/lib/gnss/falseLock";
 import { falsePeakMap, type FalsePeakMap } from "@/lib/gnss/falsePeakMap";
+import "./tellFiles";
 
 export type FalseLockRequest = { run: number; question: FalseLockQuestion };
 export type FalseLockAnswer = { run: number; peaks: FalsePeak[]; map: FalsePeakMap; overview: GridOverview };

@@ -1,5 +1,6 @@
 import { planPerformance, type PlanPerformance } from "@/lib/gnss/searchPlan";
 import { seededRandom } from "@/lib/numeric/random";
+import "./tellFiles";
 
 export type PlanInputs = {
   cn0DbHz: number;

@@ -1,6 +1,7 @@
 import { FormatError } from "@/lib/formats/FormatError";
 import { readTimeErrorLog } from "@/lib/formats/readTimeErrorLog";
 import { pulseReport, type PulseClock, type PulseReport } from "@/lib/gnss/timing/pulseReport";
+import "./tellFiles";
 
 export type PulseQuestion = { text: string; clock: PulseClock; leaveOut: boolean; offsetNs: number };
 export type PulseAnswer =

@@ -6,7 +6,8 @@ import { pairOf } from "@/components/calculators/CaptureChooser";
 import { CaptureView } from "@/components/calculators/CaptureView";
 import { gridOverview } from "@/components/plots/gridOverview";
 import type { CaptureAnswer, CaptureOrder } from "@/components/calculators/workers/capture.worker";
-import { startValues } from "@/lib/calculators/calculator";
+import { shownSpectrogram } from "@/components/calculators/shownSpectrogram";
+import { startValues, type ValuesOf } from "@/lib/calculators/calculator";
 import { CAPTURE_VIEW } from "@/lib/calculators/captureView";
 import { describeSamples } from "@/lib/formats/describeSamples";
 import { sampleFormatNamed } from "@/lib/formats/sampleFormat";
@@ -38,8 +39,22 @@ class AnsweringWorker {
     const answer = (message: CaptureAnswer) => this.listen({ data: message });
     if (source.data.name.startsWith("broken"))
       return answer({ job, kind: "refused", message: "byte 40: the samples end in the middle of one." });
-    const description = { name: source.data.name, format: "cf32_le", rateHz: 4.092e6, carrierHz: 0, facts, spectrum };
-    answer({ job, kind: "opened", description });
+    const readAsTyped = source.meta ? [] : (["format", "rateHz", "carrierHz"] as const);
+    const hash = source.meta ? "differs" : null;
+    const read = {
+      name: source.data.name,
+      format: "cf32_le",
+      rateHz: 4.092e6,
+      carrierHz: 0,
+      readAsTyped,
+      hash,
+    } as const;
+    answer({ job, kind: "opened", description: { ...read, facts, spectrum } });
+    if (task.kind === "spectrogram") {
+      if (task.stretch.fromS > 0.012)
+        return answer({ job, kind: "refused", message: "stretchSpectrogram: 32 samples at least, got 0 from 1 s on" });
+      answer({ job, kind: "spectrogram", shown: shownSpectrogram(capture, task.stretch) });
+    }
     if (task.kind === "all") return answer({ job, kind: "progress", step: "search", done: 3, total: 57 });
     if (task.kind === "one") {
       const map = searchMap(capture, searchSignalOf(gpsL1Ca), task.prn, task.request);
@@ -65,8 +80,15 @@ afterEach(() => {
   vi.restoreAllMocks();
 });
 
-const shown = (prn: number) =>
-  render(<CaptureView values={{ ...startValues(CAPTURE_VIEW), prn }} onChange={() => {}} />).container;
+type Values = ValuesOf<typeof CAPTURE_VIEW>;
+const view = (values: Partial<Values>) => (
+  <CaptureView values={{ ...startValues(CAPTURE_VIEW), ...values }} onChange={() => {}} />
+);
+const shown = (prn: number, values: Partial<Values> = {}) => {
+  const { rerender } = render(view({ prn, ...values }));
+  orders = []; // of a file that lay open before
+  return (changed: Partial<Values>) => rerender(view({ prn, ...changed }));
+};
 const choose = (...names: string[]) =>
   fireEvent.change(screen.getByLabelText("Recording"), {
     target: { files: names.map((name) => new File(["x"], name)) },
@@ -100,6 +122,48 @@ test("a satellite that is not there does not pass", async () => {
   choose("roof.bin");
   await userEvent.setup().click(screen.getByRole("button", { name: "Search PRN 20" }));
   expect(screen.getByText("PRN 20 does not pass the threshold")).toBeTruthy();
+});
+
+test("a change of what is typed in is read at once; what the metadata say is not asked for", () => {
+  const change = shown(12);
+  choose("roof.bin");
+  change({ format: "ci16_le", rateMHz: 2.046 });
+  expect(orders.filter(({ task }) => task.kind === "open").map(({ source }) => source.typed)).toEqual([
+    { format: "ci8", rateHz: 4.092e6, carrierHz: 0 },
+    { format: "ci16_le", rateHz: 2.046e6, carrierHz: 0 },
+  ]);
+  choose("roof.sigmf-meta", "roof.sigmf-data");
+  expect(screen.queryByLabelText(/Sample rate/)).toBeNull();
+  orders = [];
+  change({ format: "cu8" });
+  expect(orders).toEqual([]);
+});
+
+test("the file is there again after another calculator was looked at", () => {
+  shown(12);
+  choose("north.bin");
+  cleanup();
+  render(view({}));
+  expect(screen.getByText("north.bin")).toBeTruthy();
+});
+
+test("a hash that differs is told, and the recording is shown all the same", () => {
+  shown(12);
+  choose("roof.sigmf-meta", "roof.sigmf-data");
+  expect(screen.getByText(/not the samples that the metadata were written for/)).toBeTruthy();
+  expect(screen.getByText("Spectrum")).toBeTruthy();
+});
+
+// 12 ms at 4.092 MHz are 49 104 samples, 222 squared: 256 points, two bins of 16 kHz (Harris, 1978).
+test("the spectrogram says its resolution, and a stretch beyond the end is refused in words", async () => {
+  const change = shown(12);
+  choose("roof.bin");
+  const plot = screen.getByRole("application", { name: /^Spectrogram of the recording/ });
+  expect(screen.getByText(/^Resolution 32\.\d\d kHz and 0\.\d+ ms/)).toBeTruthy();
+  fireEvent.keyDown(plot, { key: "Home" });
+  expect(plot.getAttribute("aria-label")).toMatch(/\u22122\.046 MHz, \d+\.\d+ ms, [+\u2212]\d+\.\d dB$/);
+  change({ fromMs: 1000 });
+  expect(screen.getByText(/^32 samples at least, got 0/)).toBeTruthy();
 });
 
 test("a long search tells how far it is and can be stopped", async () => {

@@ -87,3 +87,14 @@ test("a file is read and named, and can be taken out", async () => {
   await user.click(screen.getByRole("button", { name: "Take the log out" }));
   expect(screen.getByText("No log yet")).toBeTruthy();
 });
+
+test("the log is there again after another calculator was looked at", async () => {
+  const user = userEvent.setup();
+  shown({ source: "log" });
+  await user.click(screen.getByRole("textbox", { name: /Time and time error/ }));
+  await user.paste("0 1\n1 2\n2 4");
+  cleanup();
+  shown({ source: "log" });
+  expect(screen.getByRole("textbox", { name: /Time and time error/ })).toHaveProperty("value", "0 1\n1 2\n2 4");
+  expect(asked.at(-1)).toMatchObject({ text: "0 1\n1 2\n2 4" });
+});

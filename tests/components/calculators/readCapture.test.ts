@@ -1,3 +1,4 @@
+import { createHash } from "node:crypto";
 import { expect, test } from "vitest";
 import { readCapture, type CaptureSource } from "@/components/calculators/readCapture";
 
@@ -41,6 +42,28 @@ test("metadata say type, rate, place of L1 and where the samples begin", async (
   };
   const { format, rateHz, carrierHz, facts } = (await read(source)).description;
   expect([format, rateHz, carrierHz, facts.samples]).toEqual(["ri16_le", 5e6, 1e6, 4096]);
+});
+
+// SigMF specification 1.2: core:sha512 is of all bytes of the file; the reference is the runtime's own hash.
+test("a hash is held against the bytes, and the data are read whatever it says", async () => {
+  const data = file("x.sigmf-data", quarter());
+  const sha512 = createHash("sha512").update(quarter()).digest("hex");
+  const described = async (given: string) =>
+    (await read({ data, meta: meta({ "core:datatype": "ci8", "core:sha512": given }), typed })).description;
+  expect((await described(sha512)).hash).toBe("fits");
+  expect((await described(sha512.toUpperCase())).hash).toBe("fits");
+  const wrong = await described("ab".repeat(64));
+  expect([wrong.hash, wrong.facts.samples]).toEqual(["differs", 4096]);
+  expect((await read({ data, meta: null, typed })).description.hash).toBeNull();
+});
+
+test("says what of the typed in it was read with", async () => {
+  const used = async (source: Omit<CaptureSource, "typed" | "data">) =>
+    (await read({ data: file("x.bin", quarter()), typed, ...source })).description.readAsTyped;
+  expect(await used({ meta: null })).toEqual(["format", "rateHz", "carrierHz"]);
+  expect(await used({ meta: meta({ "core:datatype": "ci8" }) })).toEqual(["rateHz", "carrierHz"]);
+  const whole = meta({ "core:datatype": "ci8", "core:sample_rate": 5e6 }, { "core:frequency": 1575.42e6 });
+  expect(await used({ meta: whole })).toEqual([]);
 });
 
 test("faults are told by position", async () => {

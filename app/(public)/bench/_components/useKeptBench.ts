@@ -1,6 +1,8 @@
 import { useEffect } from "react";
+import { filesOfWorkers } from "@/components/calculators/startWorkers";
 
 const SETTLED_MS = 1500; // scripts that the open calculator asks for have come by then
+const SCRIPT = "/bench-worker.js";
 
 /**
  * Lets the browser keep the bench for use without a network: the service worker is told which scripts this page is made of,
@@ -16,9 +18,13 @@ export function useKeptBench(): void {
 
 async function keepBench(): Promise<void> {
   try {
-    await navigator.serviceWorker.register("/bench-worker.js", { scope: "/bench" });
+    await navigator.serviceWorker.register(SCRIPT, { scope: "/bench" });
+    // A calculator's own worker is answered by its own address, not by that of the page that starts it.
+    await navigator.serviceWorker.register(SCRIPT, { scope: STATIC });
     const { active } = await navigator.serviceWorker.ready;
-    const files = loadedFiles();
+    await idle();
+    await Promise.allSettled(fontsOfFormulas().map((font) => font.load()));
+    const files = [...new Set([...loadedFiles(), ...(await filesOfWorkers())])];
     active?.postMessage({ kind: "keep", version: versionOf(builtFiles()), files });
   } catch {
     // Private windows and some settings forbid it: the bench then needs its network.
@@ -26,6 +32,14 @@ async function keepBench(): Promise<void> {
 }
 
 const STATIC = "/_next/static/";
+
+const idle = () =>
+  new Promise<unknown>((resolve) =>
+    "requestIdleCallback" in window ? requestIdleCallback(resolve, { timeout: 10_000 }) : setTimeout(resolve, 0),
+  );
+
+/** Of all calculators, whichever are open: a formula asks for its fonts when it is seen. */
+const fontsOfFormulas = () => [...document.fonts].filter(({ family }) => /KaTeX_(Main|Math|AMS|Size)/.test(family));
 
 /** Scripts, styles and fonts that have come so far. */
 function loadedFiles(): string[] {
