@@ -1,7 +1,7 @@
 /*
  * Keeps the bench for use without a network: its page and its scripts and nothing else. Registered by the bench alone, for
- * addresses that begin with /bench. A version is named after the scripts of one build; an older one is thrown away when a
- * newer one is whole.
+ * addresses that begin with /bench and, since that is what the calculators' own workers are, for those of scripts. A version
+ * is named after the scripts of one build; an older one is thrown away when a newer one is whole.
  */
 const PREFIX = "bench-";
 const PAGE = "/bench";
@@ -47,5 +47,11 @@ async function pageOf(request) {
   }
 }
 
-/** Scripts carry a hash of their content in the name: what is kept is what would come. */
-const scriptOf = async (request) => (await caches.match(request)) ?? fetch(request);
+/**
+ * Scripts carry a hash of their content in the name: what is kept is what would come. A calculator's worker finds its other
+ * scripts in its own address, which a kept answer would replace by the one it was fetched under; a new answer has none.
+ */
+async function scriptOf(request) {
+  const kept = await caches.match(request, { ignoreSearch: true });
+  return kept ? new Response(kept.body, { status: kept.status, headers: kept.headers }) : fetch(request);
+}

@@ -118,7 +118,7 @@ export const CAPTURE_VIEW = {
       input: "number",
       key: "lengthMs",
       attribute: "length",
-      label: "over",
+      label: "Spectrogram over",
       help: "how much of the recording the spectrogram shows",
       unit: "ms",
       from: 0.1,

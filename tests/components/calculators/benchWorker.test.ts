@@ -87,3 +87,15 @@ test("does not keep what is no script of ours, nor a page that failed", async ()
   expect([...stored.get("bench-new")!.keys()]).toEqual(FILES);
   expect(stored.has("bench-old")).toBe(true);
 });
+
+test("a kept script is a new answer: a worker's own address, which names its other scripts, stays what was asked for", async () => {
+  await kept("new", FILES);
+  const answer = new Response("worker");
+  Object.defineProperty(answer, "url", { value: `${ORIGIN}/_next/static/worker.js` });
+  stored.get("bench-new")!.set("/_next/static/worker.js", answer);
+  let given: Promise<Response> | null = null;
+  const request = { url: `${ORIGIN}/_next/static/worker.js#params=a`, mode: "same-origin", method: "GET" };
+  listeners.fetch({ request, respondWith: (work: Promise<Response>) => (given = work) });
+  expect((await given!).url).toBe("");
+  expect(await (await given!).text()).toBe("worker");
+});
