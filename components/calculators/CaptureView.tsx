@@ -55,6 +55,27 @@ export function CaptureView({ values, onChange }: CalculatorProps<typeof CAPTURE
           </div>
         </>
       }
+      below={
+        description && (
+          <div className="grid grid-cols-1 gap-5">
+            <CaptureFacts description={description} />
+            {description.facts.rms > 0 && (
+              <CaptureSpectrogram
+                shown={drawn.spectrogram}
+                refused={drawn.spectrogramRefused}
+                fields={
+                  <CalculatorFields
+                    of={CAPTURE_VIEW}
+                    keys={["fromMs", "lengthMs"]}
+                    values={values}
+                    onChange={onChange}
+                  />
+                }
+              />
+            )}
+          </div>
+        )
+      }
       more={one && <PlaceReadings one={one} />}
       working={
         <Formula
@@ -78,16 +99,6 @@ export function CaptureView({ values, onChange }: CalculatorProps<typeof CAPTURE
       )}
       {one && <FoundGrid one={one} busy={busy !== null} />}
       {all && <SkyFindings sky={all.sky} />}
-      {description && <CaptureFacts description={description} />}
-      {description && description.facts.rms > 0 && (
-        <CaptureSpectrogram
-          shown={drawn.spectrogram}
-          refused={drawn.spectrogramRefused}
-          fields={
-            <CalculatorFields of={CAPTURE_VIEW} keys={["fromMs", "lengthMs"]} values={values} onChange={onChange} />
-          }
-        />
-      )}
     </CalculatorFrame>
   );
 }

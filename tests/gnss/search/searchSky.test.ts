@@ -74,6 +74,19 @@ test("a shadow is known for one even when its parent was not asked for", () => {
   for (const finding of findings) expect(finding).toMatchObject({ verdict: "cross-correlation", parentPrn: 3 });
 });
 
+// 60 dB-Hz raise the noise of their own grid by 2 dB, so that the shadow of PRN 3 at PRN 30 reads 16.6 dB below, not 19.
+test("a very strong satellite alone makes no second one, though it reads low beside its own noise", () => {
+  const strong = { prn: 3, codePhaseChips: 132.0, dopplerHz: 1157, cn0DbHz: 60 };
+  const scene = { seed: "51".repeat(32), rateHz: 2.046e6, ifHz: 0, complex: true, durationMs: 5 };
+  const plan = { ...request, sums: 5, dopplerHalfWidthHz: 3000 };
+  const capture = rawCapture({ ...scene, satellites: [strong] });
+  const { findings } = searchSky(capture, signal, [3, 4, 16, 17, 30], [], plan);
+  const genuine = findings.filter(({ verdict }) => verdict === "genuine");
+  expect(genuine.map(({ prn }) => prn)).toEqual([3]);
+  const shadow = findings.find(({ prn }) => prn === 30);
+  expect(shadow).toMatchObject({ verdict: "cross-correlation", parentPrn: 3 });
+});
+
 describe("interference", () => {
   const satellites = nearFar.slice(1).map((one) => ({ ...one, cn0DbHz: 43 }));
   const scene = { rateHz: 4.092e6, ifHz: 0, complex: true, durationMs: 20, satellites };
