@@ -27,7 +27,9 @@ export function AnswerForm({ sections, answers, onChange, onEnter }: AnswerFormP
         <div
           key={index}
           className={
-            section.repeat ? "grid grid-cols-2 gap-x-3 gap-y-3 border-b-hair border-rule py-3" : "grid gap-4 pt-3"
+            section.repeat
+              ? `grid gap-x-3 gap-y-3 border-b-hair border-rule py-3 ${section.fields.length > 1 ? "grid-cols-2" : ""}`
+              : "grid gap-4 pt-3"
           }
         >
           {fieldsOfRow(section, index + 1).map(({ id, spec }) => (

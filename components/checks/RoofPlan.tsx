@@ -98,16 +98,18 @@ function Drawing({ hatch, emitters, positions }: RoofData) {
       {positions.map((one) => (
         <g key={one.id}>
           <rect x={across(one) - 4} y={down(one) - 4} width="8" height="8" fill="var(--plus)" />
-          <Name at={one}>{one.id}</Name>
+          <Name at={one} before>
+            {one.id}
+          </Name>
         </g>
       ))}
     </svg>
   );
 }
 
-/** At the right of a place, at the left near the eastern edge. */
-function Name({ at, children }: { at: Place; children: React.ReactNode }) {
-  const left = at.eastM > ROOF_M.east - 4;
+/** Beside a place, on the other side where the edge of the roof is near: positions at the left, so that emitters do not meet them. */
+function Name({ at, before = false, children }: { at: Place; before?: boolean; children: React.ReactNode }) {
+  const left = before ? at.eastM >= 2 : at.eastM > ROOF_M.east - 4;
   return (
     <text x={across(at) + (left ? -9 : 9)} y={down(at) + 4.5} textAnchor={left ? "end" : "start"} className="plot-note">
       {children}

@@ -126,7 +126,14 @@ const BRIEF = [
 const FIGURE_FIELDS: readonly FieldSpec[] = [
   { id: "gain", label: "Net gain", input: "number", unit: "dB", quantity: "ownGain" },
   { id: "noise", label: "Noise figure", input: "number", unit: "dB", quantity: "ownNoise" },
-  { id: "headroom", label: "Headroom of the first amplifier", input: "number", unit: "dB", quantity: "ownHeadroom" },
+  {
+    id: "headroom",
+    label: "Headroom of the first amplifier",
+    input: "number",
+    unit: "dB",
+    signed: true,
+    quantity: "ownHeadroom",
+  },
   { id: "delay", label: "Delay", input: "number", unit: "ns", quantity: "ownDelay" },
   { id: "volts", label: "Volts at the first amplifier", input: "number", unit: "V", quantity: "ownVolts" },
 ];

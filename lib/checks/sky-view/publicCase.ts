@@ -86,7 +86,7 @@ const POSITION_FIELDS: readonly FieldSpec[] = [
     help: "Of the whole sky.",
     quantity: "quadrantBlocked",
   },
-  { id: "room", label: "Room to the tightest emitter", input: "number", unit: "m", quantity: "room" },
+  { id: "room", label: "Room to the tightest emitter", input: "number", unit: "m", signed: true, quantity: "room" },
 ];
 
 const VERDICT_FIELDS: readonly FieldSpec[] = [

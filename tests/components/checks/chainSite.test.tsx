@@ -58,3 +58,8 @@ test("parts are put in order row by row, and each row has a name of its own", as
   });
   expect(screen.getByRole("combobox", { name: "Part 4" })).toBeTruthy();
 });
+
+test("a headroom may lie below zero, so its field has a key for the sign", () => {
+  render(<Form />);
+  expect(screen.getAllByRole("button", { name: /sign/i })).toHaveLength(1);
+});
