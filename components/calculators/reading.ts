@@ -10,6 +10,11 @@ export type Reading = {
   timeNs?: number;
   timeS?: number;
   levelNs?: number;
+  centreKhz?: number;
+  widthKhz?: number;
+  levelDb?: number;
+  floorDb?: number;
+  periodUs?: number;
   eastM?: number;
   northM?: number;
   semiMajorM?: number;

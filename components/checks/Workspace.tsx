@@ -1,5 +1,6 @@
 "use client";
 import type { ComponentProps } from "react";
+import { CaptureLook } from "@/components/calculators/CaptureLook";
 import { CaptureSearch } from "@/components/calculators/CaptureSearch";
 import type { Reading } from "@/components/calculators/reading";
 import { InstrumentLog, type InstrumentData } from "@/components/calculators/InstrumentLog";
@@ -69,6 +70,10 @@ export function Workspace({ view, filesAddress, onTake }: WorkspaceProps) {
           </div>
         </>
       );
+    case "interferer": {
+      const { captureFile, rateHz } = view.data as CaptureData;
+      return <CaptureLook address={`${filesAddress}/${captureFile}`} rateHz={rateHz} onTake={onTake} />;
+    }
     case "stand-off":
       return <StandOffSite data={view.data as StandOffData} />;
     case "chain":

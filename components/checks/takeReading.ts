@@ -12,6 +12,11 @@ const PARTS: Readonly<Record<string, (reading: Reading) => string | null>> = {
   doppler: ({ dopplerHz }) => text(dopplerHz, 0),
   cn0: ({ cn0DbHz }) => text(cn0DbHz, 1),
   lag: ({ lagChips }) => text(lagChips, 3),
+  centre: ({ centreKhz }) => text(centreKhz, 1),
+  bandwidth: ({ widthKhz }) => text(widthKhz, 1),
+  period: ({ periodUs }) => text(periodUs, 2),
+  level: ({ levelDb }) => text(levelDb, 1),
+  floor: ({ floorDb }) => text(floorDb, 1),
   east: ({ eastM }) => text(eastM, 0),
   north: ({ northM }) => text(northM, 0),
   major: ({ semiMajorM }) => text(semiMajorM, 0),
@@ -20,6 +25,7 @@ const PARTS: Readonly<Record<string, (reading: Reading) => string | null>> = {
 };
 /** These are taken only while they are open: which satellite stands behind another, and which echo is which, is for the person to say. */
 const WHEN_OPEN: typeof PARTS = {
+  ownLine: ({ levelDb }) => text(levelDb, 1),
   ...PARTS,
   parent: PARTS.prn!,
   start: ({ utc }) => utc ?? null,

@@ -4,6 +4,7 @@ import { correlatorReading } from "./correlator-reading/correlatorReading";
 import { delayEntry } from "./delay-entry/delayEntry";
 import { falseLock } from "./false-lock/falseLock";
 import { formula } from "./formula/formula";
+import { interferer } from "./interferer/interferer";
 import { jammedOrNot } from "./jammed-or-not/jammedOrNot";
 import type { CheckKind } from "./kind";
 import { locate } from "./locate/locate";
@@ -26,6 +27,7 @@ export const KINDS: readonly CheckKind[] = [
   lostDecibels,
   chain,
   skyView,
+  interferer,
   standOff,
   locate,
   jammedOrNot,

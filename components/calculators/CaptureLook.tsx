@@ -1,0 +1,83 @@
+"use client";
+import { useState } from "react";
+import { Key } from "@/components/ui/Key";
+import { Notice } from "@/components/ui/Notice";
+import { SectionHead } from "@/components/ui/SectionHead";
+import { Select } from "@/components/ui/Select";
+import { Working } from "@/components/ui/Working";
+import type { Reading } from "./reading";
+import { PowerInTime, RepetitionReader } from "./RepetitionReader";
+import { SpectraInTime } from "./SpectraInTime";
+import { SpectrumReader } from "./SpectrumReader";
+import { useCapture } from "./useCapture";
+import { useLook } from "./useLook";
+
+type CaptureLookProps = {
+  /** Address of the samples, 8-bit I and Q alternating. */
+  address: string;
+  rateHz: number;
+  onTake?: (reading: Reading) => void;
+};
+
+const FULL_SCALE = 127 * 127; // |x|^2 at 0 dB
+/** Noise bandwidth of the windows: two bins of the averaged spectrum, one and a half of the spectra in time. */
+const POINTS = [512, 2048, 8192, 65_536].map((points) => ({ value: String(points), bins: 2 / points }));
+const ROW_POINTS = [32, 64, 128, 256, 1024].map((points) => ({ value: String(points), bins: 1.5 / points }));
+
+/** A capture seen for what disturbs it: spectrum, spectra in time, repetition, power in time. */
+export function CaptureLook({ address, rateHz, onTake }: CaptureLookProps) {
+  const [again, setAgain] = useState(0);
+  const load = useCapture(address, again);
+  const [points, setPoints] = useState("2048");
+  const [rowPoints, setRowPoints] = useState("128");
+  const samples = load.state === "ready" ? load.samples : null;
+  const look = useLook(samples, rateHz, { points: Number(points), rowPoints: Number(rowPoints) });
+  if (load.state === "failed") {
+    return (
+      <Notice
+        tone="minus"
+        fact="The capture could not be loaded."
+        live
+        action={<Key onClick={() => setAgain(again + 1)}>Load again</Key>}
+      >
+        Your answers are kept.
+      </Notice>
+    );
+  }
+  if (!look) return <Working label={load.state === "loading" ? "Loading the capture" : "Computing the spectra"} />;
+  const choices = (list: typeof POINTS) =>
+    list.map(({ value, bins }) => ({ value, label: `${Number(((rateHz * bins) / 1000).toPrecision(2))} kHz` }));
+  return (
+    <div className="grid gap-10">
+      <section className="grid gap-4">
+        <SectionHead title="Averaged spectrum" level={3} />
+        <Select
+          label="Resolution"
+          value={points}
+          choices={choices(POINTS)}
+          onChange={(event) => setPoints(event.target.value)}
+        />
+        <SpectrumReader spectrum={look.spectrum} fullScale={FULL_SCALE} onTake={onTake} />
+      </section>
+      <section className="grid gap-4">
+        <SectionHead title="Spectra in time" level={3} />
+        <Select
+          label="Resolution in frequency"
+          help="The finer it is, the coarser the time."
+          value={rowPoints}
+          choices={choices(ROW_POINTS)}
+          onChange={(event) => setRowPoints(event.target.value)}
+        />
+        <SpectraInTime key={look.settings.rowPoints} inTime={look.inTime} />
+      </section>
+      <section className="grid gap-4">
+        <SectionHead title="Repetition" level={3} />
+        <RepetitionReader likeness={look.likeness} onTake={onTake} />
+      </section>
+      <section className="grid gap-4">
+        <SectionHead title="Power in time" level={3} />
+        <PowerInTime power={look.power} fullScale={FULL_SCALE} />
+      </section>
+    </div>
+  );
+}
