@@ -5,6 +5,7 @@ import { correlatorReading } from "@/lib/checks/correlator-reading/correlatorRea
 import { delayEntry } from "@/lib/checks/delay-entry/delayEntry";
 import { falseLock } from "@/lib/checks/false-lock/falseLock";
 import { publicCase as falseLockCase } from "@/lib/checks/false-lock/publicCase";
+import { interferer } from "@/lib/checks/interferer/interferer";
 import { jammedOrNot } from "@/lib/checks/jammed-or-not/jammedOrNot";
 import { locate } from "@/lib/checks/locate/locate";
 import { lostDecibels } from "@/lib/checks/lost-decibels/lostDecibels";
@@ -123,5 +124,12 @@ describe("jammed-or-not@1", () => {
   const plan = planOf(jammedOrNot);
   test.each(list(GOLDEN.jammedOrNot))("seed %i", (n, hash) =>
     expect(goldenOf(jammedOrNot.build(seedOf(n), plan))).toBe(hash),
+  );
+});
+
+describe("interferer@1", () => {
+  const plan = planOf(interferer);
+  test.each(list(GOLDEN.interferer))("seed %i", { timeout: SLOW }, (n, hash) =>
+    expect(goldenOf(interferer.build(seedOf(n), plan))).toBe(hash),
   );
 });

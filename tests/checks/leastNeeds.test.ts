@@ -6,6 +6,9 @@ import { publicCase as readingCase } from "@/lib/checks/correlator-reading/publi
 import { falseLock } from "@/lib/checks/false-lock/falseLock";
 import { markAnswers as markFalseLock } from "@/lib/checks/false-lock/markAnswers";
 import { publicCase as falseLockCase } from "@/lib/checks/false-lock/publicCase";
+import type { InterfererTruth } from "@/lib/checks/interferer/drawCase";
+import { interferer } from "@/lib/checks/interferer/interferer";
+import { markAnswers as markInterferer } from "@/lib/checks/interferer/markAnswers";
 import type { BuiltCase, CheckKind, CheckPlan, Marking } from "@/lib/checks/kind";
 import { leastNeeds } from "@/lib/checks/leastNeeds";
 import { KINDS } from "@/lib/checks/registry";
@@ -56,14 +59,20 @@ const MARKED: Readonly<Record<string, (one: Tried) => Marking>> = {
     const built: BuiltCase<typeof truth> = { truth, publicCase: planCase(truth, plan), files: [], draws: 1 };
     return markPlan(seed, truth, plan, searchPlan.wrongMethods[method]!.solve(built, plan));
   },
+  // With nothing there two of the wrong ways come to the right answer, as the kind says.
+  interferer: ({ needs, method, seed }) => {
+    const plan = { ...planOf(interferer, { nothing: 0 }), needs };
+    const built = caseOf(interferer as CheckKind, seed, plan) as BuiltCase<InterfererTruth>;
+    return markInterferer(built.truth, plan, interferer.wrongMethods[method]!.solve(built, plan));
+  },
 };
 
 const made = new Map<string, BuiltCase>();
 
 /** A case as the kind's trial makes it, once for all methods. */
-function caseOf(kind: CheckKind, seed: string): BuiltCase {
+function caseOf(kind: CheckKind, seed: string, plan: CheckPlan = planOf(kind)): BuiltCase {
   const name = `${kind.id} ${seed}`;
-  const known = made.get(name) ?? (kind.trial ?? kind).build(seed, planOf(kind));
+  const known = made.get(name) ?? (kind.trial ?? kind).build(seed, plan);
   made.set(name, known);
   return known;
 }

@@ -10,6 +10,14 @@ type Wrong = WrongMethod<InterfererParameters, InterfererTruth>;
  * overload is blamed: these two then come to the right answer.
  */
 export const wrongMethods: Readonly<Record<string, Wrong>> = {
+  "mirror-image": {
+    label: "The mirrored frequency taken for the centre",
+    misses: ["centre"],
+    solve({ files }) {
+      const right = readingOf(files);
+      return answersFor({ ...right, centreHz: 0 - right.centreHz });
+    },
+  },
   "own-line-called-carrier": {
     label: "The receiver's line at 0 Hz called a carrier",
     misses: ["ownLine"],
@@ -17,14 +25,6 @@ export const wrongMethods: Readonly<Record<string, Wrong>> = {
       const right = readingOf(files);
       const line = { centreHz: 0, bandwidthHz: 0, periodS: 0, levelDb: right.ownLineDb };
       return { ...answersFor({ ...right, class: "carrier", ...line }), "receiver.ownLine": "" };
-    },
-  },
-  "mirror-image": {
-    label: "The mirrored frequency taken for the centre",
-    misses: ["centre"],
-    solve({ files }) {
-      const right = readingOf(files);
-      return answersFor({ ...right, centreHz: 0 - right.centreHz });
     },
   },
   "overload-blamed": {

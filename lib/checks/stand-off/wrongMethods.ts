@@ -29,14 +29,6 @@ export const wrongMethods: Readonly<Record<string, Wrong>> = {
       return answersFor(site, work({ ...site, antennaGainDb: 0 }, q));
     },
   },
-  "wrong-q": {
-    label: "Q of another sort of interference",
-    misses: ["effective"],
-    solve({ truth, publicCase }) {
-      const { site } = given(publicCase);
-      return answersFor(site, work(site, Q_OF[otherType(truth.type)]));
-    },
-  },
   "strongest-satellite": {
     label: "Recovery of the strongest satellite, not of the fourth",
     misses: ["recovery"],
@@ -44,6 +36,14 @@ export const wrongMethods: Readonly<Record<string, Wrong>> = {
       const { site, q } = given(publicCase);
       const strongest = Math.max(...site.satellites.map(({ cn0DbHz }) => cn0DbHz));
       return answersFor(site, { ...work(site, q), recoveryM: recoveryM(site, q, strongest) });
+    },
+  },
+  "wrong-q": {
+    label: "Q of another sort of interference",
+    misses: ["effective"],
+    solve({ truth, publicCase }) {
+      const { site } = given(publicCase);
+      return answersFor(site, work(site, Q_OF[otherType(truth.type)]));
     },
   },
 };

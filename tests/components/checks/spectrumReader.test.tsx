@@ -58,6 +58,7 @@ test("a lag is taken as repetition", async () => {
 });
 
 test("spectra in time say their resolution and read a cell", () => {
+  vi.spyOn(HTMLCanvasElement.prototype, "getContext").mockReturnValue(null);
   render(<SpectraInTime inTime={look.inTime} />);
   // 1.5 bins of 8184/64 kHz; 64 samples are 7.8 us.
   expect(screen.getByText(/^Resolution 192 kHz and 7\.8 µs/)).toBeTruthy();
