@@ -19,6 +19,8 @@ export class MarkingRecord extends Model<InferAttributes<MarkingRecord>, InferCr
   declare workings: Working[];
   declare durationMs: number;
   declare reason: CreationOptional<string>;
+  /** The assessor, where no machine marks. */
+  declare judgedBy: CreationOptional<string | null>;
   declare markedAt: CreationOptional<Date>;
 }
 
@@ -37,6 +39,7 @@ MarkingRecord.init(
     workings: { type: DataTypes.JSONB, allowNull: false },
     durationMs: { type: DataTypes.INTEGER, allowNull: false },
     reason: DataTypes.TEXT,
+    judgedBy: DataTypes.UUID,
     markedAt: DataTypes.DATE,
   },
   { sequelize: db, modelName: "MarkingRecord", tableName: "marking_records" },

@@ -18,6 +18,7 @@ export * from "./Order";
 export * from "./Person";
 export * from "./Progress";
 export * from "./Question";
+export * from "./QuestionAnswer";
 export * from "./Release";
 export * from "./RoleGrant";
 export * from "./Session";

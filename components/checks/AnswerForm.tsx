@@ -6,6 +6,7 @@ import { Field } from "@/components/ui/Field";
 import { NumberField } from "@/components/ui/NumberField";
 import { SectionHead } from "@/components/ui/SectionHead";
 import { Select } from "@/components/ui/Select";
+import { TextArea } from "@/components/ui/TextArea";
 import { TwoWay } from "@/components/ui/TwoWay";
 import { useState } from "react";
 import { fieldsOfRow, rowsShown } from "./formFields";
@@ -80,6 +81,19 @@ function AnswerField({ spec, row, value, onChange }: AnswerFieldProps) {
         value={value}
         onChange={(event) => onChange(event.target.value)}
         help={spec.help}
+      />
+    );
+  }
+  if (spec.input === "text" && spec.longest) {
+    return (
+      <TextArea
+        label={shown}
+        note={`${value.length} of ${spec.longest} characters`}
+        value={value}
+        onChange={(event) => onChange(event.target.value)}
+        help={spec.help}
+        rows={8}
+        maxLength={spec.longest}
       />
     );
   }

@@ -1,6 +1,6 @@
 "use client";
 import { useRouter } from "next/navigation";
-import { useCallback, useState } from "react";
+import { useCallback, useState, type ReactNode } from "react";
 import type { Reading } from "@/components/calculators/reading";
 import { Key } from "@/components/ui/Key";
 import { LinkKey } from "@/components/ui/LinkKey";
@@ -30,9 +30,12 @@ type StepId = (typeof STEPS)[number]["id"];
 export function CaseDesk({
   employer,
   open,
+  brief,
 }: {
   employer: string;
-  open: OpenCaseView & { view: NonNullable<OpenCaseView["view"]> };
+  open: Omit<OpenCaseView, "brief"> & { view: NonNullable<OpenCaseView["view"]> };
+  /** What the lead wrote inside the check, drawn by the page. */
+  brief?: ReactNode;
 }) {
   const router = useRouter();
   const base = `/api/employers/${employer}/cases/${open.id}`;
@@ -90,7 +93,7 @@ export function CaseDesk({
       </WorkBar>
       <div className="grid min-h-0 flex-1 pb-[68px] desk:grid-cols-[17.5rem_1fr_25rem] desk:pb-0">
         <Pane id="brief" current={step} className="bg-ground">
-          <GivenPane open={open} filesAddress={`${base}/files`} />
+          <GivenPane open={open} filesAddress={`${base}/files`} brief={brief} />
         </Pane>
         <Pane id="search" current={step} className="border-rule bg-sheet desk:border-x-hair">
           <Workspace view={open.view} filesAddress={`${base}/files`} onTake={over ? undefined : take} />

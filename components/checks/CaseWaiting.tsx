@@ -18,7 +18,7 @@ const fetchProgress = async (address: string): Promise<CaseProgress> => {
 };
 
 /** While the worker draws or marks: how far it is, and what may be done meanwhile. */
-export function CaseWaiting({ employer, open }: { employer: string; open: OpenCaseView }) {
+export function CaseWaiting({ employer, open }: { employer: string; open: Omit<OpenCaseView, "brief"> }) {
   const router = useRouter();
   const { data, error } = useSWR(`/api/employers/${employer}/cases/${open.id}/progress`, fetchProgress, {
     refreshInterval: POLL_MS,
@@ -37,6 +37,11 @@ export function CaseWaiting({ employer, open }: { employer: string; open: OpenCa
         {data?.fault ? (
           <Notice tone="minus" fact={building ? "Not drawn." : "Not computed."} reference={data.fault}>
             {building ? "No time runs." : "Your answers are kept."} The operator has been told and can start it again.
+          </Notice>
+        ) : open.plan.kind === "written" && !building ? (
+          <Notice tone="plus" fact="Handed in.">
+            An assessor reads your account and judges it line by line. You are mailed when that is done, and may close
+            this page.
           </Notice>
         ) : (
           <Working

@@ -1,3 +1,4 @@
+import type { ReactNode } from "react";
 import { Cautions } from "@/components/ui/Cautions";
 import { Ledger } from "@/components/ui/Ledger";
 import { SectionHead } from "@/components/ui/SectionHead";
@@ -5,21 +6,27 @@ import { wholeNumbers } from "@/components/ui/wholeNumbers";
 import { CAUTIONS } from "@/components/mdx/cautions";
 import type { OpenCaseView } from "@/lib/queries/getCase";
 
-type GivenPaneProps = { open: OpenCaseView & { view: NonNullable<OpenCaseView["view"]> }; filesAddress: string };
+type GivenPaneProps = {
+  open: Omit<OpenCaseView, "brief"> & { view: NonNullable<OpenCaseView["view"]> };
+  filesAddress: string;
+  /** What the lead wrote inside the check. */
+  brief?: ReactNode;
+};
 
 /** What is given: the brief, the facts of the case, what is accepted, the files, the cautions. */
-export function GivenPane({ open, filesAddress }: GivenPaneProps) {
+export function GivenPane({ open, filesAddress, brief }: GivenPaneProps) {
   const { view, files } = open;
   return (
     <div className="grid gap-6">
       <section>
         <SectionHead title="Given" />
+        {brief && <div className="mt-3">{brief}</div>}
         <div className="mt-3 grid gap-3">
           {view.brief.map((paragraph) => (
             <p key={paragraph}>{wholeNumbers(paragraph)}</p>
           ))}
         </div>
-        <Ledger narrow className="mt-4" rows={view.given} />
+        {view.given.length > 0 && <Ledger narrow className="mt-4" rows={view.given} />}
       </section>
       {files.length > 0 && (
         <section>

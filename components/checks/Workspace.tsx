@@ -12,6 +12,7 @@ import type { PublicCase } from "@/lib/checks/kind";
 import { ChainSite, type ChainSiteData } from "./ChainSite";
 import { DelayEntryWork, type DelayEntryData } from "./DelayEntryWork";
 import { PeakTrace, type PeakTraceData } from "./PeakTrace";
+import { FormulaWork, WrittenWork } from "./PaperWork";
 import { PatrolLog, type PatrolData } from "./PatrolLog";
 import { PromptView, type PromptData } from "./PromptView";
 import { PulseAcceptanceWork, type PulseAcceptanceData } from "./PulseAcceptanceWork";
@@ -92,6 +93,10 @@ export function Workspace({ view, filesAddress, onTake }: WorkspaceProps) {
       const { log, gainDb, currentMa } = view.data as LogData;
       return <ReceiverLog log={log} gainDb={gainDb} currentMa={currentMa} onTake={onTake} />;
     }
+    case "formula":
+      return <FormulaWork />;
+    case "written":
+      return <WrittenWork />;
     default:
       return <p className="text-dense text-ink-2">Work with the files of this case and type your answers.</p>;
   }

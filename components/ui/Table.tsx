@@ -116,11 +116,13 @@ export function Td({
 export function ReasonRow({
   columns,
   skip = 0,
+  label = "Reason",
   wash,
   children,
 }: {
   columns: number;
   skip?: number;
+  label?: string;
   wash?: "plus" | "minus" | "caution";
   children: ReactNode;
 }) {
@@ -128,7 +130,7 @@ export function ReasonRow({
     <tr className="reason" data-wash={wash}>
       {skip > 0 && <td colSpan={skip} />}
       <td colSpan={columns - skip} className={wash === "minus" ? "text-minus-deep" : "text-ink-2"}>
-        <strong className="mr-2 font-semibold">Reason</strong>
+        <strong className="mr-2 font-semibold">{label}</strong>
         {children}
       </td>
     </tr>

@@ -14,6 +14,8 @@ export type FieldSpec = {
   /** The number may be below zero: a phone's keyboard of figures has no minus. */
   signed?: boolean;
   choices?: readonly Choice[];
+  /** Characters of a text that is longer than a line. */
+  longest?: number;
   help?: string;
   quantity: string;
 };
@@ -137,6 +139,8 @@ export interface CheckKind<P = unknown, T = unknown> {
   readonly wrongMethods: Readonly<Record<string, WrongMethod<P, T>>>;
   /** Where the lead defines the check: what the plan brings in place of the kind's own lists. */
   readonly ofPlan?: PlanDefinitions<P, T>;
+  /** An assessor judges the hand-in line by line; `mark` is never asked. */
+  readonly judged?: true;
   /** How the release check tries the kind; absent only where no machine marks. */
   readonly trial?: Trial<P, T>;
 }

@@ -15,6 +15,7 @@ import { searchPlan } from "./search-plan/searchPlan";
 import { sidePeak } from "./side-peak/sidePeak";
 import { skyView } from "./sky-view/skyView";
 import { standOff } from "./stand-off/standOff";
+import { written } from "./written/written";
 
 /** Every version of every kind that a release may name; a released version stays here for ever. Newest of a kind first. */
 export const KINDS: readonly CheckKind[] = [
@@ -34,6 +35,7 @@ export const KINDS: readonly CheckKind[] = [
   delayEntry,
   pulseAcceptance,
   formula,
+  written,
 ];
 
 /**

@@ -28,7 +28,7 @@ function cardOf(plan: CheckPlan, kinds: readonly CheckKind[]): CheckCardView {
     return {
       id: planned.of,
       label: definition?.label ?? planned.of,
-      tolerance: toleranceText(planned, definition),
+      tolerance: toleranceText(planned, definition, kind?.judged ?? false),
       critical: planned.critical,
     };
   });
@@ -36,7 +36,12 @@ function cardOf(plan: CheckPlan, kinds: readonly CheckKind[]): CheckCardView {
   return { id, title, minutes, needs: plan.needs ?? quantities.length, quantities };
 }
 
-function toleranceText({ tolerance }: CheckPlan["quantities"][number], definition?: QuantityDefinition): string {
+function toleranceText(
+  { tolerance }: CheckPlan["quantities"][number],
+  definition: QuantityDefinition | undefined,
+  judged: boolean,
+): string {
+  if (judged) return "judged by an assessor";
   if (tolerance) return `±${formatUnderstood(tolerance.value, tolerance.unit)}`;
   // A number without a tolerance of its own is judged by what the kind works out from the hand-in.
   return definition && definition.unit !== null ? definition.reason : "exact";

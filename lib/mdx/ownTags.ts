@@ -19,4 +19,11 @@ export const OWN_TAGS: Readonly<Record<string, CompletionRow[]>> = {
       insert: '<Wrong id="air" of="delay" label="speed of light in air" answer="L / c" />',
     },
   ],
+  written: [
+    {
+      label: "<Quantity",
+      detail: "a line that the technician writes and an assessor judges",
+      insert: '<Quantity id="cause" label="what you think the cause is, and why" critical />',
+    },
+  ],
 };

@@ -27,6 +27,11 @@ export const can = {
   readRecord: (actor: Actor, sitting: Persons) =>
     isTheTechnician(actor, sitting) || holds(actor, sitting.employerId, "lead", "assessor", "decider"),
   readQueue: (actor: Actor, sitting: Owned) => holds(actor, sitting.employerId, "assessor", "decider"),
+  /** Whoever sat a case neither judges it nor answers the own question. */
+  judge: (actor: Actor, sitting: Persons) =>
+    holds(actor, sitting.employerId, "assessor") && actor.personId !== sitting.technicianId,
+  answerQuestion: (actor: Actor, sitting: Persons) =>
+    holds(actor, sitting.employerId, "assessor") && actor.personId !== sitting.technicianId,
   decide: (actor: Actor, sitting: Owned) => holds(actor, sitting.employerId, "decider"),
   /** Never of the own certificate: nobody decides in an own matter. */
   setStanding: (actor: Actor, certificate: Held) =>

@@ -11,6 +11,8 @@ export type SeparationFacts = {
   releaseHands: readonly { personId: string; part: "wrote" | "released" }[];
   /** Trainings of the technician, by day on which they ended. */
   trainings: readonly { trainerId: string; endedOn: string }[];
+  /** Whoever judged a written line of the sitting. */
+  judgedByIds: readonly string[];
   today: string;
 };
 
@@ -23,6 +25,7 @@ export function barsToDeciding(facts: SeparationFacts): string[] {
   const parts = new Set(facts.releaseHands.filter((hand) => hand.personId === deciderId).map((hand) => hand.part));
   if (parts.has("wrote")) bars.push("You wrote part of this release.");
   if (parts.has("released")) bars.push("You released this release.");
+  if (facts.judgedByIds.includes(deciderId)) bars.push("You judged a line of this sitting.");
   const trained = facts.trainings.some(
     (training) => training.trainerId === deciderId && addMonths(training.endedOn, LOOK_BACK_MONTHS) >= facts.today,
   );

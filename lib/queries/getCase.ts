@@ -3,7 +3,10 @@ import type { Answers, CheckPlan, PublicCase } from "@/lib/checks/kind";
 import { select } from "@/lib/db";
 import type { Actor } from "@/lib/policies/actor";
 import { can } from "@/lib/policies/can";
+import { briefOf } from "@/lib/mdx/briefOf";
+import type { ModuleTree, TreeElement } from "@/lib/mdx/moduleTree";
 import { iso, isId, isoOrNull } from "./findOwn";
+import { CHECK_ELEMENT } from "./sittingState";
 
 type Row = {
   id: string;
@@ -19,6 +22,7 @@ type Row = {
   checks: CheckPlan[];
   freshCases: number;
   view: PublicCase | null;
+  check: TreeElement | null;
   files: { name: string; mediaType: string; sizeBytes: number; sha256: string }[] | null;
   openedAt: Date | null;
   endsAt: Date | null;
@@ -41,6 +45,8 @@ export type OpenCaseView = {
   code: string;
   title: string;
   view: PublicCase | null;
+  /** What the lead wrote inside the check. */
+  brief: ModuleTree | null;
   files: NonNullable<Row["files"]>;
   openedAt: string | null;
   endsAt: string | null;
@@ -68,6 +74,7 @@ export async function getCase(actor: Actor, id: string, now = new Date()): Promi
     code: row.code,
     title: row.title,
     view: row.view,
+    brief: briefOf(row.check),
     files: row.files ?? [],
     openedAt: isoOrNull(row.openedAt),
     endsAt: isoOrNull(row.endsAt),
@@ -83,7 +90,7 @@ export async function getCase(actor: Actor, id: string, now = new Date()): Promi
 const SQL = `
   SELECT x.id, x.sitting_id AS "sittingId", s.number::text AS "sittingNumber", s.employer_id AS "employerId",
     s.technician_id AS "technicianId", x.check_id AS "checkId", x.number, x.state, m.code, r.title, r.checks,
-    (r.front_matter #>> '{sitting,freshCases}')::int AS "freshCases", v.view, v.files, x.opened_at AS "openedAt",
+    (r.front_matter #>> '{sitting,freshCases}')::int AS "freshCases", v.view, ${CHECK_ELEMENT} AS "check", v.files, x.opened_at AS "openedAt",
     x.ends_at AS "endsAt", x.handed_in_at AS "handedInAt", x.by_clock AS "byClock",
     coalesce(h.answers, a.answers) AS answers, a.revision, a.saved_at AS "savedAt"
   FROM case_states x JOIN sittings s ON s.id = x.sitting_id JOIN releases r ON r.id = s.release_id

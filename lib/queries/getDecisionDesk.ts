@@ -27,7 +27,7 @@ type RecordRow = {
   endsAt: Date;
   byClock: boolean;
 };
-type QuestionRow = { caseId: string; quantity: string; words: string; askedAt: Date };
+type QuestionRow = { caseId: string; quantity: string; words: string; askedAt: Date; answer: string | null };
 
 export type DecisionDeskView = {
   sitting: SittingView;
@@ -41,7 +41,7 @@ export type DecisionDeskView = {
     openedAt: string;
     endsAt: string;
   })[];
-  questions: { caseId: string; quantity: string; words: string; askedAt: string }[];
+  questions: (Omit<QuestionRow, "askedAt"> & { askedAt: string })[];
 };
 
 /** All that lies before the decider, in the order a decider asks for it. */
@@ -84,6 +84,7 @@ const RECORDS = `
   FROM case_states x JOIN marking_records k ON k.id = x.record_id JOIN hand_ins h ON h.case_id = x.id
   WHERE x.sitting_id = :sittingId ORDER BY x.handed_in_at`;
 const QUESTIONS = `
-  SELECT x.id AS "caseId", q.quantity, q.words, q.asked_at AS "askedAt" FROM questions q
+  SELECT x.id AS "caseId", q.quantity, q.words, q.asked_at AS "askedAt", a.words AS answer
+  FROM questions q LEFT JOIN question_answers a ON a.question_id = q.id
   JOIN marking_records k ON k.id = q.marking_record_id JOIN cases x ON x.id = k.case_id
   WHERE x.sitting_id = :sittingId ORDER BY q.asked_at`;

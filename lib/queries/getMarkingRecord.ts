@@ -4,7 +4,7 @@ import type { CheckPlan } from "@/lib/checks/kind";
 import { select } from "@/lib/db";
 import type { Actor } from "@/lib/policies/actor";
 import { can } from "@/lib/policies/can";
-import { iso, isId } from "./findOwn";
+import { iso, isId, isoOrNull } from "./findOwn";
 import type { SittingState } from "./sittingState";
 import { SITTING_STATE } from "./sittingState";
 
@@ -39,17 +39,28 @@ type Row = {
   reason: string;
   words: string;
   byClock: boolean;
+  /** Name of the assessor, where no machine marked. */
+  judge: string | null;
   handedInAt: Date;
   captureSha256: string | null;
 };
-type Asked = { id: string; quantity: string; words: string; askedAt: Date };
+type Asked = {
+  id: string;
+  quantity: string;
+  words: string;
+  askedAt: Date;
+  answer: string | null;
+  answeredBy: string | null;
+  answeredAt: Date | null;
+};
 
 export type MarkingRecordView = Omit<Row, "employerId" | "technicianId" | "markedAt" | "handedInAt" | "checks"> & {
   checkTitle: string;
   markedAt: string;
   handedInAt: string;
   isMine: boolean;
-  questions: { id: string; quantity: string; words: string; askedAt: string }[];
+  mayAnswer: boolean;
+  questions: (Omit<Asked, "askedAt" | "answeredAt"> & { askedAt: string; answeredAt: string | null })[];
 };
 
 /** The newest marking record of a case: whole, with reasons and workings. Null until it is marked. */
@@ -64,8 +75,9 @@ export async function getMarkingRecord(actor: Actor, caseId: string): Promise<Ma
     checkTitle: checks.find((plan) => plan.id === row.checkId)!.title,
     markedAt: iso(row.markedAt),
     handedInAt: iso(row.handedInAt),
+    mayAnswer: can.answerQuestion(actor, row),
     isMine: technicianId === actor.personId,
-    questions: questions.map((one) => ({ ...one, askedAt: iso(one.askedAt) })),
+    questions: questions.map((one) => ({ ...one, askedAt: iso(one.askedAt), answeredAt: isoOrNull(one.answeredAt) })),
   };
 }
 
@@ -75,13 +87,15 @@ const SQL = `
     s.employer_id AS "employerId", s.technician_id AS "technicianId", p.name AS technician, m.code, r.title AS "moduleTitle",
     r.number AS release, r.fingerprint, r.checks, k.marking, k.engine_version AS "engineVersion", k.rows, k.quantities,
     k.within_count AS "withinCount", k.needs, k.met, k.workings, k.duration_ms AS "durationMs", k.marked_at AS "markedAt",
-    k.sequence, k.reason, h.words, h.by_clock AS "byClock", h.handed_in_at AS "handedInAt",
+    k.sequence, k.reason, jp.name AS judge, h.words, h.by_clock AS "byClock", h.handed_in_at AS "handedInAt",
     (SELECT sha256 FROM captures WHERE case_id = x.id AND name LIKE '%-data') AS "captureSha256"
   FROM case_states x JOIN marking_records k ON k.id = x.record_id JOIN hand_ins h ON h.case_id = x.id
   JOIN sittings s ON s.id = x.sitting_id JOIN releases r ON r.id = s.release_id JOIN modules m ON m.id = r.module_id
+  LEFT JOIN people jp ON jp.id = k.judged_by
   JOIN people p ON p.id = s.technician_id JOIN fees f ON f.assignment_id = s.assignment_id
   LEFT JOIN decisions d ON d.sitting_id = s.id LEFT JOIN certificates c ON c.sitting_id = s.id
   WHERE x.id = :caseId AND s.employer_id = :employerId`;
 const QUESTIONS = `
-  SELECT q.id, q.quantity, q.words, q.asked_at AS "askedAt" FROM questions q
+  SELECT q.id, q.quantity, q.words, q.asked_at AS "askedAt", a.words AS answer, ap.name AS "answeredBy", a.answered_at AS "answeredAt"
+  FROM questions q LEFT JOIN question_answers a ON a.question_id = q.id LEFT JOIN people ap ON ap.id = a.answered_by
   JOIN marking_records k ON k.id = q.marking_record_id WHERE k.case_id = :caseId ORDER BY q.asked_at`;

@@ -1,5 +1,10 @@
 import "server-only";
 
+/** The `<Check>` of a case in its release's tree, over the aliases r (release) and x (case); NULL where there is none. */
+export const CHECK_ELEMENT = `
+  (SELECT t FROM jsonb_array_elements(r.tree -> 'children') t
+   WHERE t ->> 'tagName' = 'Check' AND t #>> '{properties,id}' = x.check_id LIMIT 1)`;
+
 export type SittingState =
   "fee open" | "not started" | "sitting" | "for decision" | "issuing" | "certificate issued" | "not yet competent";
 

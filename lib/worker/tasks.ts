@@ -21,7 +21,7 @@ export type WorkTools = IssueTools & {
 export const workerTasks = (tools: WorkTools): Tasks => ({
   "build-case": ({ caseId }, signal) =>
     buildCase(caseId, { ...tools, engine: engineFor(tools.threads, caseId, "build-case", signal) }),
-  "close-case": ({ caseId }) => closeCase(caseId),
+  "close-case": ({ caseId }) => closeCase(caseId, tools.publicOrigin),
   "mark-case": ({ caseId }, signal) =>
     markCase(caseId, { ...tools, engine: engineFor(tools.threads, caseId, "mark-case", signal) }),
   "issue-certificate": ({ decisionId }) => issueCertificate(decisionId, tools),

@@ -1,7 +1,7 @@
 import { beforeEach, describe, expect, test } from "vitest";
 import { handIn } from "@/lib/commands/handIn";
 import { saveAnswers } from "@/lib/commands/saveAnswers";
-import { makeCase, makeOpenCase } from "../support/chain";
+import { makeCase, makeOpenCase, makeWrittenCase } from "../support/chain";
 import { minutesFrom, NOW } from "../support/clock";
 import { makeActor, makeFirm, type Firm } from "../support/factories";
 import { everythingStored, expectNothingLeft, jobsOf, rowsOf, trailOf } from "../support/written";
@@ -85,3 +85,14 @@ describe("refuses", () => {
 });
 
 test("a failure at the end leaves neither hand-in nor job", () => expectNothingLeft("hand_ins", () => hand()));
+
+test("a written account goes to the assessors, who hear of it once, and not to the worker", async () => {
+  const { id } = await makeWrittenCase(firm);
+  const written = { caseId: id, answers: { "account.seen": "Two masts." }, words: "" };
+  await handIn(firm.technician, written, NOW);
+  await handIn(firm.technician, written, NOW);
+  expect(await jobsOf("mark-case")).toEqual([]);
+  const mails = await rowsOf<{ subject: string; body: string }>("mails");
+  expect(mails.map(({ subject }) => subject)).toEqual([`To be judged: ${firm.technician.name}, What you saw`]);
+  expect(mails[0]!.body).toContain(`/queue/judging/${id}`);
+});

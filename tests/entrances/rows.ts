@@ -94,6 +94,10 @@ export const PAGES: Readonly<Record<string, Addressed>> = {
     address: (ids) => `/${ids.employer}/queue/${ids.undecided}`,
     answers: pageFor("assessor", "decider"),
   },
+  "/[employer]/queue/judging/[case]": {
+    address: (ids) => `/${ids.employer}/queue/judging/${ids.written}`,
+    answers: pageFor("assessor"),
+  },
   "/[employer]/register": own("register", "assessor", "decider"),
   "/[employer]/register/[number]": {
     address: (ids) => `/${ids.employer}/register/${ids.certificate}`,
@@ -183,6 +187,8 @@ export const ACTIONS: Readonly<Record<string, Crossed>> = {
   startSittingAction: crossedIn("commands/startSitting", "startSitting"),
   openCaseAction: crossedIn("commands/openCase", "openCase"),
   askQuestionAction: crossedIn("commands/askQuestion", "askQuestion"),
+  answerQuestionAction: crossedIn("commands/answerQuestion", "answerQuestion"),
+  judgeWrittenAction: crossedIn("commands/judgeWritten", "judgeWritten"),
   decideAction: crossedIn("commands/decide", "decide"),
   setStandingAction: crossedIn("commands/setStanding", "setStanding"),
 };

@@ -24,6 +24,7 @@ export type Ids = Readonly<
     | "file"
     | "sitting"
     | "undecided"
+    | "written"
     | "record"
     | "certificate"
     | "verification",

@@ -11,6 +11,7 @@ import {
   makeOpenCase,
   makeRelease,
   makeSitting,
+  makeWrittenHandIn,
   settleFee,
 } from "@/tests/support/chain";
 import { makeActor, makeEmployer, makeFirm, makePerson, makeSession } from "@/tests/support/factories";
@@ -53,6 +54,7 @@ export async function makeWorld() {
     file: await storedFile(openCase.id),
     sitting: sitting.id,
     undecided: undecided.id,
+    written: (await makeWrittenHandIn(firm)).id,
     record: marked.caseId,
     certificate: certificate.number,
     verification: await signedVerification(certificate.id),

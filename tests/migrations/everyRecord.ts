@@ -18,6 +18,7 @@ export const RECORDS = [
   "decisions",
   "hand_ins",
   "marking_records",
+  "question_answers",
   "questions",
   "release_writers",
   "releases",
@@ -36,7 +37,17 @@ export async function makeEveryRecord(): Promise<void> {
   const { id: markingRecordId, caseId } = await makeMarkingRecord(firm, { sitting });
   await makeCertificate(firm);
   const { personId: askedBy } = firm.technician;
-  await insert("questions", { markingRecordId, quantity: "lag", words: "Why?", askedBy });
+  const question = await insert<{ id: string }>("questions", {
+    markingRecordId,
+    quantity: "lag",
+    words: "Why?",
+    askedBy,
+  });
+  await insert("question_answers", {
+    questionId: question.id,
+    words: "See there.",
+    answeredBy: firm.assessor.personId,
+  });
   await insert("case_secrets", { caseId, sealed: Buffer.alloc(8), truthSha256: HASH, engineVersion: "1.0.0" });
   await insert("captures", {
     ...{ caseId, name: "a.sigmf-data", storageKey: "a", mediaType: "application/octet-stream", sizeBytes: 8 },

@@ -34,8 +34,10 @@ const TABLES: Record<string, { web: Rights; worker: Rights }> = {
   captures: { ...EVERY, web: rights("read") },
   case_answers: { ...EVERY, web: rights("read add", "answers", "case_id", "revision", "saved_at") },
   hand_ins: EVERY,
-  marking_records: { ...EVERY, web: rights("read") },
+  // Of these the web process may add what a person judged; a trigger refuses any other.
+  marking_records: EVERY,
   questions: EVERY,
+  question_answers: EVERY,
   closings: { ...EVERY, web: rights("read") },
   progress: {
     web: rights("read"),

@@ -24,6 +24,8 @@ const ALLOWED: Record<Act, Role[]> = {
   readSitting: ["lead", "assessor", "decider", "administrator"],
   readRecord: ["lead", "assessor", "decider"],
   readQueue: ["assessor", "decider"],
+  judge: ["assessor"],
+  answerQuestion: ["assessor"],
   decide: ["decider"],
   setStanding: ["decider"],
   readCertificate: ["lead", "assessor", "decider", "administrator"],
@@ -58,6 +60,8 @@ test.each<[Act, Role[], boolean]>([
   ["readRecord", [], true],
   ["readCertificate", ["technician"], true],
   ["readCertificate", [], true],
+  ["judge", ["assessor"], false],
+  ["answerQuestion", ["assessor"], false],
   ["setStanding", ["decider"], false],
 ])("own: %s as %j is %s", (act, roles, allowed) => {
   expect(can[act](someone(roles), OWN)).toBe(allowed);

@@ -8,6 +8,7 @@ const facts = (over: Partial<SeparationFacts> = {}): SeparationFacts => ({
     { personId: "lead", part: "released" },
   ],
   trainings: [{ trainerId: "lead", endedOn: "2026-11-30" }],
+  judgedByIds: ["assessor"],
   ...over,
 });
 const trained = (endedOn: string, trainerId = "d") => facts({ trainings: [{ trainerId, endedOn }] });
@@ -20,6 +21,7 @@ test.each<[string, SeparationFacts, string[]]>([
   ["who assigned", facts({ assignedById: "d" }), ["You assigned this sitting."]],
   ["who wrote", hand("wrote"), ["You wrote part of this release."]],
   ["who released", hand("released"), ["You released this release."]],
+  ["who judged a written line", facts({ judgedByIds: ["assessor", "d"] }), ["You judged a line of this sitting."]],
   ["a training that ended today", trained("2026-12-01"), TRAINED],
   ["a training that ended two years ago to the day", trained("2024-12-01"), TRAINED],
   ["a training that ended a day longer ago", trained("2024-11-30"), []],

@@ -8,13 +8,16 @@ import { getCaseProgress } from "@/lib/queries/getCaseProgress";
 import { getCertificate, getCertificatePdf, getRegisterEntry } from "@/lib/queries/getCertificate";
 import { getCounter, getOrder } from "@/lib/queries/getCounter";
 import { getDecisionDesk } from "@/lib/queries/getDecisionDesk";
+import { getJudging } from "@/lib/queries/getJudging";
 import { getMarkingRecord } from "@/lib/queries/getMarkingRecord";
 import { getModule } from "@/lib/queries/getModule";
 import { getRelease } from "@/lib/queries/getRelease";
 import { getSitting } from "@/lib/queries/getSitting";
 import { listCertificates, listOwnCertificates, listRegister } from "@/lib/queries/listCertificates";
+import { listJudging } from "@/lib/queries/listJudging";
 import { listModules } from "@/lib/queries/listModules";
 import { listQueue } from "@/lib/queries/listQueue";
+import { listQuestions } from "@/lib/queries/listQuestions";
 import { listRecords } from "@/lib/queries/listRecords";
 import { listOwnSittings, listSittings } from "@/lib/queries/listSittings";
 import { listTrail } from "@/lib/queries/listTrail";
@@ -117,6 +120,7 @@ const LISTS: Record<string, { ask: (actor: Actor) => Promise<unknown>; to: Role[
   listRegister: { ask: (actor) => listRegister(actor, NOW), to: JUDGES },
   listModules: { ask: listModules, to: LEADS },
   listQueue: { ask: listQueue, to: JUDGES },
+  listQuestions: { ask: listQuestions, to: JUDGES },
   listRecords: { ask: listRecords, to: ["lead", ...JUDGES] },
   listSittings: { ask: listSittings, to: STAFF },
 };
@@ -129,7 +133,7 @@ test.each(Object.entries(LISTS))("%s is given to these roles, each of its own fi
 });
 
 test("own sittings and own certificates are the person's and nobody else's", async () => {
-  expect(await listOwnSittings(firm.technician)).toHaveLength(4);
+  expect(await listOwnSittings(firm.technician)).toHaveLength(5);
   expect(await listOwnCertificates(firm.technician, NOW)).toHaveLength(1);
   for (const somebody of [firm.lead, other.technician, await makeActor(firm.employer, ["technician"])]) {
     expect(await listOwnSittings(somebody)).toEqual([]);
@@ -154,7 +158,7 @@ test("the counter and the trail are the firm's own, and its administrator's alon
   }
   expect(await getCounter(other.administrator)).toEqual({ due: [], settled: [], orders: [] });
   const { due, settled } = await getCounter(firm.administrator);
-  expect([due.length, settled.length]).toEqual([1, 3]);
+  expect([due.length, settled.length]).toEqual([1, 4]);
   const others = (await listTrail(other.administrator, null)).map(({ subjectTable }) => subjectTable);
   expect(others).toEqual(Array(ROLES.length).fill("role_grants"));
 });
@@ -189,4 +193,19 @@ describe("a file of a case", () => {
     expect(await ask(await makeActor(firm.employer, ["technician"]))).toBeNull();
     expect(await ask(firm.technician, "../a.sigmf-data")).toBeNull();
   });
+});
+
+test("a written account is an assessor's to read for judging, and not of who wrote it", async () => {
+  const { id } = chain.written;
+  for (const role of ROLES) {
+    const outcome = role === "assessor" ? "given" : role === "decider" ? "none" : "refused";
+    expect(await outcomeOf(getJudging(firm[role], id)), role).toBe(outcome);
+    expect(await outcomeOf(listJudging(firm[role])), role).toBe(outcome);
+    expect(await outcomeOf(getJudging(other[role], id)), role).not.toBe("given");
+    expect(await outcomeOf(listJudging(other[role])), role).not.toBe("given");
+  }
+  const both = { ...firm.technician, roles: ["technician" as const, "assessor" as const] };
+  expect(await getJudging(both, id)).toBeNull();
+  expect(await listJudging(both)).toEqual([]);
+  for (const wrong of ["no id", chain.record.caseId]) expect(await getJudging(firm.assessor, wrong)).toBeNull();
 });

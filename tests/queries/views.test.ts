@@ -5,15 +5,18 @@ import { getCaseProgress } from "@/lib/queries/getCaseProgress";
 import { getCertificate } from "@/lib/queries/getCertificate";
 import { getCounter, getOrder } from "@/lib/queries/getCounter";
 import { getDecisionDesk } from "@/lib/queries/getDecisionDesk";
+import { getJudging } from "@/lib/queries/getJudging";
 import { getMarkingRecord } from "@/lib/queries/getMarkingRecord";
 import { getModule } from "@/lib/queries/getModule";
 import { getPublicVerification } from "@/lib/queries/getPublicVerification";
 import { getRelease } from "@/lib/queries/getRelease";
 import { getSitting } from "@/lib/queries/getSitting";
 import { listCertificates } from "@/lib/queries/listCertificates";
+import { listJudging } from "@/lib/queries/listJudging";
 import { listModules } from "@/lib/queries/listModules";
 import { listPeople } from "@/lib/queries/listPeople";
 import { listQueue } from "@/lib/queries/listQueue";
+import { listQuestions } from "@/lib/queries/listQuestions";
 import { listRecords } from "@/lib/queries/listRecords";
 import { listSittings } from "@/lib/queries/listSittings";
 import { listTrail } from "@/lib/queries/listTrail";
@@ -46,7 +49,7 @@ const VIEWS: Record<string, View> = {
   },
   getCase: {
     run: ({ technician }, { open }) => getCase(technician, open.id, NOW),
-    fields: `answers* byClock code endsAt files[].mediaType files[].name files[].sha256 files[].sizeBytes handedInAt id
+    fields: `answers* brief byClock code endsAt files[].mediaType files[].name files[].sha256 files[].sizeBytes handedInAt id
       number ofCases openedAt plan.id plan.kind plan.minutes plan.title revision savedAt serverNow sittingId sittingNumber
       state title view*`,
   },
@@ -73,7 +76,8 @@ const VIEWS: Record<string, View> = {
         [decider, { ...lead, roles: ["decider" as const] }].map((who) => getDecisionDesk(who, sitting.id, NOW)),
       ),
     fields: `[].bars[] [].decidability.decidable [].decidability.requirementMet [].mayDecide [].outsideLine
-      [].questions[].askedAt [].questions[].caseId [].questions[].quantity [].questions[].words [].records[].byClock
+      [].questions[].answer [].questions[].askedAt [].questions[].caseId [].questions[].quantity
+      [].questions[].words [].records[].byClock
       [].records[].caseId [].records[].caseNumber [].records[].checkId [].records[].endsAt [].records[].handedInAt
       [].records[].met [].records[].needs [].records[].openedAt [].records[].quantities* [].records[].rows*
       [].records[].withinCount [].records[].words [].sitting*`,
@@ -81,8 +85,8 @@ const VIEWS: Record<string, View> = {
   getMarkingRecord: {
     run: ({ technician }, { record }) => getMarkingRecord(technician, record.caseId),
     fields: `byClock captureSha256 caseId caseNumber checkId checkTitle code durationMs engineVersion fingerprint
-      freshCases handedInAt id isMine markedAt marking met moduleTitle needs quantities* questions[].askedAt
-      questions[].id questions[].quantity questions[].words reason release rows* sequence sittingId sittingNumber
+      freshCases handedInAt id isMine judge markedAt marking mayAnswer met moduleTitle needs quantities*
+      questions[].answer questions[].answeredAt questions[].answeredBy questions[].askedAt questions[].id questions[].quantity questions[].words reason release rows* sequence sittingId sittingNumber
       sittingState technician withinCount words workings*`,
   },
   getModule: {
@@ -112,6 +116,19 @@ const VIEWS: Record<string, View> = {
       [].checks[].next.opensAt [].checks[].next.reason [].checks[].next.state [].checks[].plan* [].checks[].required
       [].code [].decidedAt [].decider [].decisionReason [].fingerprint [].frontMatter* [].id [].isMine [].lastDay
       [].moduleId [].number [].outcome [].release [].startedAt [].state [].technician [].title [].tree*`,
+  },
+  getJudging: {
+    run: ({ assessor }, { written }) => getJudging(assessor, written.id),
+    fields: `brief byClock caseId caseNumber checkTitle code handedInAt isJudged lines[].critical lines[].label
+      lines[].of lines[].text moduleTitle sittingNumber technician words`,
+  },
+  listJudging: {
+    run: ({ assessor }) => listJudging(assessor),
+    fields: "[].caseId [].caseNumber [].checkTitle [].code [].handedInAt [].sittingNumber [].technician",
+  },
+  listQuestions: {
+    run: ({ assessor }) => listQuestions(assessor),
+    fields: "[].askedAt [].caseId [].checkTitle [].code [].id [].quantity [].sittingNumber [].technician [].words",
   },
   listCertificates: {
     run: ({ lead }) => listCertificates(lead, NOW),

@@ -1,5 +1,13 @@
 import { makeCertificate, makeDecision } from "../support/certified";
-import { makeAssignment, makeCase, makeMarkingRecord, makeModule, makeRelease, makeSitting } from "../support/chain";
+import {
+  makeAssignment,
+  makeCase,
+  makeMarkingRecord,
+  makeModule,
+  makeRelease,
+  makeSitting,
+  makeWrittenHandIn,
+} from "../support/chain";
 import { minutesFrom, NOW } from "../support/clock";
 import type { Firm } from "../support/factories";
 import { insert, ownerRows } from "../support/owner";
@@ -22,6 +30,7 @@ export async function makeWholeChain(firm: Firm) {
   const open = await makeOpenCaseWithFile(firm, second);
   const waiting = await makeSitting(firm, { assignment: await makeAssignment(firm, { release }) });
   await makeMarkingRecord(firm, { sitting: waiting, met: false });
+  const written = await makeWrittenHandIn(firm);
   const due = await makeAssignment(firm, { release });
   const [order] = await ownerRows<{ id: string }>("SELECT order_id AS id FROM fees WHERE assignment_id = $1", [
     assignment.id,
@@ -37,6 +46,7 @@ export async function makeWholeChain(firm: Firm) {
     second,
     open,
     waiting,
+    written,
     due,
     order: order!,
   };

@@ -4,7 +4,7 @@ import type { FrontMatter } from "@/lib/mdx/frontMatter";
 import { daysFrom, minutesFrom, NOW } from "./clock";
 import type { Firm } from "./factories";
 import { insert, ownerRows } from "./owner";
-import { checkPlan, frontMatter, LAG, markedRow, publicCase, TREE } from "./samples";
+import { checkPlan, frontMatter, LAG, markedRow, publicCase, TREE, writtenCase, writtenPlan } from "./samples";
 
 /** Rows of the chain of records; people are in factories.ts, decision and certificate in certified.ts. */
 export type Row<T = object> = { id: string } & T;
@@ -165,6 +165,31 @@ export async function makeOpenCase(
     ...columns,
   });
   return opened;
+}
+
+/** A case of a written account of two lines, drawn and open, in a sitting of that check alone. */
+export async function makeWrittenCase(firm: Firm, given: { sitting?: Row } = {}) {
+  const sitting = given.sitting ?? (await makeWrittenSitting(firm));
+  const asked = await makeCase(firm, { sitting, checkId: "account", kind: "written" });
+  return makeOpenCase(firm, { case: asked, view: writtenCase() });
+}
+
+async function makeWrittenSitting(firm: Firm) {
+  const checks = [writtenPlan()];
+  const release = await makeRelease(firm, {
+    checks,
+    frontMatter: frontMatter({
+      sitting: { days: 30, freshCases: 0, waitHours: 24 },
+      require: { all: checks.map(({ id }) => id), some: null },
+    }),
+  });
+  return makeSitting(firm, { assignment: await makeAssignment(firm, { release }) });
+}
+
+/** The same handed in, with an answer to the first line. */
+export async function makeWrittenHandIn(firm: Firm, given: { sitting?: Row } = {}) {
+  const answers = { "account.seen": "Two receivers shadowed by the crane." };
+  return makeHandIn(firm, { case: await makeWrittenCase(firm, given), answers });
 }
 
 export async function makeHandIn(

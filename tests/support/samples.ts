@@ -15,6 +15,58 @@ export const checkPlan = (over: Partial<CheckPlan> = {}): CheckPlan => ({
   ...over,
 });
 
+/** A written account of two lines, the first critical. */
+export const writtenPlan = (): CheckPlan => ({
+  id: "account",
+  kind: "written",
+  version: 1,
+  title: "What you saw",
+  minutes: 20,
+  needs: null,
+  parameters: {
+    lines: [
+      { id: "seen", label: "what you saw", critical: true },
+      { id: "done", label: "what you did", critical: false },
+    ],
+  },
+  quantities: [
+    { of: "seen", tolerance: null, critical: true },
+    { of: "done", tolerance: null, critical: false },
+  ],
+});
+
+export const writtenCase = (): PublicCase =>
+  publicCase({
+    kind: "written",
+    title: "What you saw",
+    sections: [
+      {
+        id: "account",
+        title: "Your account",
+        fields: [
+          { id: "seen", label: "what you saw", input: "text", longest: 2000, quantity: "seen" },
+          { id: "done", label: "what you did", input: "text", longest: 2000, quantity: "done" },
+        ],
+      },
+    ],
+    tolerances: [
+      {
+        quantity: "seen",
+        label: "what you saw",
+        tolerance: "judged",
+        critical: true,
+        reason: "Judged by an assessor.",
+      },
+      {
+        quantity: "done",
+        label: "what you did",
+        tolerance: "judged",
+        critical: false,
+        reason: "Judged by an assessor.",
+      },
+    ],
+  });
+
 export const frontMatter = (over: Partial<FrontMatter> = {}): FrontMatter => ({
   code: "TEST-1",
   title: "Prove a satellite",

@@ -3,25 +3,34 @@ import { Empty } from "@/components/ui/Empty";
 import { Glyph } from "@/components/ui/Glyph";
 import { LinkKey } from "@/components/ui/LinkKey";
 import { formatInstant } from "@/components/ui/formatDay";
+import { SectionHead } from "@/components/ui/SectionHead";
 import { RowHead, Table, Td, Th, Tr } from "@/components/ui/Table";
 import { orNotFound } from "@/lib/auth/orNotFound";
 import { requireActor } from "@/lib/auth/requireActor";
+import { listJudging } from "@/lib/queries/listJudging";
+import { listQuestions } from "@/lib/queries/listQuestions";
 import { listQueue } from "@/lib/queries/listQueue";
+import { JudgingList } from "./_components/JudgingList";
+import { QuestionList } from "./_components/QuestionList";
 
 export const metadata: Metadata = { title: "Queue" };
 
 export default async function QueuePage({ params }: { params: Promise<{ employer: string }> }) {
   const { employer } = await params;
-  const rows = await orNotFound(listQueue(await requireActor(employer)));
+  const actor = await requireActor(employer);
+  const rows = await orNotFound(listQueue(actor));
+  const judging = await listJudging(actor);
+  const questions = await listQuestions(actor);
   return (
     <div className="page py-8 desk:py-10">
       <h1 className="text-h1">Queue</h1>
-      <p className="mt-2 max-w-measure text-lead text-ink-2">
-        Sittings that wait for a decision, the longest wait first.
-      </p>
-      <div className="mt-6">
+      <p className="mt-2 max-w-measure text-lead text-ink-2">What waits for a person, the longest wait first.</p>
+      <JudgingList employer={employer} rows={judging} />
+      <QuestionList employer={employer} rows={questions} />
+      <section className="mt-8">
+        <SectionHead title="To be decided" />
         {rows.length === 0 ? (
-          <Empty title="No sitting waits">
+          <Empty title="No sitting waits for a decision">
             A sitting comes here when every check of it has its marking record, or its last day has passed.
           </Empty>
         ) : (
@@ -65,7 +74,7 @@ export default async function QueuePage({ params }: { params: Promise<{ employer
             </tbody>
           </Table>
         )}
-      </div>
+      </section>
     </div>
   );
 }

@@ -97,6 +97,7 @@ function Words({ desk }: { desk: DecisionDeskView }) {
         <p key={question.askedAt} className="max-w-measure">
           <strong className="font-semibold">Question, {question.quantity}:</strong> {question.words}{" "}
           <span className="text-dense text-ink-2">{formatInstant(question.askedAt)}</span>
+          {question.answer && <span className="block whitespace-pre-line">Answer: {question.answer}</span>}
         </p>
       ))}
     </div>

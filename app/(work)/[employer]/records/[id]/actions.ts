@@ -2,6 +2,7 @@
 import { revalidatePath } from "next/cache";
 import { z } from "zod";
 import { action } from "@/lib/auth/action";
+import { answerQuestion } from "@/lib/commands/answerQuestion";
 import { askQuestion } from "@/lib/commands/askQuestion";
 
 const question = z.object({
@@ -13,4 +14,12 @@ const question = z.object({
 export const askQuestionAction = action(question, async ({ record, quantity, words }, actor) => {
   await askQuestion(actor, { markingRecordId: record, quantity, words });
   revalidatePath(`/${actor.employerSlug}/records`, "layout");
+});
+
+const answer = z.object({ question: z.uuid(), words: z.string().trim().min(1, "Write your answer.").max(2000) });
+
+export const answerQuestionAction = action(answer, async ({ question: questionId, words }, actor) => {
+  await answerQuestion(actor, { questionId, words });
+  revalidatePath(`/${actor.employerSlug}/records`, "layout");
+  revalidatePath(`/${actor.employerSlug}/queue`, "layout");
 });

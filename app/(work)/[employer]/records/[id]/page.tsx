@@ -8,7 +8,7 @@ import { WorkBar } from "@/components/ui/WorkBar";
 import { orNotFound } from "@/lib/auth/orNotFound";
 import { requireActor } from "@/lib/auth/requireActor";
 import { getMarkingRecord } from "@/lib/queries/getMarkingRecord";
-import { askQuestionAction } from "./actions";
+import { answerQuestionAction, askQuestionAction } from "./actions";
 
 export const metadata: Metadata = { title: "Marking record" };
 
@@ -46,7 +46,7 @@ export default async function RecordPage({ params }: { params: Promise<{ employe
             <LinkKey href={`/${employer}/sittings/${record.sittingId}`}>Back to the sitting</LinkKey>
           </div>
         </div>
-        <RecordSide employer={employer} record={record} ask={askQuestionAction} />
+        <RecordSide employer={employer} record={record} ask={askQuestionAction} answer={answerQuestionAction} />
       </div>
     </>
   );

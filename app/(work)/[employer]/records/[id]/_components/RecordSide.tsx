@@ -6,22 +6,25 @@ import { Ledger } from "@/components/ui/Ledger";
 import { SectionHead } from "@/components/ui/SectionHead";
 import type { MarkingRecordView } from "@/lib/queries/getMarkingRecord";
 import { AskQuestion } from "./AskQuestion";
+import { Questions } from "./Questions";
 
 /** How it was computed, from which release, and what to do if one disagrees. */
 export function RecordSide({
   employer,
   record,
   ask,
+  answer,
 }: {
   employer: string;
   record: MarkingRecordView;
   ask: FormAction;
+  answer: FormAction;
 }) {
   const undecided = record.sittingState === "sitting" || record.sittingState === "for decision";
   return (
     <aside className="grid content-start gap-7">
       <section>
-        <SectionHead title="How this was computed" />
+        <SectionHead title={record.judge ? "Who judged this" : "How this was computed"} />
         <Ledger
           narrow
           rows={[
@@ -29,8 +32,8 @@ export function RecordSide({
               label: "Handed in",
               value: `${formatInstant(record.handedInAt, { seconds: true })}${record.byClock ? ", by the clock" : ""}`,
             },
-            { label: "Computed", value: formatInstant(record.markedAt, { seconds: true }) },
-            { label: "By", value: `${record.marking}, engine ${record.engineVersion}` },
+            { label: record.judge ? "Judged" : "Computed", value: formatInstant(record.markedAt, { seconds: true }) },
+            { label: "By", value: record.judge ?? `${record.marking}, engine ${record.engineVersion}` },
             ...(record.captureSha256
               ? [
                   {
@@ -39,24 +42,11 @@ export function RecordSide({
                   },
                 ]
               : []),
-            { label: "Time taken", value: `${(record.durationMs / 1000).toFixed(2)} s` },
+            ...(record.judge ? [] : [{ label: "Time taken", value: `${(record.durationMs / 1000).toFixed(2)} s` }]),
           ]}
         />
         {record.sequence > 1 && <p className="mt-3 text-dense">Marked again: {record.reason}</p>}
-        <details className="mt-3">
-          <summary className="cursor-pointer py-1 text-dense font-semibold pointer-coarse:py-3">Workings</summary>
-          <dl className="mt-2">
-            {record.workings.map((line, index) => (
-              <div key={index} className="border-b-hair border-rule py-1.5 text-dense figures">
-                <dt className="text-ink-2">{line.label}</dt>
-                <dd>{line.value}</dd>
-              </div>
-            ))}
-          </dl>
-        </details>
-        <p className="mt-3 text-dense text-ink-2">
-          The same case and engine give the same numbers. This case is not used again, so all of it is shown.
-        </p>
+        {!record.judge && <Workings lines={record.workings} />}
       </section>
       {record.words && (
         <section>
@@ -75,14 +65,7 @@ export function RecordSide({
       </section>
       <section>
         <SectionHead title="If you disagree" />
-        {record.questions.map((question) => (
-          <p key={question.id} className="mt-3 border-b-hair border-rule pb-3 text-dense">
-            <strong className="font-semibold">
-              {record.quantities.find(({ of }) => of === question.quantity)?.label ?? question.quantity}:
-            </strong>{" "}
-            {question.words} <span className="text-ink-2">{formatInstant(question.askedAt)}</span>
-          </p>
-        ))}
+        <Questions employer={employer} record={record} answer={answer} />
         {record.isMine && undecided ? (
           <AskQuestion employer={employer} recordId={record.id} quantities={record.quantities} action={ask} />
         ) : (
@@ -96,5 +79,26 @@ export function RecordSide({
         )}
       </section>
     </aside>
+  );
+}
+
+function Workings({ lines }: { lines: MarkingRecordView["workings"] }) {
+  return (
+    <>
+      <details className="mt-3">
+        <summary className="cursor-pointer py-1 text-dense font-semibold pointer-coarse:py-3">Workings</summary>
+        <dl className="mt-2">
+          {lines.map((line, index) => (
+            <div key={index} className="border-b-hair border-rule py-1.5 text-dense figures">
+              <dt className="text-ink-2">{line.label}</dt>
+              <dd>{line.value}</dd>
+            </div>
+          ))}
+        </dl>
+      </details>
+      <p className="mt-3 text-dense text-ink-2">
+        The same case and engine give the same numbers. This case is not used again, so all of it is shown.
+      </p>
+    </>
   );
 }

@@ -30,7 +30,7 @@ export function RecordTable({ record }: { record: MarkingRecordView }) {
               const wash = row.within ? null : "minus";
               return (
                 <Fragment key={index}>
-                  <Tr wash={wash} joined={row.reason !== null}>
+                  <Tr wash={wash} joined={row.reason !== null || isAccount(row)}>
                     <RowHead>
                       {row.subject && <span className="plate mr-3">{row.subject}</span>}
                       <span className="font-normal">{row.label}</span>
@@ -51,6 +51,11 @@ export function RecordTable({ record }: { record: MarkingRecordView }) {
                       <Result row={row} />
                     </Td>
                   </Tr>
+                  {isAccount(row) && (
+                    <ReasonRow columns={COLUMNS} label="Handed in" wash={wash ?? undefined}>
+                      <span className="whitespace-pre-line">{row.handedIn}</span>
+                    </ReasonRow>
+                  )}
                   {row.reason && (
                     <ReasonRow columns={COLUMNS} wash={wash ?? undefined}>
                       {wholeNumbers(row.reason)}
@@ -90,6 +95,7 @@ function PhoneRow({ row }: { row: MarkedRow }) {
         <Pair term="Difference">{row.difference ?? "–"}</Pair>
         <Pair term="Tolerance">{row.tolerance}</Pair>
       </dl>
+      {isAccount(row) && <p className="mt-2 text-dense whitespace-pre-line">{row.handedIn}</p>}
       {row.offByTolerances !== null && (
         <div className="mt-2">
           <Gauge offByTolerances={row.offByTolerances} within={row.within} />
@@ -113,9 +119,14 @@ function Pair({ term, children }: { term: string; children: React.ReactNode }) {
   );
 }
 
+/** More than a word or a number: it stands in a line of its own. */
+const isAccount = (row: MarkedRow) => row.understood === null && row.handedIn.trim().length > LONGEST_WORD;
+const LONGEST_WORD = 60;
+
 /** What was understood; the text as typed stands under it where it reads differently. */
 function HandedIn({ row }: { row: MarkedRow }) {
   const typed = row.handedIn.trim();
+  if (isAccount(row)) return "text";
   if (row.understood === null) return typed || "–";
   const plain = (text: string) => text.replace(/[\s\u00a0\u2009\u202f]/g, "");
   return (
