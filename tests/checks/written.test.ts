@@ -3,10 +3,14 @@ import { judgeLines } from "@/lib/checks/written/judgeLines";
 import type { WrittenParameters } from "@/lib/checks/written/parameters";
 import { written } from "@/lib/checks/written/written";
 import type { CheckPlan } from "@/lib/checks/kind";
-import { writtenPlan } from "../support/samples";
-import { seedOf } from "./planOf";
+import { planOf, seedOf } from "./planOf";
 
-const plan = writtenPlan() as CheckPlan<WrittenParameters>;
+const plan: CheckPlan<WrittenParameters> = planOf(written, {
+  lines: [
+    { id: "seen", label: "what you saw", critical: true },
+    { id: "done", label: "what you did", critical: false },
+  ],
+});
 
 test("the case asks for each line and says that a person judges it", () => {
   const { publicCase, truth } = written.build(seedOf(1), plan);

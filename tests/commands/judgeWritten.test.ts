@@ -51,10 +51,7 @@ test("makes the marking record, with each line's text, verdict and reason, and w
 
 test("completes the sitting: the technician is told of the record, the deciders that it is theirs", async () => {
   await judge();
-  expect((await subjects()).sort()).toEqual([
-    expect.stringMatching("^For decision"),
-    "Marked: What you saw",
-  ]);
+  expect((await subjects()).sort()).toEqual([expect.stringMatching("^For decision"), "Marked: What you saw"]);
 });
 
 test("judged twice, also at once, the first record stays and nobody is told twice", async () => {
