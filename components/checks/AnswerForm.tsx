@@ -134,4 +134,4 @@ function AnswerField({ spec, row, value, onChange }: AnswerFieldProps) {
 
 /** A level in dBm has a sign as a rule; of frequencies a Doppler has one, a step or a bin has none. */
 const isSigned = ({ id, unit, signed }: FieldSpec) => signed || SIGNED.has(id) || unit === "dBm";
-const SIGNED: ReadonlySet<string> = new Set(["doppler", "value", "mean", "east", "north"]);
+const SIGNED: ReadonlySet<string> = new Set(["doppler", "east", "north"]);

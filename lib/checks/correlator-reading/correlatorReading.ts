@@ -5,6 +5,7 @@ import { mark } from "./mark";
 import { correlatorReadingParameters, type CorrelatorReadingParameters } from "./parameters";
 import { correlatorReadingCautions, correlatorReadingQuantities } from "./quantities";
 import { solve } from "./solve";
+import { trial } from "./trial";
 import { wrongMethods } from "./wrongMethods";
 
 /** A1: read one correlator trace. */
@@ -21,4 +22,5 @@ export const correlatorReading: CheckKind<CorrelatorReadingParameters, Correlato
   mark,
   solve: ({ publicCase }) => solve(publicCase),
   wrongMethods,
+  trial,
 };

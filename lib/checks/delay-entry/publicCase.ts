@@ -100,6 +100,7 @@ const ENTRY_FIELDS: readonly FieldSpec[] = [
     label: "Value to enter, with its sign",
     input: "number",
     unit: "ns",
+    signed: true,
     help: "As the receiver's sheet wants it.",
     quantity: "entry",
   },

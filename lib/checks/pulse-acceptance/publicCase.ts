@@ -83,7 +83,7 @@ const BRIEF = [
 ];
 
 const logFields = ({ shortS, longS }: PulseAcceptanceTruth["intervals"]): readonly FieldSpec[] => [
-  { id: "mean", label: "Mean time error, with its sign", input: "number", unit: "ns", quantity: "mean" },
+  { id: "mean", label: "Mean time error, with its sign", input: "number", unit: "ns", signed: true, quantity: "mean" },
   { id: "maxTe", label: "max|TE|", input: "number", unit: "ns", quantity: "maxTe" },
   {
     id: "mtieShort",

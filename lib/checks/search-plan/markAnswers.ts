@@ -18,10 +18,11 @@ export function markAnswers(
   truth: SearchPlanTruth,
   plan: CheckPlan<SearchPlanParameters>,
   answers: Answers,
+  attainBy: typeof attain = attain,
 ): Marking {
   const asked = askedQuantities(searchPlanQuantities, plan);
   const read = readPlan(answers);
-  const attained = read.plan ? attain(seedHex, truth, read.plan) : null;
+  const attained = read.plan ? attainBy(seedHex, truth, read.plan) : null;
   const mark = (quantity: AskedQuantity): MarkedRow =>
     quantity.id.startsWith("own")
       ? markEstimate(quantity, answers, read, attained)

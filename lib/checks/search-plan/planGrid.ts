@@ -1,6 +1,6 @@
 import { CA_LENGTH_CHIPS } from "@/lib/gnss/constants";
 import { coherentSnr, detectionProbability, falseAlarmPerCell, thresholdSigma2 } from "@/lib/gnss/detection";
-import { planPerformance, type PlanPerformance } from "@/lib/gnss/searchPlan";
+import { planDetection, planPerformance, type PlanPerformance, type SearchPlan } from "@/lib/gnss/searchPlan";
 import type { Random } from "@/lib/numeric/random";
 
 /** What a case asks of a plan. */
@@ -58,24 +58,24 @@ export function losslessDetection(
 export const thresholdFor = (plan: Plan, requirement: Requirement): number =>
   thresholdSigma2(falseAlarmPerCell(requirement.falseAlarmPerSearch, cellsOf(plan, requirement)), plan.sums);
 
+type Drawn = [plan: Plan, requirement: Requirement, thresholdSigma2: number, draws: number, random: Random];
+
 /** What a plan attains, by draws. */
-export const performanceOf = (
-  plan: Plan,
-  requirement: Requirement,
-  thresholdInSigma2: number,
-  draws: number,
-  random: Random,
-): PlanPerformance =>
-  planPerformance({
-    cn0DbHz: requirement.cn0DbHz,
-    coherentMs: plan.coherentMs,
-    sums: plan.sums,
-    dopplerBinHz: plan.dopplerBinHz,
-    codeStepChips: plan.codeStepChips,
-    windowHz: requirement.windowHz,
-    correlators: requirement.correlators,
-    bitEdgesKnown: false,
-    thresholdSigma2: thresholdInSigma2,
-    draws,
-    random,
-  });
+export const performanceOf = (...drawn: Drawn): PlanPerformance => planPerformance(searchPlanOf(...drawn));
+
+/** Its detection alone, some five times as quickly; within 1e-6. */
+export const quickDetection = (...drawn: Drawn): number => planDetection(searchPlanOf(...drawn));
+
+const searchPlanOf = (...[plan, requirement, thresholdInSigma2, draws, random]: Drawn): SearchPlan => ({
+  cn0DbHz: requirement.cn0DbHz,
+  coherentMs: plan.coherentMs,
+  sums: plan.sums,
+  dopplerBinHz: plan.dopplerBinHz,
+  codeStepChips: plan.codeStepChips,
+  windowHz: requirement.windowHz,
+  correlators: requirement.correlators,
+  bitEdgesKnown: false,
+  thresholdSigma2: thresholdInSigma2,
+  draws,
+  random,
+});

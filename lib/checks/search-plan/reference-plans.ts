@@ -25,7 +25,27 @@ export function plansWithin(requirement: Requirement, detection: number, timeLim
 function ratePlan(plan: Rated, requirement: Requirement, detection: number): ReferencePlan | null {
   const threshold = thresholdFor(plan, requirement);
   if (losslessDetection(plan, requirement, threshold) < detection) return null;
-  const random = seededRandom(STREAM_SEED, "search-plan@1/grid");
-  const attained = performanceOf(plan, requirement, threshold, DRAWS, random).detection;
+  const attained = attainedBy(plan, requirement, threshold);
   return attained < detection ? null : { ...plan, thresholdSigma2: threshold, detection: attained };
 }
+
+function attainedBy(plan: Rated, requirement: Requirement, threshold: number): number {
+  if (!isSame(requirement, latest.requirement)) latest = { requirement, attained: new Map() };
+  const { coherentMs, sums, dopplerBinHz, codeStepChips } = plan;
+  const name = [coherentMs, sums, dopplerBinHz, codeStepChips].join();
+  const known = latest.attained.get(name);
+  if (known !== undefined) return known;
+  const random = seededRandom(STREAM_SEED, "search-plan@1/grid");
+  const { detection } = performanceOf(plan, requirement, threshold, DRAWS, random);
+  latest.attained.set(name, detection);
+  return detection;
+}
+
+/** A case is drawn, worked and worked wrongly on the same grid: what its plans attain is kept until another requirement comes. */
+let latest: { requirement: Requirement | null; attained: Map<string, number> } = {
+  requirement: null,
+  attained: new Map(),
+};
+
+const isSame = (a: Requirement, b: Requirement | null): boolean =>
+  b !== null && a.cn0DbHz === b.cn0DbHz && a.windowHz === b.windowHz && a.falseAlarmPerSearch === b.falseAlarmPerSearch; // all that the detection of a plan hangs on

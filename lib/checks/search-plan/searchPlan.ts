@@ -5,6 +5,7 @@ import { mark } from "./mark";
 import { searchPlanParameters, type SearchPlanParameters } from "./parameters";
 import { searchPlanCautions, searchPlanQuantities } from "./quantities";
 import { solve } from "./solve";
+import { trial } from "./trial";
 import { wrongMethods } from "./wrongMethods";
 
 /** B2: a search plan, open design. */
@@ -21,4 +22,5 @@ export const searchPlan: CheckKind<SearchPlanParameters, SearchPlanTruth> = {
   mark,
   solve: ({ publicCase }) => solve(publicCase),
   wrongMethods,
+  trial,
 };
