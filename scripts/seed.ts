@@ -62,6 +62,13 @@ const PEOPLE: readonly Seeded[] = [
   { name: "Cato Wynn", email: "cato.wynn@operator.example", says: "operator", operator: true },
 ];
 
+/** The firm's procedures, each with the lead who keeps it. */
+const MODULES = [
+  ["SBW-T1", "Ines Tarrow"],
+  ["SBW-I1", "Sefton Braye"],
+  ["SBW-R2", "Ines Tarrow"],
+] as const;
+
 await transact(null, async (transaction) => {
   if (await Employer.count({ transaction })) return;
   const works = await Employer.create({ slug: "saltmarsh", name: "Saltmarsh Beacon Works" }, { transaction });
@@ -78,15 +85,15 @@ await transact(null, async (transaction) => {
       await RoleGrant.create({ personId: person.id, employerId, role, outsideLine }, { transaction });
     }
   }
-  await seedModule(works.id, ids.get("Ines Tarrow")!, transaction);
+  for (const [code, keeper] of MODULES) await seedModule(works.id, code, ids.get(keeper)!, transaction);
 });
 await tellSignIns();
 await db.close();
 
-async function seedModule(employerId: string, leadId: string, transaction: Transaction) {
-  const file = path.join(import.meta.dirname, "..", "content", "modules", "sbw-r2.mdx");
+async function seedModule(employerId: string, code: string, leadId: string, transaction: Transaction) {
+  const file = path.join(import.meta.dirname, "..", "content", "modules", `${code.toLowerCase()}.mdx`);
   const source = await readFile(file, "utf8");
-  const begun = await Module.create({ employerId, code: "SBW-R2", createdBy: leadId }, { transaction });
+  const begun = await Module.create({ employerId, code, createdBy: leadId }, { transaction });
   const title = /^title: (.+)$/m.exec(source)![1]!;
   await Draft.create({ moduleId: begun.id, title, source, savedBy: leadId }, { transaction });
   await db.query(`INSERT INTO draft_writers (module_id, person_id) VALUES (:moduleId, :leadId)`, {

@@ -46,6 +46,16 @@ test("a module of the demonstration has no fault and no warning, and requires wh
   ]);
 });
 
+test.each([
+  ["sbw-t1", ["sky-view", "chain", "delay-entry", "pulse-acceptance"]],
+  ["sbw-i1", ["lost-decibels", "interferer", "stand-off", "jammed-or-not", "locate"]],
+])("%s of the demonstration has no fault and no warning", async (name, kinds) => {
+  const { module, problems } = await readModule(await readFile(`content/modules/${name}.mdx`, "utf8"));
+  expect(problems).toEqual([]);
+  expect(module?.checks.map(({ kind }) => kind)).toEqual(kinds);
+  expect(module?.frontMatter.require).toEqual({ all: module?.checks.map(({ id }) => id), some: null });
+});
+
 test("the text of a new module can be released as it stands, but for its own words", async () => {
   const { problems } = await readModule(startingSource("NEW-1", 'A "new" module: what is this?'));
   expect(problems).toEqual([]);
