@@ -44,7 +44,7 @@ function drawTruth(parameters: JammedOrNotParameters, verdict: Verdict, random: 
   const times: SkyTimes = {
     startUnixMs: Date.parse(drawStart(random)),
     intervalS: INTERVAL_S,
-    readings: (random.integer(...parameters.minutes) * 60) / INTERVAL_S,
+    readings: (random.integer(...parameters.span) * 60) / INTERVAL_S,
     trackEvery: TRACK_EVERY,
   };
   const sky = drawSky(random, times);

@@ -2,14 +2,14 @@ import type { ParameterSpec } from "../kind";
 
 /** Ends of ranges are included. */
 export type JammedOrNotParameters = {
-  minutes: readonly [number, number];
+  span: readonly [number, number];
   depth: readonly [number, number];
 };
 
 /** Ranges: common practice, no source; below 4 dB a receiver's own wander hides what happens. */
 export const jammedOrNotParameters: readonly ParameterSpec[] = [
   {
-    name: "minutes",
+    name: "span",
     label: "Length of the log",
     help: "Whole minutes, a reading each 5 s.",
     input: "range",

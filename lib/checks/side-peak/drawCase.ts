@@ -39,11 +39,11 @@ const REFLECTION = { ratio: [0.25, 0.5], extraChips: [0.12, 0.35] } as const;
 /** Draws until the peaks are clear, a right reading is possible and no named wrong method lands on it by chance. */
 export function drawCase(seedHex: string, parameters: SidePeakParameters): DrawnCase {
   const first = seededRandom(seedHex, "side-peak@1/case");
-  const onMain = first.uniform() * 100 < parameters.onMain; // before the draws, so that refusing does not move the share
+  const mainShare = first.uniform() * 100 < parameters.mainShare; // before the draws, so that refusing does not move the share
   const side = first.pick(["earlier", "later"] as const);
   for (let draws = 1; draws <= 200; draws++) {
     const random = seededRandom(seedHex, `side-peak@1/draw-${draws}`);
-    const truth = drawTruth(parameters, onMain ? "main" : side, random);
+    const truth = drawTruth(parameters, mainShare ? "main" : side, random);
     if (truth) return { truth, draws };
   }
   throw new Error("side-peak: no fair trace in 200 draws");

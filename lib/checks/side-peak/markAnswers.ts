@@ -55,9 +55,9 @@ function markPeak({ tracked, trackedLagChips, peaks }: SidePeakTruth, quantity: 
   });
 }
 
-function errorOf(onMain: boolean, value: string): string {
+function errorOf(mainShare: boolean, value: string): string {
   if (value === "reflection") return "taken for a reflection";
-  return onMain ? "main peak called false" : "side peak taken for the main one";
+  return mainShare ? "main peak called false" : "side peak taken for the main one";
 }
 
 const workingsOf = (truth: SidePeakTruth): Marking["workings"] => [

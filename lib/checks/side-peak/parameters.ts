@@ -4,7 +4,7 @@ import type { ParameterSpec } from "../kind";
 export type SidePeakParameters = {
   cn0T: readonly [number, number];
   bandwidth: readonly [number, number];
-  onMain: number;
+  mainShare: number;
 };
 
 /** Ranges: common practice, no source; below 33 dB noise moves the side peaks by more than a careful reading may be off. */
@@ -32,7 +32,7 @@ export const sidePeakParameters: readonly ParameterSpec[] = [
     default: [6, 16],
   },
   {
-    name: "onMain",
+    name: "mainShare",
     label: "Share of cases on the main peak",
     help: "So many cases out of a hundred are tracked rightly. The form does not show which.",
     input: "number",

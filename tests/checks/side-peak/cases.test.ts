@@ -40,9 +40,9 @@ test("seed and answers alone make the marking", () => {
 test("all three locks occur, about a third of them on the main peak", () => {
   const locks = seeds(120).map((seed) => drawCase(seed, plan.parameters).truth.tracked);
   // 42 +- 5 of 120 draws at 35 % (binomial); four standard deviations.
-  const onMain = locks.filter((one) => one === "main").length;
-  expect(onMain).toBeGreaterThanOrEqual(21);
-  expect(onMain).toBeLessThanOrEqual(63);
+  const mainShare = locks.filter((one) => one === "main").length;
+  expect(mainShare).toBeGreaterThanOrEqual(21);
+  expect(mainShare).toBeLessThanOrEqual(63);
   expect(new Set(locks)).toEqual(new Set(["main", "earlier", "later"]));
 });
 
@@ -66,8 +66,8 @@ test("what reaches people can be read, and a formula without reading is wrong", 
 });
 
 describe("the public case does not show which peak is tracked", () => {
-  const shapeOf = (onMain: number) => {
-    const { publicCase } = kind.build(seedOf(3), planOf(kind, { onMain }));
+  const shapeOf = (mainShare: number) => {
+    const { publicCase } = kind.build(seedOf(3), planOf(kind, { mainShare }));
     return JSON.stringify({
       ...publicCase,
       data: Object.keys(publicCase.data),
