@@ -17,6 +17,8 @@ export type RawScene = {
   satellites: readonly RawSatellite[];
   /** GPS L1 C/A when left out. */
   signal?: SearchSignal;
+  /** Parts of alternating sign of a chip by its number, where not all chips of the signal have the same. */
+  halvesOfChip?: (chip: number) => number;
   /** Unmodulated carrier: offset from the carrier, level over the strongest satellite. */
   tone?: { offsetHz: number; jamToSignalDb: number };
 };
@@ -29,6 +31,7 @@ export type RawScene = {
 export function rawCapture(scene: RawScene): SampledCapture {
   const { rateHz, ifHz, complex, durationMs, satellites, tone, signal = GPS_L1CA } = scene;
   const { chipRateHz, carrierHz, lengthChips, halvesPerChip } = signal;
+  const halvesOfChip = scene.halvesOfChip ?? (() => halvesPerChip);
   const periodMs = (1000 * lengthChips) / chipRateHz;
   const symbolMs = Math.min(20, 1000 * signal.symbolS);
   const random = seededRandom(scene.seed, "raw");
@@ -54,9 +57,10 @@ export function rawCapture(scene: RawScene): SampledCapture {
     };
     for (const { code, codePhaseChips, dopplerHz, phase, bits, edge, amplitude } of sources) {
       const chips = codePhaseChips + chipRateHz * (1 + dopplerHz / carrierHz) * t;
-      const half = Math.floor((chips % 1) * halvesPerChip) % 2 ? -1 : 1;
+      const chip = Math.floor(chips) % lengthChips;
+      const half = Math.floor((chips % 1) * halvesOfChip(chip)) % 2 ? -1 : 1;
       const bit = bits[Math.floor((t * 1000 + edge) / symbolMs)];
-      add(amplitude * bit * half * code[Math.floor(chips) % lengthChips], phase + (ifHz + dopplerHz) * t);
+      add(amplitude * bit * half * code[chip], phase + (ifHz + dopplerHz) * t);
     }
     if (jam) add(jam.amplitude, (ifHz + jam.hz) * t);
     if (complex) {

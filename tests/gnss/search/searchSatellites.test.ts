@@ -4,6 +4,7 @@ import { searchSatellites } from "@/lib/gnss/search/searchSatellites";
 import { searchSignalOf } from "@/lib/gnss/search/searchSignal";
 import { galileoE1B } from "@/lib/gnss/signals/galileoE1B";
 import { galileoE1C } from "@/lib/gnss/signals/galileoE1C";
+import { gpsL1cP } from "@/lib/gnss/signals/gpsL1cP";
 import { gpsL1Ca } from "@/lib/gnss/signals/gpsL1Ca";
 import { gpsL5I } from "@/lib/gnss/signals/gpsL5I";
 import type { Signal } from "@/lib/gnss/signals/signal";
@@ -79,6 +80,21 @@ test.each<[string, Signal, number, number, number]>([
   expectNear(finding.codePhaseChips, truth.codePhaseChips, 0.15, "code phase in chips");
   expectNear(finding.dopplerHz, truth.dopplerHz, 60, "Doppler in Hz");
   expectNear(finding.cn0DbHz, truth.cn0DbHz, 2, "C/N0 in dB-Hz");
+});
+
+// Four chips of 33 carry a subcarrier of 6.138 MHz (IS-GPS-800, 3.3), which the search leaves out: 20 log(29/33) = -1.1 dB.
+test("finds the pilot of GPS L1C with its two subcarriers and its secondary code", () => {
+  const pilot = searchSignalOf(gpsL1cP);
+  const truth = { prn: 9, codePhaseChips: 3857.2, dopplerHz: -30, cn0DbHz: 45 };
+  const halvesOfChip = (chip: number) => ([0, 4, 6, 29].includes(chip % 33) ? 12 : 2);
+  const scene = { seed: "48".repeat(32), rateHz: 13e6, ifHz: 0, complex: true, durationMs: 15, halvesOfChip };
+  const capture = rawCapture({ ...scene, signal: pilot, satellites: [truth] });
+  const plan = { coherentMs: 10, sums: 1, dopplerHalfWidthHz: 50, falseAlarmPerSearch: 1e-4, bitEdgeStepMs: 5 };
+  const [finding, absent] = searchSatellites(capture, pilot, [9, 10], plan);
+  expect([finding.found, absent.found]).toEqual([true, false]);
+  expectNear(finding.codePhaseChips, truth.codePhaseChips, 0.1, "code phase in chips");
+  expectNear(finding.dopplerHz, truth.dopplerHz, 15, "Doppler in Hz");
+  expectNear(finding.cn0DbHz, truth.cn0DbHz - 1.1, 2, "C/N0 in dB-Hz");
 });
 
 test("a search that tries the bit edges finds what an unlucky start hides", () => {
