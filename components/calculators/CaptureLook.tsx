@@ -5,9 +5,9 @@ import { Notice } from "@/components/ui/Notice";
 import { SectionHead } from "@/components/ui/SectionHead";
 import { Select } from "@/components/ui/Select";
 import { Working } from "@/components/ui/Working";
+import { CaptureSpectrogram } from "./CaptureSpectrogram";
 import type { Reading } from "./reading";
 import { PowerInTime, RepetitionReader } from "./RepetitionReader";
-import { SpectraInTime } from "./SpectraInTime";
 import { SpectrumReader } from "./SpectrumReader";
 import { useCapture } from "./useCapture";
 import { useLook } from "./useLook";
@@ -20,18 +20,23 @@ type CaptureLookProps = {
 };
 
 const FULL_SCALE = 127 * 127; // |x|^2 at 0 dB
-/** Noise bandwidth of the windows: two bins of the averaged spectrum, one and a half of the spectra in time. */
+/** Noise bandwidth of the window: two bins. */
 const POINTS = [512, 2048, 8192, 65_536].map((points) => ({ value: String(points), bins: 2 / points }));
-const ROW_POINTS = [32, 64, 128, 256, 1024].map((points) => ({ value: String(points), bins: 1.5 / points }));
+const STRETCHES = [
+  { value: "50", label: "50 µs" },
+  { value: "200", label: "200 µs" },
+  { value: "1000", label: "1 ms" },
+  { value: "10000", label: "10 ms" },
+];
 
 /** A capture seen for what disturbs it: spectrum, spectra in time, repetition, power in time. */
 export function CaptureLook({ address, rateHz, onTake }: CaptureLookProps) {
   const [again, setAgain] = useState(0);
   const load = useCapture(address, again);
   const [points, setPoints] = useState("2048");
-  const [rowPoints, setRowPoints] = useState("128");
+  const [stretchUs, setStretchUs] = useState("1000");
   const samples = load.state === "ready" ? load.samples : null;
-  const look = useLook(samples, rateHz, { points: Number(points), rowPoints: Number(rowPoints) });
+  const look = useLook(samples, rateHz, { points: Number(points), stretchS: Number(stretchUs) * 1e-6 });
   if (load.state === "failed") {
     return (
       <Notice
@@ -59,17 +64,20 @@ export function CaptureLook({ address, rateHz, onTake }: CaptureLookProps) {
         />
         <SpectrumReader spectrum={look.spectrum} fullScale={FULL_SCALE} onTake={onTake} />
       </section>
-      <section className="grid gap-4">
-        <SectionHead title="Spectra in time" level={3} />
-        <Select
-          label="Resolution in frequency"
-          help="The finer it is, the coarser the time."
-          value={rowPoints}
-          choices={choices(ROW_POINTS)}
-          onChange={(event) => setRowPoints(event.target.value)}
-        />
-        <SpectraInTime key={look.settings.rowPoints} inTime={look.inTime} />
-      </section>
+      <CaptureSpectrogram
+        shown={look.spectrogram}
+        refused={null}
+        fromMiddle
+        fields={
+          <Select
+            label="Stretch from the start"
+            help="The shorter it is, the finer the time."
+            value={stretchUs}
+            choices={STRETCHES}
+            onChange={(event) => setStretchUs(event.target.value)}
+          />
+        }
+      />
       <section className="grid gap-4">
         <SectionHead title="Repetition" level={3} />
         <RepetitionReader likeness={look.likeness} onTake={onTake} />

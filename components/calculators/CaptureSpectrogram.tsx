@@ -12,10 +12,16 @@ import type { ShownSpectrogram } from "./shownSpectrogram";
 
 const RAMP: HeatRamp = { steps: "level", topDb: 30, from: "median" };
 
-type CaptureSpectrogramProps = { shown: ShownSpectrogram | null; refused: string | null; fields: ReactNode };
+type CaptureSpectrogramProps = {
+  shown: ShownSpectrogram | null;
+  refused: string | null;
+  fields: ReactNode;
+  /** In a case the highest cell is for the person to find, so the crosshair begins in the middle. */
+  fromMiddle?: boolean;
+};
 
 /** What comes and goes in a recording: its spectrum row by row, time upwards. */
-export function CaptureSpectrogram({ shown, refused, fields }: CaptureSpectrogramProps) {
+export function CaptureSpectrogram({ shown, refused, fields, fromMiddle }: CaptureSpectrogramProps) {
   return (
     <section className="grid gap-3">
       <h3 className="text-h3">Spectrogram</h3>
@@ -25,17 +31,24 @@ export function CaptureSpectrogram({ shown, refused, fields }: CaptureSpectrogra
           {refusalSentence(refused)}
         </Notice>
       )}
-      {shown ? <TimeAndFrequency shown={shown} /> : !refused && <Working label="Drawing the spectrogram" />}
+      {shown ? (
+        <TimeAndFrequency shown={shown} fromMiddle={fromMiddle} />
+      ) : (
+        !refused && <Working label="Drawing the spectrogram" />
+      )}
     </section>
   );
 }
 
-function TimeAndFrequency({ shown }: { shown: ShownSpectrogram }) {
+function TimeAndFrequency({ shown, fromMiddle }: { shown: ShownSpectrogram; fromMiddle?: boolean }) {
   const { fromL1MHz, timesMs, power, overview, resolutionKHz, rowMs, averaged } = shown;
   const [moved, setMoved] = useState<{ of: ShownSpectrogram; cell: Cell } | null>(null);
   const columns = fromL1MHz.length;
   const top = overview.peaks[0];
-  const cell = moved?.of === shown ? moved.cell : { row: Math.floor(top / columns), column: top % columns };
+  const start = fromMiddle
+    ? { row: timesMs.length >> 1, column: columns >> 1 }
+    : { row: Math.floor(top / columns), column: top % columns };
+  const cell = moved?.of === shown ? moved.cell : start;
   const across = useMemo(() => ({ name: "from L1, MHz", values: fromL1MHz, signed: true }), [fromL1MHz]);
   const up = useMemo(() => ({ name: "time, ms", values: timesMs }), [timesMs]);
   const timeDecimals = rowMs < 0.1 ? 3 : rowMs < 10 ? 1 : 0;

@@ -61,7 +61,8 @@ export function SpectrumReader({ spectrum, fullScale, onTake }: SpectrumReaderPr
         height={280}
       />
       <p className="text-label font-normal text-ink-2 figures">
-        Resolution {resolution}; {formatNumber(spectrum.averaged)} transforms averaged.
+        Resolution {resolution};{" "}
+        {spectrum.averaged === 1 ? "one transform" : `${formatNumber(spectrum.averaged)} transforms averaged`}.
       </p>
       <p className="flex flex-wrap gap-3 no-print">
         <Key size="small" onClick={() => setMarks({ ...marks, lowHz: offsetHz })}>
@@ -72,6 +73,13 @@ export function SpectrumReader({ spectrum, fullScale, onTake }: SpectrumReaderPr
         </Key>
         <Key size="small" onClick={() => setMarks({ ...marks, floorDb: level })}>
           Floor here
+        </Key>
+        <Key
+          size="small"
+          reason={band ? null : "Mark two edges first."}
+          onClick={() => band && setMarks({ ...marks, floorDb: band.meanDb })}
+        >
+          Floor: mean between the edges
         </Key>
       </p>
       <div className="grid gap-4 tablet:grid-cols-2">
@@ -127,9 +135,10 @@ function bandOf(spectrum: Spectrum, fullScale: number, { lowHz: one, highHz: oth
   const [lowHz, highHz] = [Math.min(one, other), Math.max(one, other)];
   const [centreHz, widthHz] = [(lowHz + highHz) / 2, highHz - lowHz];
   const share = bandPower(spectrum, lowHz, highHz) / fullScale;
+  const meanDb = decibels(Math.max(1e-12, (share * MHZ) / Math.max(widthHz, 1)));
   const floorShare = floorDb === null ? null : pow10Db(floorDb);
   const excess = floorShare === null ? null : (share - (floorShare * widthHz) / MHZ) / floorShare;
   const levelDb = excess !== null && excess > 0 ? decibels(excess) : null;
   const reading: Reading = { centreKhz: centreHz / 1000, widthKhz: widthHz / 1000, levelDb: levelDb ?? undefined };
-  return { lowHz, highHz, centreHz, widthHz, levelDb, reading };
+  return { lowHz, highHz, centreHz, widthHz, meanDb, levelDb, reading };
 }

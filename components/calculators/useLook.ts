@@ -8,7 +8,7 @@ export function useLook(samples: Int8Array | null, rateHz: number, settings: Loo
   const worker = useRef<Worker | null>(null);
   const run = useRef(0);
   const [look, setLook] = useState<Look | null>(null);
-  const { points, rowPoints } = settings;
+  const { points, stretchS } = settings;
 
   useEffect(() => {
     if (!samples) return;
@@ -26,8 +26,8 @@ export function useLook(samples: Int8Array | null, rateHz: number, settings: Loo
 
   useEffect(() => {
     run.current += 1;
-    const request: LookRequest = { kind: "look", run: run.current, settings: { points, rowPoints } };
+    const request: LookRequest = { kind: "look", run: run.current, settings: { points, stretchS } };
     worker.current?.postMessage(request);
-  }, [samples, rateHz, points, rowPoints]);
+  }, [samples, rateHz, points, stretchS]);
   return look;
 }

@@ -10,6 +10,6 @@ addEventListener("message", ({ data }: MessageEvent<LookRequest>) => {
   if (data.kind === "capture") capture = { samples: data.samples, rateHz: data.rateHz };
   else if (capture) {
     const look = lookAt(capture.samples, capture.rateHz, data.settings);
-    postMessage({ run: data.run, look } satisfies LookAnswer, { transfer: [look.inTime.power.buffer] });
+    postMessage({ run: data.run, look } satisfies LookAnswer, { transfer: [look.spectrogram.power.buffer] });
   }
 });

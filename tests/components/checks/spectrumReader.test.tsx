@@ -4,7 +4,6 @@ import userEvent from "@testing-library/user-event";
 import { afterEach, describe, expect, test, vi } from "vitest";
 import { lookAt } from "@/components/calculators/lookAt";
 import { RepetitionReader } from "@/components/calculators/RepetitionReader";
-import { SpectraInTime } from "@/components/calculators/SpectraInTime";
 import { SpectrumReader } from "@/components/calculators/SpectrumReader";
 import { takeReading } from "@/components/checks/takeReading";
 import { Workspace } from "@/components/checks/Workspace";
@@ -18,7 +17,7 @@ afterEach(cleanup);
 const plan = planOf(interferer, { nothing: 100 });
 const one = interferer.build(seedOf(1), plan);
 const { samples, rateHz } = readCapture(one.files);
-const look = lookAt(samples, rateHz, { points: 512, rowPoints: 64 });
+const look = lookAt(samples, rateHz, { points: 512, stretchS: 1e-3 });
 const key = (name: RegExp | string) => screen.getByRole("button", { name });
 
 describe("a spectrum with nothing in it but the receiver", () => {
@@ -57,12 +56,27 @@ test("a lag is taken as repetition", async () => {
   expectNear(onTake.mock.calls[0][0].periodUs, 2 / 8.184, 1e-9, "lag, us");
 });
 
-test("spectra in time say their resolution and read a cell", () => {
-  vi.spyOn(HTMLCanvasElement.prototype, "getContext").mockReturnValue(null);
-  render(<SpectraInTime inTime={look.inTime} />);
-  // 1.5 bins of 8184/64 kHz; 64 samples are 7.8 us.
-  expect(screen.getByText(/^Resolution 192 kHz and 7\.8 µs/)).toBeTruthy();
-  expect(screen.getByRole("application").getAttribute("aria-label")).toMatch(/kHz, .* µs, .* dB/);
+test("the mean between two edges is a floor as well", async () => {
+  render(<SpectrumReader spectrum={look.spectrum} fullScale={127 * 127} />);
+  const plot = screen.getByRole("application");
+  const walk = async (steps: number) => {
+    plot.focus();
+    await userEvent.keyboard("{Shift>}" + "{ArrowRight}".repeat(steps) + "{/Shift}");
+  };
+  await walk(3);
+  await userEvent.click(key("Edge here"));
+  await walk(8);
+  await userEvent.click(key("Other edge here"));
+  await userEvent.click(key("Floor: mean between the edges"));
+  const shown = screen.getByText("Floor in 1 MHz").parentElement!.textContent!.match(/\u2212[\d.]+/)![0];
+  // The mean of eighty bins: what was put in, to the tenth that is shown.
+  const floorDb = 10 * Math.log10((one.truth.scene.floorPerHz * 1e6) / (127 * 127));
+  expectNear(Number(shown.replace("\u2212", "-")), floorDb, 0.3, "floor, dB");
+});
+
+test("likeness leaves the receiver's own line out: of noise alone nothing comes back", () => {
+  const { magnitude } = look.likeness;
+  expect(Math.max(...magnitude.slice(4)) / magnitude[0]).toBeLessThan(0.05);
 });
 
 test("the workspace loads the capture, and says when it cannot", async () => {
