@@ -1,5 +1,6 @@
 import "server-only";
 import type { Transaction } from "sequelize";
+import { kindOf } from "@/lib/checks/registry";
 import { select } from "@/lib/db";
 import type { DecidableCase } from "@/lib/policies/decidability";
 import { isSittingComplete } from "@/lib/policies/isSittingComplete";
@@ -30,7 +31,10 @@ async function tellTechnician(
   const technician = await Person.findByPk(sitting.technicianId, { transaction, rejectOnEmpty: true });
   // The outcome is not in the mail: it is read with its reasons.
   const how = byClock ? " Its time had run out, so what you had saved was handed in." : "";
-  const body = `Case ${found.number} of the check "${plan.title}" (${release.title}, sitting S-${sitting.number}) is marked.${how}\nThe whole marking record, with the computed values and workings:\n\n${publicOrigin}/${employer.slug}/records/${found.id}\n`;
+  const within = kindOf(found.kind, found.kindVersion).judged
+    ? "with each line's verdict and its reason"
+    : "with the computed values and workings";
+  const body = `Case ${found.number} of the check "${plan.title}" (${release.title}, sitting S-${sitting.number}) is marked.${how}\nThe whole marking record, ${within}:\n\n${publicOrigin}/${employer.slug}/records/${found.id}\n`;
   await writeMail({ to: technician.email, subject: `Marked: ${plan.title}`, body }, transaction);
 }
 

@@ -28,6 +28,7 @@ test("a function that names tables never finds them in a session's own temporary
   expect(functions.map(({ name }) => name).sort()).toEqual([
     "case_needs_settled_fee",
     "certificate_needs_settled_fee",
+    "marking_record_hand",
     "standing_may_follow",
     "write_trail",
   ]);
