@@ -14,7 +14,7 @@ import { installPointerEvent } from "@/tests/support/pointerEvent";
 beforeAll(installPointerEvent);
 afterEach(cleanup);
 
-const { publicCase: view, truth } = kind.trial!.build(seedOf(1), planOf(kind, { minutes: [40, 40] }));
+const { publicCase: view, truth } = kind.trial!.build(seedOf(1), planOf(kind, { span: [40, 40] }));
 const { log } = truth;
 const plots = () => screen.getAllByRole("application");
 
