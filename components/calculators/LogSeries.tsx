@@ -51,11 +51,12 @@ export function LogSeries({
   const text = (value: number) =>
     Number.isFinite(value) ? `${formatNumber(value, decimals, signed)} ${unit}` : "no reading";
   const [only] = columns;
+  const span = spanOf(columns, leastSpan);
   return (
     <LinePlot
       x={timeAxis(log)}
-      y={{ name, ...spanOf(columns, leastSpan), signed }}
-      curves={named(curves)}
+      y={{ name, ...span, signed }}
+      curves={named(curves, span)}
       summary={`${name} from ${utcOf(log, 0)} to ${utcOf(log, log.readings - 1)} UTC.`}
       cursor={{
         index: cursor.reading,
@@ -83,12 +84,12 @@ export function LogSeries({
   );
 }
 
-/** Names stand on the curves at the right, where there are several. */
-function named(curves: readonly Curve[]): Curve[] {
+/** Where there are several their names stand side by side at the top: curves of noise lie over one another. */
+function named(curves: readonly Curve[], { from, to }: { from: number; to: number }): Curve[] {
   if (curves.length === 1) return [...curves];
-  return curves.map((curve) => {
-    const last = curve.x.length - 1;
-    return { ...curve, nameAt: { x: curve.x[last], y: curve.y[last], end: true } };
+  return curves.map((curve, n) => {
+    const place = Math.floor(((n + 1) / curves.length) * (curve.x.length - 1));
+    return { ...curve, nameAt: { x: curve.x[place], y: to - 0.08 * (to - from), end: true } };
   });
 }
 

@@ -6,6 +6,7 @@ import { drawStart } from "../drawStart";
 import { drawSky, type SkyTimes } from "../receiver-log/drawSky";
 import { drawPattern, drawReadings } from "../receiver-log/levels";
 import { drawFault, lossOf, shareAt, type Fault } from "./drawFault";
+import { isReadable } from "./isReadable";
 import type { LostDecibelsParameters } from "./parameters";
 import type { Cause } from "./quantities";
 
@@ -53,6 +54,7 @@ function drawTruth(parameters: LostDecibelsParameters, cause: Cause, random: Ran
   const enough = low.readings >= LEAST_READINGS && high.readings >= LEAST_READINGS;
   if (!enough || !(high.meanDbHz - allDbHz >= LEAST_SPREAD_DB)) return null;
   const columns = drawColumns(random, times, fault);
+  if (!isReadable({ cause, fault, log, gainDb: columns.gainDb })) return null;
   return { cause, fault, highDbHz: high.meanDbHz, lowDbHz: low.meanDbHz, allDbHz, log, ...columns };
 }
 

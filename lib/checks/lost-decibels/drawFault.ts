@@ -49,7 +49,7 @@ export function drawFault(
     }
     case "water": {
       const first = Math.round(between(random, 0.2, 0.5) * times.readings);
-      const gainDb = depthDb + apartDb;
+      const gainDb = depthDb + apartDb + 1; // its last readings are a little short of the whole
       const currentMa = between(random, 2.5, 7); // leaks through the wet joint
       return { readings: [first, times.readings - 1], slow: true, depthDb, gainDb, currentMa, sector: null };
     }

@@ -1,8 +1,10 @@
 import { directionAt, wrapDeg, type Pass, type ReceiverLog, type Readings } from "@/lib/gnss/sky/receiverLog";
 import { BLOCKED_BELOW_DEG } from "./blockedSector";
+import { stepOf } from "./readDepth";
+import { mean } from "@/lib/numeric/statistics";
 import { findSteps, type Step } from "../receiver-log/findSteps";
 
-export type BlockageReading = { readings: Readings; fromDeg: number; toDeg: number };
+export type BlockageReading = { readings: Readings; fromDeg: number; toDeg: number; depthDb: number };
 
 const LEAST_STEP_DB = 2.2;
 /** One obstacle takes about the same from every satellite: what steps by less than half of the largest step is something else. */
@@ -22,7 +24,7 @@ export function readBlockage(log: ReceiverLog): BlockageReading | null {
   if (spans.length === 0) return null;
   const first = Math.min(...spans.map(({ span }) => span[0]));
   const last = Math.max(...spans.map(({ span }) => span[1]));
-  return { readings: [first, last], ...azimuthsOf(log, spans, [first, last]) };
+  return { readings: [first, last], depthDb: depthOf(spans), ...azimuthsOf(log, spans, [first, last]) };
 }
 
 const levelsOf = (pass: Pass) => pass.cn0DbHz.map((cn0) => cn0 ?? NOT_TRACKED_DBHZ);
@@ -42,6 +44,16 @@ function fallenSpans(pass: Pass, steps: readonly Step[]): Readings[] {
   }
   if (from !== null) spans.push([pass.first + from, pass.first + pass.cn0DbHz.length - 1]);
   return spans;
+}
+
+/** Mean over every fall and every return of a satellite that stays tracked, wherever it meets an edge. */
+function depthOf(spans: readonly Span[]): number {
+  const falls = spans.flatMap(({ pass, span: [from, to] }) => {
+    const fell = stepOf(pass, from - pass.first);
+    const rose = stepOf(pass, to + 1 - pass.first);
+    return [...(fell === null ? [] : [-fell]), ...(rose === null ? [] : [rose])];
+  });
+  return falls.length > 0 ? mean(falls) : NaN;
 }
 
 /** The arc that holds every fallen reading, each edge half way to the next one that is not. */

@@ -4,28 +4,23 @@ import { mean } from "@/lib/numeric/statistics";
 const AROUND = 12;
 
 /** How far C/N0 falls at one reading and comes back at another: the mean over the satellites that are tracked on both sides. */
-export function depthOfStep(
-  log: ReceiverLog,
-  readings: Readings,
-  fell: (pass: Pass, reading: number) => boolean,
-): number {
-  const [first, last] = readings;
-  const falls = stepsAt(log, first, fell).map((step) => -step);
-  const returns = last + 1 < log.readings ? stepsAt(log, last + 1, (pass) => fell(pass, last)) : [];
+export function depthOfStep(log: ReceiverLog, [first, last]: Readings): number {
+  const falls = stepsAt(log, first).map((step) => -step);
+  const returns = last + 1 < log.readings ? stepsAt(log, last + 1) : [];
   const all = [...falls, ...returns];
   return all.length > 0 ? mean(all) : NaN;
 }
 
-function stepsAt({ passes }: ReceiverLog, reading: number, fell: (pass: Pass, reading: number) => boolean): number[] {
-  return passes.flatMap((pass) => {
-    const at = reading - pass.first;
-    if (at < AROUND || at + AROUND > pass.cn0DbHz.length || !fell(pass, reading)) return [];
-    const before = pass.cn0DbHz.slice(at - AROUND, at);
-    const after = pass.cn0DbHz.slice(at, at + AROUND);
-    const isTracked = (cn0: number | null): cn0 is number => cn0 !== null;
-    if (!before.every(isTracked) || !after.every(isTracked)) return [];
-    return [mean(after) - mean(before)];
-  });
+const stepsAt = ({ passes }: ReceiverLog, reading: number): number[] =>
+  passes.flatMap((pass) => stepOf(pass, reading - pass.first) ?? []);
+
+/** Mean of the readings from one of a pass on less that of those before it; null where some of them are missing. */
+export function stepOf({ cn0DbHz }: Pass, at: number): number | null {
+  if (at < AROUND || at + AROUND > cn0DbHz.length) return null;
+  const isTracked = (cn0: number | null): cn0 is number => cn0 !== null;
+  const before = cn0DbHz.slice(at - AROUND, at).filter(isTracked);
+  const after = cn0DbHz.slice(at, at + AROUND).filter(isTracked);
+  return before.length === AROUND && after.length === AROUND ? mean(after) - mean(before) : null;
 }
 
 const BAND_DEG = 5;
