@@ -45,7 +45,9 @@ export type CaseLine = {
   handedInAt: string | null;
   byClock: boolean | null;
 };
-export type CheckLine = { plan: CheckPlan; cases: CaseLine[]; next: NextCase; met: boolean; required: boolean };
+/** Without its parameters: in those of a lead's own check stand the formulas of the right answers. */
+type ShownPlan = Omit<CheckPlan, "parameters">;
+export type CheckLine = { plan: ShownPlan; cases: CaseLine[]; next: NextCase; met: boolean; required: boolean };
 export type SittingView = Omit<Row, "employerId" | "technicianId" | "startedAt" | "decidedAt" | "checks"> & {
   startedAt: string;
   decidedAt: string | null;
@@ -70,7 +72,12 @@ export async function getSitting(actor: Actor, id: string, now = new Date()): Pr
   };
 }
 
-function checkLine(plan: CheckPlan, { sitting, require }: FrontMatter, all: CaseRow[], now: Date): CheckLine {
+function checkLine(
+  { parameters: _parameters, ...plan }: CheckPlan,
+  { sitting, require }: FrontMatter,
+  all: CaseRow[],
+  now: Date,
+): CheckLine {
   const cases = all.filter(({ checkId }) => checkId === plan.id);
   return {
     plan,

@@ -209,3 +209,10 @@ test("a written account is an assessor's to read for judging, and not of who wro
   expect(await listJudging(both)).toEqual([]);
   for (const wrong of ["no id", chain.record.caseId]) expect(await getJudging(firm.assessor, wrong)).toBeNull();
 });
+
+test("a sitting tells nobody the parameters of its checks, where a lead's formulas stand", async () => {
+  for (const actor of [firm.technician, firm.decider]) {
+    const sitting = await getSitting(actor, chain.sitting.id, NOW);
+    expect(sitting?.checks[0]?.plan).not.toHaveProperty("parameters");
+  }
+});

@@ -33,7 +33,7 @@ export function CheckRow({ employer, sittingId, check, freshCases, mayOpen, open
           <ul className="mt-2 grid gap-1 text-dense">
             {cases.map((one) => (
               <li key={one.id}>
-                Case {one.number} of {freshCases + 1}: {caseWords(one)}
+                Case {one.number} of {freshCases + 1}: {caseWords(one, plan.kind)}
                 {one.state === "marked" && (
                   <>
                     {" "}
@@ -73,9 +73,10 @@ export function CheckRow({ employer, sittingId, check, freshCases, mayOpen, open
   );
 }
 
-function caseWords(one: CaseLine): string {
+function caseWords(one: CaseLine, kind: string): string {
   if (one.state === "building") return "being drawn for you";
   if (one.state === "open") return `open until ${formatInstant(one.endsAt!)}`;
   const handed = `handed in ${formatInstant(one.handedInAt!)}${one.byClock ? " by the clock" : ""}`;
-  return one.state === "handed in" ? `${handed}, being marked` : `${one.met ? "met" : "not met"}, ${handed}.`;
+  const waits = kind === "written" ? "an assessor judges it" : "being marked";
+  return one.state === "handed in" ? `${handed}, ${waits}` : `${one.met ? "met" : "not met"}, ${handed}.`;
 }
