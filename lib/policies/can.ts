@@ -26,6 +26,8 @@ export const can = {
   /** Answers and workings: the person, who decides, who assesses, who wrote the check; not the people who pay. */
   readRecord: (actor: Actor, sitting: Persons) =>
     isTheTechnician(actor, sitting) || holds(actor, sitting.employerId, "lead", "assessor", "decider"),
+  /** Few sittings are few people: how they did is read by who wrote the checks, as their records are. */
+  readStatistics: (actor: Actor, release: Owned) => holds(actor, release.employerId, "lead"),
   readQueue: (actor: Actor, sitting: Owned) => holds(actor, sitting.employerId, "assessor", "decider"),
   /** Whoever sat a case neither judges it nor answers the own question. */
   judge: (actor: Actor, sitting: Persons) =>

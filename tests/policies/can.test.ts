@@ -23,6 +23,7 @@ const ALLOWED: Record<Act, Role[]> = {
   sit: [],
   readSitting: ["lead", "assessor", "decider", "administrator"],
   readRecord: ["lead", "assessor", "decider"],
+  readStatistics: ["lead"],
   readQueue: ["assessor", "decider"],
   judge: ["assessor"],
   answerQuestion: ["assessor"],

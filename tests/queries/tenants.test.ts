@@ -12,6 +12,7 @@ import { getJudging } from "@/lib/queries/getJudging";
 import { getMarkingRecord } from "@/lib/queries/getMarkingRecord";
 import { getModule } from "@/lib/queries/getModule";
 import { getRelease } from "@/lib/queries/getRelease";
+import { getReleaseStatistics } from "@/lib/queries/getReleaseStatistics";
 import { getSitting } from "@/lib/queries/getSitting";
 import { listCertificates, listOwnCertificates, listRegister } from "@/lib/queries/listCertificates";
 import { listJudging } from "@/lib/queries/listJudging";
@@ -87,6 +88,7 @@ const ONE_ROW: Record<string, OneRow> = {
     to: LEADS,
     else: "refused",
   },
+  getReleaseStatistics: { ask: getReleaseStatistics, id: () => chain.release.id, to: ["lead"], else: "refused" },
   getOrder: { ask: getOrder, id: () => chain.order.id, to: ["administrator"], else: "refused" },
 };
 

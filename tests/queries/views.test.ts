@@ -10,6 +10,7 @@ import { getMarkingRecord } from "@/lib/queries/getMarkingRecord";
 import { getModule } from "@/lib/queries/getModule";
 import { getPublicVerification } from "@/lib/queries/getPublicVerification";
 import { getRelease } from "@/lib/queries/getRelease";
+import { getReleaseStatistics } from "@/lib/queries/getReleaseStatistics";
 import { getSitting } from "@/lib/queries/getSitting";
 import { listCertificates } from "@/lib/queries/listCertificates";
 import { listJudging } from "@/lib/queries/listJudging";
@@ -106,6 +107,13 @@ const VIEWS: Record<string, View> = {
     fields: `assigned[].dueOn assigned[].feeSettled assigned[].id assigned[].sittingId assigned[].state
       assigned[].technician checkCards* checks* code fingerprint frontMatter* id kind moduleId number reason releasedAt
       releasedBy technicians[].id technicians[].name title tree*`,
+  },
+  getReleaseStatistics: {
+    run: ({ lead }, { release }) => getReleaseStatistics(lead, release.id),
+    fields: `checks[].bounds.lower checks[].bounds.upper checks[].byClock checks[].cases checks[].checkId
+      checks[].discrimination checks[].errors* checks[].fresh.cases checks[].fresh.met checks[].met
+      checks[].minutes.lower checks[].minutes.middle checks[].minutes.upper checks[].title leastSittings
+      review.day review.sittings sittings`,
   },
   getSitting: {
     run: ({ technician }, { sitting, second, waiting }) =>

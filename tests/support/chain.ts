@@ -211,7 +211,7 @@ export async function makeHandIn(
 
 export async function makeMarkingRecord(
   firm: Firm,
-  given: Given<{ case: Case; sitting: Row }, { met: boolean; sequence: number; reason: string }> = {},
+  given: Given<{ case: Case; sitting: Row }, { met: boolean; sequence: number; reason: string; rows: object[] }> = {},
 ) {
   const { case: asked, sitting, ...columns } = given;
   const handedIn = asked ?? (await makeHandIn(firm, { sitting }));

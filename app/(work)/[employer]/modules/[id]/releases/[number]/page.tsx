@@ -12,7 +12,9 @@ import { orNotFound } from "@/lib/auth/orNotFound";
 import { requireActor } from "@/lib/auth/requireActor";
 import { can } from "@/lib/policies/can";
 import { getRelease, type ReleaseView } from "@/lib/queries/getRelease";
+import { getReleaseStatistics } from "@/lib/queries/getReleaseStatistics";
 import { AssignRelease } from "./_components/AssignRelease";
+import { CheckFigures } from "./_components/CheckFigures";
 import { assignReleaseAction } from "./actions";
 
 export const metadata: Metadata = { title: "Release" };
@@ -23,6 +25,7 @@ export default async function ReleasePage({ params }: Props) {
   const { employer, id, number } = await params;
   const actor = await requireActor(employer);
   const release = await orNotFound(getRelease(actor, id, number));
+  const figures = can.readStatistics(actor, actor) ? await getReleaseStatistics(actor, release.id) : null;
   return (
     <>
       <WorkBar
@@ -41,6 +44,7 @@ export default async function ReleasePage({ params }: Props) {
             />
           )}
           <Assigned employer={employer} release={release} />
+          {figures && <CheckFigures figures={figures} />}
           <details className="border-t-hair border-rule-strong pt-4" open={release.assigned.length === 0}>
             <summary className="plate cursor-pointer py-1 text-h3 pointer-coarse:py-2.5">The released text</summary>
             <article className="mt-4 bg-sheet px-6 py-6 tablet:px-10">
