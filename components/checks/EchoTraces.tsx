@@ -24,11 +24,18 @@ export function EchoTraces({ data: { stepNs, leadTrace, endTrace }, onTake }: Ec
     const part = { x: x.subarray(first, end), lead: leadTrace.slice(first, end), run: endTrace.slice(first, end) };
     return (
       <LinePlot
-        x={{ name: "time, ns", from: part.x[0], to: part.x[part.x.length - 1], decimals: 1 }}
+        x={{ name: "time, ns", from: part.x[0], to: part.x[part.x.length - 1] }}
         y={{ name: "share of the sent step", from: -0.1, to: 1.1, signed: true }}
         curves={[
-          { name: "run connected", role: "subject", x: part.x, y: part.run },
-          { name: "test lead alone", role: "reference", tone: "ink", x: part.x, y: part.lead },
+          { name: "run connected", role: "subject", x: part.x, y: part.run, nameAt: nameAt(part.x, part.run) },
+          {
+            name: "test lead alone",
+            role: "reference",
+            tone: "ink",
+            x: part.x,
+            y: part.lead,
+            nameAt: nameAt(part.x, part.lead),
+          },
         ]}
         summary={`Traces from ${formatNumber(part.x[0], 1)} to ${formatNumber(part.x[part.x.length - 1], 1)} ns: test lead alone, dashed, and with the run connected.`}
         cursor={{
@@ -37,8 +44,8 @@ export function EchoTraces({ data: { stepNs, leadTrace, endTrace }, onTake }: Ec
           onTake: onTake ? take : undefined,
           lines: (index) => [
             `${formatNumber(part.x[index], 1)} ns`,
-            `run connected ${formatNumber(part.run[index], 3, true)}`,
-            `test lead alone ${formatNumber(part.lead[index], 3, true)}`,
+            `run ${formatNumber(part.run[index], 3, true)}`,
+            `lead ${formatNumber(part.lead[index], 3, true)}`,
           ],
         }}
         columns={[
@@ -68,3 +75,10 @@ export function EchoTraces({ data: { stepNs, leadTrace, endTrace }, onTake }: Ec
     </div>
   );
 }
+
+/** Above the end of a trace, where it is flat. */
+const nameAt = (x: Float64Array, y: readonly number[]) => ({
+  x: x[x.length - 1],
+  y: y[y.length - 1] + 0.04,
+  end: true,
+});

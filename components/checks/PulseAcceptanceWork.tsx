@@ -63,7 +63,7 @@ export function PulseAcceptanceWork({
       <section>
         <SectionHead title="Pulse error" note="the bench's own; paste the log or drop its file" />
         <div className="mt-4">
-          <StandingCalculator tag="PulseError" attributes={{ source: "log" }} />
+          <StandingCalculator tag="PulseError" attributes={{ source: "log", clock }} />
         </div>
       </section>
     </div>

@@ -26,10 +26,16 @@ const SLOTS: readonly Slot[] = [
 ];
 
 /** What hangs on the site and is not on the pulse's way. */
-const STRAYS: readonly { name: string; from: string; to: string; needs?: string }[] = [
-  { name: "Spare cable in the same duct", from: "capped end", to: "capped end in the rack" },
-  { name: "10 MHz lead", from: "10 MHz output", to: "counter" },
-  { name: "Cable to the second receiver", from: "second output", to: "second receiver", needs: "Splitter" },
+const STRAYS: readonly { name: string; from: string; to: string; lengthM: Range; needs?: string }[] = [
+  { name: "Spare cable in the same duct", from: "capped end", to: "capped end in the rack", lengthM: [20, 90] },
+  { name: "10 MHz lead", from: "10 MHz output", to: "counter", lengthM: [2, 12] },
+  {
+    name: "Cable to the second receiver",
+    from: "second output",
+    to: "second receiver",
+    lengthM: [4, 40],
+    needs: "Splitter",
+  },
 ];
 
 /** The list of parts of one site: the way from antenna to clock, and one or two strays between its rows. */
@@ -39,8 +45,8 @@ export function drawSite(random: Random, parameters: DelayEntryParameters): Site
   const joints = [PHASE_CENTRE, ...way.slice(1).map((_, n) => `joint ${n + 1}`), CLOCK_INPUT];
   const rows: Omit<SitePart, "id">[] = way.map((part, n) => ({ ...part, from: joints[n], to: joints[n + 1] }));
   const strays = STRAYS.filter(({ needs }) => !needs || kept.some(({ name }) => name === needs));
-  for (const { name, from, to } of random.shuffle(strays).slice(0, random.integer(1, 2))) {
-    const stray = { name, from, to, ...lead(random, [6, 60], parameters.velocityFactor) };
+  for (const { name, from, to, lengthM } of random.shuffle(strays).slice(0, random.integer(1, 2))) {
+    const stray = { name, from, to, ...lead(random, lengthM, parameters.velocityFactor) };
     rows.splice(random.integer(1, rows.length - 1), 0, stray);
   }
   return rows.map((row, n) => ({ id: String.fromCharCode(97 + n), ...row }));
