@@ -7,6 +7,7 @@ export class Assignment extends Model<InferAttributes<Assignment>, InferCreation
   declare releaseId: string;
   declare technicianId: string;
   declare dueOn: string;
+  declare exposureNote: CreationOptional<string | null>;
   declare assignedBy: string;
   declare assignedAt: CreationOptional<Date>;
 }
@@ -18,6 +19,7 @@ Assignment.init(
     releaseId: { type: DataTypes.UUID, allowNull: false },
     technicianId: { type: DataTypes.UUID, allowNull: false },
     dueOn: { type: DataTypes.DATEONLY, allowNull: false },
+    exposureNote: DataTypes.TEXT,
     assignedBy: { type: DataTypes.UUID, allowNull: false },
     assignedAt: DataTypes.DATE,
   },

@@ -1,4 +1,5 @@
 import "server-only";
+import type { Transaction } from "sequelize";
 import { dayIn } from "@/lib/calendar";
 import { select } from "@/lib/db";
 import { ConflictError, InvalidError } from "@/lib/errors";
@@ -6,24 +7,34 @@ import { webEnv } from "@/lib/env";
 import type { Actor } from "@/lib/policies/actor";
 import { authorize } from "@/lib/policies/authorize";
 import { can } from "@/lib/policies/can";
+import { exposedUntil, exposureReason } from "@/lib/policies/exposure";
 import { SITTING_FEE } from "@/lib/price";
-import { Assignment, Employer, Fee } from "@/models";
+import { openedCases } from "@/lib/queries/openedCases";
+import { Assignment, Employer, Fee, type Release } from "@/models";
 import { findOwnRelease } from "./lockOwn";
 import { transact } from "./transact";
 import { writeMail } from "./writeMail";
 
-type Order = { releaseId: string; technicianId: string; dueOn: string };
+type Order = { releaseId: string; technicianId: string; dueOn: string; exposureNote: string | null };
 type Addressed = { id: string; name: string; email: string };
 
-/** Give a technician a sitting of a release; its fee falls due now, whatever the outcome will be. */
-export const assignRelease = (actor: Actor, { releaseId, technicianId, dueOn }: Order, now = new Date()) =>
+/**
+ * Give a technician a sitting of a release; its fee falls due now, whatever the outcome will be.
+ * @param exposureNote why it is assigned although the technician has met a kind of check as often as may be; null when
+ *   that is not so. With a note the limit does not hold in the sitting, and the decider reads it.
+ */
+export const assignRelease = (
+  actor: Actor,
+  { releaseId, technicianId, dueOn, exposureNote }: Order,
+  now = new Date(),
+) =>
   transact(actor, async (transaction) => {
     const release = await findOwnRelease(actor, releaseId, transaction);
     authorize(can.assignRelease(actor, release), "assign this release");
     const { employerId } = actor;
     const employer = await Employer.findByPk(employerId, { transaction, rejectOnEmpty: true });
-    if (dueOn < dayIn(employer.timeZone, now))
-      throw new InvalidError("The day is past.", { dueOn: ["The day is past."] });
+    const today = dayIn(employer.timeZone, now);
+    if (dueOn < today) throw new InvalidError("The day is past.", { dueOn: ["The day is past."] });
     const [technician] = await select<Addressed>(TECHNICIAN, { technicianId, employerId }, transaction);
     if (!technician) {
       throw new InvalidError("Choose a technician of your firm.", {
@@ -32,8 +43,9 @@ export const assignRelease = (actor: Actor, { releaseId, technicianId, dueOn }: 
     }
     const open = await select(OPEN_ASSIGNMENT, { technicianId, moduleId: release.moduleId }, transaction);
     if (open.length) throw new ConflictError(`${technician.name} has an undecided sitting of this module already.`);
+    if (!exposureNote) await refuseExposed(technician, release, { now, today }, transaction);
     const assignment = await Assignment.create(
-      { employerId, releaseId, technicianId, dueOn, assignedBy: actor.personId },
+      { employerId, releaseId, technicianId, dueOn, exposureNote: exposureNote || null, assignedBy: actor.personId },
       { transaction },
     );
     await Fee.create({ assignmentId: assignment.id, employerId, ...SITTING_FEE }, { transaction });
@@ -58,6 +70,22 @@ export const assignRelease = (actor: Actor, { releaseId, technicianId, dueOn }: 
     }
     return { id: assignment.id };
   });
+
+/** Nobody pays for a sitting in which a check could not be opened a first time by the rule. */
+async function refuseExposed(
+  technician: Addressed,
+  { employerId, moduleId, frontMatter, checks }: Release,
+  { now, today }: { now: Date; today: string },
+  transaction: Transaction,
+): Promise<void> {
+  const opened = await openedCases({ technicianId: technician.id, employerId }, now, transaction);
+  for (const { id, kind, title } of checks) {
+    const from = exposedUntil({ id, kind, moduleId }, opened, frontMatter.sitting, today);
+    if (!from) continue;
+    const message = `${technician.name} has had enough cases of "${title}". ${exposureReason(frontMatter.sitting, from)} Wait until then, or say why you assign it all the same.`;
+    throw new InvalidError(message, { exposureNote: [`Say why, or assign it from ${from} on.`] });
+  }
+}
 
 const HOLDERS = (role: string) => `
   SELECT p.id, p.name, p.email FROM people p JOIN role_grants g ON g.person_id = p.id

@@ -33,8 +33,8 @@ export const frontMatterSchema = z.strictObject({
     .array(text(2, 80), { error: "be a list of at most 10 aids" })
     .max(10, { error: "be a list of at most 10 aids" }),
   sitting: z.strictObject(
-    { days: whole(1, 365), freshCases: whole(0, 5), waitHours: whole(0, 720) },
-    { error: "have days, freshCases and waitHours" },
+    { days: whole(1, 365), freshCases: whole(0, 5), waitHours: whole(0, 720), exposure: whole(1, 12).optional() },
+    { error: "have days, freshCases and waitHours, and may have exposure" },
   ),
   require: z.strictObject(
     {
@@ -62,10 +62,12 @@ export const FRONT_MATTER_EXAMPLES: Readonly<Record<string, string>> = {
   "valid.reason": "reason: receiver families change slowly",
   supervision: "supervision: open",
   aids: "aids: [bench]",
-  sitting: "sitting: { days: 30, freshCases: 1, waitHours: 24 }",
+  sitting: "sitting: { days: 30, freshCases: 1, waitHours: 24, exposure: 3 }",
   "sitting.days": "days: 30",
   "sitting.freshCases": "freshCases: 1",
   "sitting.waitHours": "waitHours: 24",
+  // Cases of one kind that a person opens in 12 months; 3 when left out.
+  "sitting.exposure": "exposure: 3",
   require: "require: { all: [false-lock, satellites] }",
   "require.all": "all: [false-lock, satellites]",
   "require.some": "some: { of: [reading, plan], count: 1 }",

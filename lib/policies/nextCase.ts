@@ -11,8 +11,17 @@ export type NextCase =
   | { state: "available"; number: number }
   | { state: "closed"; reason: string; opensAt?: string };
 
-/** Which case of a check may be opened now, by the release's rule on fresh cases and waiting. */
-export function nextCaseOf(earlier: readonly EarlierCase[], rule: FreshCaseRule, now: Date): NextCase {
+/**
+ * Which case of a check may be opened now, by the release's rule on fresh cases and waiting. The first one always: a
+ * sitting that is paid for must be worth something.
+ * @param exposed why no fresh case may be opened after so many of this kind; null when one may
+ */
+export function nextCaseOf(
+  earlier: readonly EarlierCase[],
+  rule: FreshCaseRule,
+  now: Date,
+  exposed: string | null,
+): NextCase {
   const last = earlier.at(-1);
   if (!last) return { state: "available", number: 1 };
   if (last.state === "building" || last.state === "open") return { state: "open", caseId: last.id };
@@ -20,6 +29,7 @@ export function nextCaseOf(earlier: readonly EarlierCase[], rule: FreshCaseRule,
   if (last.met) return { state: "closed", reason: "This check is met." };
   if (last.number > rule.freshCases)
     return { state: "closed", reason: "The release allows no further case of this check." };
+  if (exposed) return { state: "closed", reason: exposed };
   const opensAt = new Date(last.handedInAt!.getTime() + rule.waitHours * 3_600_000);
   return now < opensAt
     ? {

@@ -7,7 +7,7 @@ import { authorize } from "@/lib/policies/authorize";
 import { can } from "@/lib/policies/can";
 import { decidability, type Decidability } from "@/lib/policies/decidability";
 import { barsToDeciding } from "@/lib/policies/separation";
-import { Employer, Sitting } from "@/models";
+import { Assignment, Employer, Sitting } from "@/models";
 import { iso, isId } from "./findOwn";
 import { getSitting, type SittingView } from "./getSitting";
 import { separationFacts } from "./separationFacts";
@@ -35,6 +35,8 @@ export type DecisionDeskView = {
   bars: string[];
   decidability: Decidability;
   outsideLine: boolean;
+  /** Why the lead assigned it although this person had opened as many cases of a kind as may be. */
+  exposureNote: string | null;
   mayDecide: boolean;
   records: (Omit<RecordRow, "handedInAt" | "openedAt" | "endsAt"> & {
     handedInAt: string;
@@ -55,6 +57,7 @@ export async function getDecisionDesk(
   if (!sitting) return null;
   const row = await Sitting.findByPk(sittingId, { rejectOnEmpty: true });
   const employer = await Employer.findByPk(actor.employerId, { rejectOnEmpty: true });
+  const assignment = await Assignment.findByPk(row.assignmentId, { rejectOnEmpty: true });
   const today = dayIn(employer.timeZone, now);
   const records = await select<RecordRow>(RECORDS, { sittingId });
   const questions = await select<QuestionRow>(QUESTIONS, { sittingId });
@@ -67,6 +70,7 @@ export async function getDecisionDesk(
     bars: barsToDeciding(await separationFacts(actor, row, today)),
     decidability: decidability(checks, sitting.frontMatter.require, cases, today > sitting.lastDay),
     outsideLine: actor.outsideLine,
+    exposureNote: assignment.exposureNote,
     mayDecide: can.decide(actor, actor),
     records: records.map((record) => ({
       ...record,

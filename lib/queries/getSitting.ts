@@ -1,13 +1,16 @@
 import "server-only";
 import type { CheckPlan } from "@/lib/checks/kind";
+import { dayIn } from "@/lib/calendar";
 import { select } from "@/lib/db";
 import { checkCards, type CheckCardView } from "@/lib/mdx/checkCards";
 import type { FrontMatter } from "@/lib/mdx/frontMatter";
 import type { ModuleTree } from "@/lib/mdx/moduleTree";
 import type { Actor } from "@/lib/policies/actor";
 import { can } from "@/lib/policies/can";
+import { exposedUntil, exposureReason, type OpenedCase } from "@/lib/policies/exposure";
 import { nextCaseOf, type EarlierCase, type NextCase } from "@/lib/policies/nextCase";
 import { iso, isId, isoOrNull } from "./findOwn";
+import { openedCases } from "./openedCases";
 import { SITTING_STATE, type SittingState } from "./sittingState";
 
 type Row = {
@@ -32,6 +35,8 @@ type Row = {
   decidedAt: Date | null;
   decider: string | null;
   certificate: string | null;
+  exposureNote: string | null;
+  timeZone: string;
 };
 type CaseRow = EarlierCase & { checkId: string; openedAt: Date | null; endsAt: Date | null; byClock: boolean | null };
 
@@ -48,7 +53,10 @@ export type CaseLine = {
 /** Without its parameters: in those of a lead's own check stand the formulas of the right answers. */
 type ShownPlan = Omit<CheckPlan, "parameters">;
 export type CheckLine = { plan: ShownPlan; cases: CaseLine[]; next: NextCase; met: boolean; required: boolean };
-export type SittingView = Omit<Row, "employerId" | "technicianId" | "startedAt" | "decidedAt" | "checks"> & {
+export type SittingView = Omit<
+  Row,
+  "employerId" | "technicianId" | "startedAt" | "decidedAt" | "checks" | "exposureNote" | "timeZone"
+> & {
   startedAt: string;
   decidedAt: string | null;
   isMine: boolean;
@@ -61,24 +69,28 @@ export async function getSitting(actor: Actor, id: string, now = new Date()): Pr
   const [row] = await select<Row>(SITTING, { id, employerId: actor.employerId });
   if (!row || !can.readSitting(actor, row)) return null;
   const cases = await select<CaseRow>(CASES, { id });
-  const { employerId: _employer, technicianId, ...view } = row;
+  const { employerId: _employer, technicianId, exposureNote, timeZone, ...view } = row;
+  const opened = exposureNote === null ? await openedCases(row, now) : [];
+  const today = dayIn(timeZone, now);
   return {
     ...view,
     startedAt: iso(row.startedAt),
     decidedAt: isoOrNull(row.decidedAt),
     isMine: technicianId === actor.personId,
     checkCards: checkCards(row.checks),
-    checks: row.checks.map((plan) => checkLine(plan, row.frontMatter, cases, now)),
+    checks: row.checks.map((plan) => checkLine(plan, row, { cases, opened }, { now, today })),
   };
 }
 
 function checkLine(
   { parameters: _parameters, ...plan }: CheckPlan,
-  { sitting, require }: FrontMatter,
-  all: CaseRow[],
-  now: Date,
+  { moduleId, frontMatter: { sitting, require } }: Pick<Row, "moduleId" | "frontMatter">,
+  all: { cases: CaseRow[]; opened: OpenedCase[] },
+  { now, today }: { now: Date; today: string },
 ): CheckLine {
-  const cases = all.filter(({ checkId }) => checkId === plan.id);
+  const { id, kind } = plan;
+  const from = exposedUntil({ id, kind, moduleId }, all.opened, sitting, today);
+  const cases = all.cases.filter(({ checkId }) => checkId === plan.id);
   return {
     plan,
     cases: cases.map((one) => ({
@@ -91,7 +103,7 @@ function checkLine(
       handedInAt: isoOrNull(one.handedInAt),
       byClock: one.byClock,
     })),
-    next: nextCaseOf(cases, sitting, now),
+    next: nextCaseOf(cases, sitting, now, from && exposureReason(sitting, from)),
     met: cases.some((one) => one.met === true),
     required: require.all.includes(plan.id),
   };
@@ -101,8 +113,10 @@ const SITTING = `
   SELECT s.id, s.number::text AS number, s.employer_id AS "employerId", s.technician_id AS "technicianId", p.name AS technician,
     m.id AS "moduleId", m.code, r.title, r.number AS release, r.fingerprint, r.tree, r.front_matter AS "frontMatter", r.checks,
     s.started_at AS "startedAt", s.last_day::text AS "lastDay", ${SITTING_STATE} AS state, d.outcome,
-    d.reason AS "decisionReason", d.decided_at AS "decidedAt", dp.name AS decider, c.number AS certificate
+    d.reason AS "decisionReason", d.decided_at AS "decidedAt", dp.name AS decider, c.number AS certificate,
+    a.exposure_note AS "exposureNote", e.time_zone AS "timeZone"
   FROM sittings s JOIN releases r ON r.id = s.release_id JOIN modules m ON m.id = r.module_id
+  JOIN assignments a ON a.id = s.assignment_id JOIN employers e ON e.id = s.employer_id
   JOIN people p ON p.id = s.technician_id JOIN fees f ON f.assignment_id = s.assignment_id
   LEFT JOIN decisions d ON d.sitting_id = s.id LEFT JOIN people dp ON dp.id = d.decided_by
   LEFT JOIN certificates c ON c.sitting_id = s.id

@@ -1,11 +1,12 @@
 import { beforeEach, describe, expect, test } from "vitest";
 import { assignRelease } from "@/lib/commands/assignRelease";
 import { makeDecision } from "../support/certified";
-import { makeRelease, makeSitting } from "../support/chain";
+import { makeAssignment, makeCase, makeRelease, makeSitting } from "../support/chain";
 import { daysFrom, NOW } from "../support/clock";
 import { grantTo, makeActor, makeFirm, makePerson, type Firm } from "../support/factories";
 import { ownerRows } from "../support/owner";
 import { everythingStored, expectNothingLeft, jobsOf, rowsOf, trailOf } from "../support/written";
+import { frontMatter } from "../support/samples";
 import { refusals } from "./refusals";
 
 let firm: Firm;
@@ -19,6 +20,7 @@ const order = (over: Partial<Parameters<typeof assignRelease>[1]> = {}) => ({
   releaseId: release.id,
   technicianId: firm.technician.personId,
   dueOn: "2026-12-20",
+  exposureNote: null,
   ...over,
 });
 const emailOf = async (personId: string) =>
@@ -104,6 +106,56 @@ test("after a decision a new sitting can be assigned, with a new fee", async () 
   });
   await assignRelease(firm.lead, order(), NOW);
   expect(await rowsOf("fees")).toHaveLength(2);
+});
+
+describe("a kind of check that the technician has met three times in twelve months", () => {
+  /** Cases of a sitting of another module, opened on these days at noon. */
+  async function opened(days: string[], of = firm) {
+    const sitting = await makeSitting(of, { assignment: await makeAssignment(of) });
+    for (const [at, day] of days.entries()) {
+      await makeCase(of, { sitting, number: at + 1, requestedAt: new Date(`${day}T12:00:00Z`) });
+    }
+  }
+
+  test("is not assigned, and the lead hears from which day on it can be", async () => {
+    await opened(["2026-01-15", "2026-03-01", "2026-06-01"]);
+    const before = await everythingStored();
+    const refused = assignRelease(firm.lead, order(), NOW);
+    await expect(refused).rejects.toMatchObject({
+      name: "InvalidError",
+      message: expect.stringMatching(/at most 3 cases of one kind.* from 2027-01-15 on/),
+      fields: { exposureNote: [expect.stringMatching(/2027-01-15/)] },
+    });
+    expect(await everythingStored()).toEqual(before);
+    await assignRelease(firm.lead, order({ dueOn: "2027-01-20" }), new Date("2027-01-15T00:00:00Z"));
+  });
+
+  test("is assigned all the same where the lead says why, and the note is kept", async () => {
+    await opened(["2026-01-15", "2026-03-01", "2026-06-01"]);
+    const { id } = await assignRelease(firm.lead, order({ exposureNote: "The receiver has changed." }), NOW);
+    const [stored] = await ownerRows("SELECT exposure_note FROM assignments WHERE id = $1", [id]);
+    expect(stored).toEqual({ exposure_note: "The receiver has changed." });
+  });
+
+  test("is assigned while one case is left, by the limit that the release has", async () => {
+    await opened(["2026-03-01", "2026-06-01"]);
+    const sitting = { days: 30, freshCases: 1, waitHours: 24, exposure: 2 };
+    const narrow = await makeRelease(firm, { frontMatter: frontMatter({ sitting }) });
+    await expect(assignRelease(firm.lead, order({ releaseId: narrow.id }), NOW)).rejects.toThrow(/at most 2 cases/);
+    await assignRelease(firm.lead, order(), NOW);
+  });
+
+  test("counts on the days of the firm, and only what was opened there", async () => {
+    // Noon UTC on 30 November is 1 December on Kiritimati, UTC+14.
+    const east = await makeFirm({ timeZone: "Pacific/Kiritimati" });
+    await opened(["2025-11-30", "2026-03-01", "2026-06-01"], east);
+    const over = { releaseId: (await makeRelease(east)).id, technicianId: east.technician.personId };
+    const assign = (now: string) => assignRelease(east.lead, order(over), new Date(now));
+    await expect(assign("2026-11-30T09:59:59Z")).rejects.toThrow(/from 2026-12-01 on/);
+    await assign("2026-11-30T10:00:00Z");
+    await grantTo(east.technician.personId, firm.employer.id, "technician");
+    await assignRelease(firm.lead, order({ technicianId: east.technician.personId }), NOW);
+  });
 });
 
 describe("refuses", () => {

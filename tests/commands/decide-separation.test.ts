@@ -17,7 +17,7 @@ beforeEach(async () => {
 async function readySitting(given: { technicianId?: string; assignedBy?: Actor } = {}) {
   const { technicianId = firm.technician.personId, assignedBy = firm.lead } = given;
   const release = await makeRelease(firm);
-  const order = { releaseId: release.id, technicianId, dueOn: "2026-12-31" };
+  const order = { releaseId: release.id, technicianId, dueOn: "2026-12-31", exposureNote: null };
   const { id } = await assignRelease(assignedBy, order, NOW);
   const [assignment] = await ownerRows<Awaited<ReturnType<typeof makeAssignment>>>(ASSIGNMENT, [id]);
   const sitting = await makeSitting(firm, { assignment: assignment! });

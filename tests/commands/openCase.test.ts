@@ -1,6 +1,8 @@
 import { beforeEach, describe, expect, test } from "vitest";
 import { openCase } from "@/lib/commands/openCase";
 import { db } from "@/lib/db";
+import { getDecisionDesk } from "@/lib/queries/getDecisionDesk";
+import { getSitting } from "@/lib/queries/getSitting";
 import { makeDecision } from "../support/certified";
 import { makeAssignment, makeCase, makeHandIn, makeMarkingRecord, makeOpenCase, makeSitting } from "../support/chain";
 import { daysFrom, minutesFrom, NOW } from "../support/clock";
@@ -103,6 +105,41 @@ describe("a fresh case", () => {
   test("is refused of a check that is met", async () => {
     await makeMarkingRecord(firm, { sitting });
     await refused(() => open(daysFrom(NOW, 3)), "ConflictError", /is met/);
+  });
+
+  describe("after three of its kind in twelve months", () => {
+    const DAYS = ["2026-03-01", "2026-06-01"].map((day) => new Date(`${day}T12:00:00Z`));
+    const earlier = async () => {
+      const before = await makeSitting(firm);
+      for (const [at, requestedAt] of DAYS.entries()) {
+        await makeCase(firm, { sitting: before, number: at + 1, requestedAt });
+      }
+    };
+    const shown = async (now: Date) => (await getSitting(firm.technician, sitting.id, now))!.checks[0]!.next;
+
+    test("is refused, with the day on which one can be opened, and the page says so", async () => {
+      await earlier();
+      await makeMarkingRecord(firm, { sitting, met: false });
+      const reason = /at most 3 cases of one kind\. The next can be opened from 2027-03-01 on/;
+      await refused(() => open(OPENS_AT), "ConflictError", reason);
+      expect(await shown(OPENS_AT)).toEqual({ state: "closed", reason: expect.stringMatching(reason) });
+    });
+
+    test("opens where the lead has lifted the limit for this sitting", async () => {
+      await earlier();
+      sitting = await makeSitting(firm, { assignment: await makeAssignment(firm, { exposureNote: "New receiver." }) });
+      await makeMarkingRecord(firm, { sitting, met: false });
+      expect(await shown(OPENS_AT)).toEqual({ state: "available", number: 2 });
+      await open(OPENS_AT);
+      expect((await getDecisionDesk(firm.decider, sitting.id, NOW))!.exposureNote).toBe("New receiver.");
+    });
+
+    test("the first case of a sitting opens all the same: it is paid for", async () => {
+      await earlier();
+      await makeCase(firm, { sitting: await makeSitting(firm) });
+      expect(await shown(NOW)).toEqual({ state: "available", number: 1 });
+      await open();
+    });
   });
 
   const secondCase = () => makeCase(firm, { sitting, number: 2 });

@@ -26,6 +26,12 @@ test("a whole front matter is read into plain values", () => {
   });
 });
 
+test("says how many cases of one kind a person may open in twelve months, or leaves it to the usual", () => {
+  const { frontMatter } = withLine(10, "sitting: { days: 30, freshCases: 1, waitHours: 24, exposure: 12 }");
+  expect(frontMatter?.sitting.exposure).toBe(12);
+  expect(parseModule(LINES.join("\n")).frontMatter?.sitting.exposure).toBeUndefined();
+});
+
 test("require may stand over several lines and ask for some of several", () => {
   const { frontMatter, required } = withLine(11, "require:\n  all: [a]\n  some:\n    of: [b, c]\n    count: 1");
   expect(frontMatter?.require).toEqual({ all: ["a"], some: { of: ["b", "c"], count: 1 } });
@@ -64,7 +70,14 @@ test.each<Fault>([
     10,
     "sitting: { days: 3, freshCases: 1, waitHours: 2, tries: 3 }",
     [10, 50],
-    /Known are days, freshCases, waitHours/,
+    /Known are days, freshCases, waitHours, exposure/,
+  ],
+  [
+    "no case of a kind at all",
+    10,
+    "sitting: { days: 3, freshCases: 1, waitHours: 2, exposure: 0 }",
+    [10, 60],
+    /"sitting.exposure" must be a whole number from 1 to 12.*exposure: 3/,
   ],
   ["a line written twice", 4, "title: Again\nscope: Again", [4, 1], /unique/],
   ["nothing required", 11, "require: { all: [] }", [11, 1], /No check is required/],

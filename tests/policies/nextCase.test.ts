@@ -33,11 +33,20 @@ test.each<[string, EarlierCase[], object]>([
   ],
   ["the fresh one open", [notMet(hoursBefore(99)), one("open", { number: 2 })], { state: "open", caseId: "case" }],
 ])("%s", (_what, earlier, expected) => {
-  expect(nextCaseOf(earlier, RULE, NOW)).toEqual(expected);
+  expect(nextCaseOf(earlier, RULE, NOW, null)).toEqual(expected);
 });
 
 test("a release that allows no fresh case closes after the first, and one without a wait opens at once", () => {
   const earlier = [notMet(NOW)];
-  expect(nextCaseOf(earlier, { freshCases: 0, waitHours: 0 }, NOW)).toMatchObject({ state: "closed" });
-  expect(nextCaseOf(earlier, { freshCases: 1, waitHours: 0 }, NOW)).toEqual({ state: "available", number: 2 });
+  expect(nextCaseOf(earlier, { freshCases: 0, waitHours: 0 }, NOW, null)).toMatchObject({ state: "closed" });
+  expect(nextCaseOf(earlier, { freshCases: 1, waitHours: 0 }, NOW, null)).toEqual({ state: "available", number: 2 });
+});
+
+test("after too many of the kind no fresh case opens, and the first one does", () => {
+  expect(nextCaseOf([notMet(hoursBefore(24))], RULE, NOW, "Too many.")).toEqual({
+    state: "closed",
+    reason: "Too many.",
+  });
+  expect(nextCaseOf([], RULE, NOW, "Too many.")).toEqual({ state: "available", number: 1 });
+  expect(nextCaseOf([one("open")], RULE, NOW, "Too many.")).toEqual({ state: "open", caseId: "case" });
 });

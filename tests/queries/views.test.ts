@@ -76,7 +76,7 @@ const VIEWS: Record<string, View> = {
       Promise.all(
         [decider, { ...lead, roles: ["decider" as const] }].map((who) => getDecisionDesk(who, sitting.id, NOW)),
       ),
-    fields: `[].bars[] [].decidability.decidable [].decidability.requirementMet [].mayDecide [].outsideLine
+    fields: `[].bars[] [].decidability.decidable [].decidability.requirementMet [].exposureNote [].mayDecide [].outsideLine
       [].questions[].answer [].questions[].askedAt [].questions[].caseId [].questions[].quantity
       [].questions[].words [].records[].byClock
       [].records[].caseId [].records[].caseNumber [].records[].checkId [].records[].endsAt [].records[].handedInAt

@@ -11,14 +11,16 @@ import {
 import { minutesFrom, NOW } from "../support/clock";
 import type { Firm } from "../support/factories";
 import { insert, ownerRows } from "../support/owner";
-import { publicCase } from "../support/samples";
+import { frontMatter, publicCase } from "../support/samples";
 
 const FILE = { name: "a.sigmf-data", mediaType: "application/octet-stream", sizeBytes: 8, sha256: "0".repeat(64) };
 
 /** All that a firm can have: a certificate, a sitting with an open case, one that waits for the decider, a fee that is due. */
 export async function makeWholeChain(firm: Firm) {
   const made = await makeModule(firm);
-  const release = await makeRelease(firm, { module: made });
+  // One case of the same kind after the other: the usual limit would close the last of them.
+  const sat = { days: 30, freshCases: 1, waitHours: 24, exposure: 12 };
+  const release = await makeRelease(firm, { module: made, frontMatter: frontMatter({ sitting: sat }) });
   const assignment = await makeAssignment(firm, { release });
   const sitting = await makeSitting(firm, { assignment });
   const record = await makeMarkingRecord(firm, { sitting });

@@ -71,7 +71,7 @@ export async function makeRelease(
 /** With its fee, due and open. */
 export async function makeAssignment(
   firm: Firm,
-  given: Given<{ release: Row }, { technicianId: string; dueOn: string }> = {},
+  given: Given<{ release: Row }, { technicianId: string; dueOn: string; exposureNote: string }> = {},
 ) {
   const { release = await makeRelease(firm), ...columns } = given;
   const assignment = await insert<Assignment>("assignments", {
@@ -135,7 +135,7 @@ export async function makeSitting(
 /** Asked for and not drawn yet. */
 export async function makeCase(
   firm: Firm,
-  given: Given<{ sitting: Row }, { checkId: string; kind: string; number: number }> = {},
+  given: Given<{ sitting: Row }, { checkId: string; kind: string; number: number; requestedAt: Date }> = {},
 ) {
   const { sitting = await makeSitting(firm), ...columns } = given;
   return insert<Case>("cases", {

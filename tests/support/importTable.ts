@@ -52,6 +52,8 @@ const DATA_AND_LOGIC: Row[] = [
       "lib/mdx",
       // The one read that a decision needs inside its own transaction.
       "lib/queries/separationFacts",
+      // How often a kind was met, read inside the transaction that assigns or opens.
+      "lib/queries/openedCases",
       // A record of a verification says what the public page says, read in the same way.
       "lib/queries/getPublicVerification",
     ],

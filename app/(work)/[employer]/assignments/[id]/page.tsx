@@ -9,6 +9,7 @@ import { SectionHead } from "@/components/ui/SectionHead";
 import { WorkBar } from "@/components/ui/WorkBar";
 import { orNotFound } from "@/lib/auth/orNotFound";
 import { requireActor } from "@/lib/auth/requireActor";
+import { EXPOSURE_MONTHS, exposureLimit } from "@/lib/policies/exposure";
 import { getAssignment } from "@/lib/queries/getAssignment";
 import { StartSitting } from "./_components/StartSitting";
 import { startSittingAction } from "./actions";
@@ -51,6 +52,10 @@ export default async function AssignmentPage({ params }: { params: Promise<{ emp
                 {
                   label: "Fresh cases",
                   value: `${frontMatter.sitting.freshCases} a check, after ${frontMatter.sitting.waitHours} h`,
+                },
+                {
+                  label: "Cases of one kind",
+                  value: `at most ${exposureLimit(frontMatter.sitting)} in ${EXPOSURE_MONTHS} months`,
                 },
                 { label: "Supervision", value: frontMatter.supervision },
                 { label: "Aids", value: frontMatter.aids.join(", ") || "none" },

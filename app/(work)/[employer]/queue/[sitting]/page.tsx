@@ -30,6 +30,11 @@ export default async function DecisionPage({ params }: Props) {
         <h1 className="text-h1">
           {sitting.technician}, {sitting.code} {sitting.title}
         </h1>
+        {desk.exposureNote && (
+          <Notice tone="caution" fact="Assigned beyond the limit on cases of one kind." className="mt-4">
+            The lead wrote: {desk.exposureNote}
+          </Notice>
+        )}
         <MarkingExhibit employer={employer} desk={desk} />
         <Exhibit number={2} title="The quantities outside" note={outsideNote(desk)}>
           <OutsideRows records={desk.records} checks={sitting.checks} />
