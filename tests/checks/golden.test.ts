@@ -80,13 +80,11 @@ describe("satellites@1", () => {
 
 describe("false-lock@1", () => {
   const plan = planOf(falseLock);
+  // Its capture is held against its hash in false-lock/capture.test.ts, which has made it anyway.
   test.each(list(GOLDEN.falseLockScenes))("scene of seed %i", { timeout: SLOW }, (n, hash) => {
     const { truth } = sceneFor(seedOf(n));
     expect(goldenOf({ truth, publicCase: falseLockCase(truth, plan), files: [] })).toBe(hash);
   });
-  test.each(list(GOLDEN.falseLockCaptures))("capture of seed %i", { timeout: SLOW }, (n, hash) =>
-    expect(goldenOf(falseLock.build(seedOf(n), plan))).toBe(hash),
-  );
 });
 
 describe("cn0@1", () => {

@@ -197,10 +197,10 @@ export const GOLDEN = {
     "ae175517041065e3e3af76ac815e65a62694348afb7fb4905a170c277daf5cd4",
     "092a648387a5d861782a52696ae689147b6793e2cc19b05a373dec216d834c05",
   ],
-  falseLockCaptures: [
-    "d55b2706b58aca505bce671ee5eabdd2e4cd39a0e2c8042378a4ad74b870bb3d",
-    "226b517d7a825db34dd705d5792de0c0ee041cfef4b5fad1550468dbfa1802c8",
-  ],
+  falseLockCaptures: ["d55b2706b58aca505bce671ee5eabdd2e4cd39a0e2c8042378a4ad74b870bb3d"],
+  /** Figures of the markings in false-lock/capture.test.ts and satellites/capture.test.ts. */
+  falseLockMarking: "898d4502dfe176a525c33130665d455230102cf6ea4bbc75427c5f9e51e47db3",
+  satellitesMarking: "4984b80d3da36725425e0f587908ac823129ec579f5444ad06858403beb0235b",
   standOff: [
     "575234bc725ce709a26e2344e5deaa33bbe504be58166b326786e2c73e02669b",
     "98f68353d1223a5b67c9c37d96a3208e7cf2a20d9ea5ac5e0d1934aa0b606e38",
