@@ -15,7 +15,6 @@ export function markStep(truth: PulseAcceptanceTruth, quantity: AskedQuantity, a
   const computed = stepMinutes(truth);
   const word = markChoice({
     quantity,
-    subject: "Is there a step?",
     label: "Is there a step?",
     typed: answerOf(answers, "step.seen"),
     right: [computed === null ? "no" : "yes"],
@@ -27,7 +26,6 @@ export function markStep(truth: PulseAcceptanceTruth, quantity: AskedQuantity, a
   if (computed === null) return [word];
   const time = markNumber({
     quantity,
-    subject: "Time of the step",
     label: "Time of the step",
     typed: answerOf(answers, "step.time"),
     computed,

@@ -39,9 +39,13 @@ export function RecordTable({ record }: { record: MarkingRecordView }) {
                     <Td figure>
                       <HandedIn row={row} />
                     </Td>
-                    <Td figure>{row.computed}</Td>
+                    <Td figure className={wrapped(row.computed)}>
+                      {row.computed}
+                    </Td>
                     <Td figure>{row.difference ?? "–"}</Td>
-                    <Td figure>{row.tolerance}</Td>
+                    <Td figure className={wrapped(row.tolerance)}>
+                      {row.tolerance}
+                    </Td>
                     <Td>
                       {row.offByTolerances !== null && (
                         <Gauge offByTolerances={row.offByTolerances} within={row.within} />
@@ -118,6 +122,10 @@ function Pair({ term, children }: { term: string; children: React.ReactNode }) {
     </div>
   );
 }
+
+/** A figure keeps to its line; words take as many as they need, so that the columns behind them stay on the page. */
+const wrapped = (text: string) => (text.length > LONGEST_FIGURE ? "whitespace-normal min-w-36" : undefined);
+const LONGEST_FIGURE = 20;
 
 /** More than a word or a number: it stands in a line of its own. */
 const isAccount = (row: MarkedRow) => row.understood === null && row.handedIn.trim().length > LONGEST_WORD;
