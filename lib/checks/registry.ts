@@ -6,6 +6,7 @@ import { falseLock } from "./false-lock/falseLock";
 import { formula } from "./formula/formula";
 import { interferer } from "./interferer/interferer";
 import { jammedOrNot } from "./jammed-or-not/jammedOrNot";
+import { corrected } from "./corrections";
 import type { CheckKind } from "./kind";
 import { locate } from "./locate/locate";
 import { lostDecibels } from "./lost-decibels/lostDecibels";
@@ -39,11 +40,11 @@ export const KINDS: readonly CheckKind[] = [
 ];
 
 /**
- * A kind by its name, the newest version unless one is given.
+ * A kind by its name, the newest version unless one is given; it marks by its newest correction.
  * @throws RangeError for a kind or a version that no release can name
  */
 export function kindOf(id: string, version?: number): CheckKind {
   const found = KINDS.find((kind) => kind.id === id && (version === undefined || kind.version === version));
   if (!found) throw new RangeError(`kindOf: no kind ${id}${version === undefined ? "" : ` of version ${version}`}`);
-  return found;
+  return corrected(found);
 }

@@ -9,6 +9,12 @@ export const JOBS = {
   "build-case": { payload: z.object({ caseId: z.uuid() }).strict(), expireSeconds: 120, retries: 5 },
   "close-case": { payload: z.object({ caseId: z.uuid() }).strict(), expireSeconds: 30, retries: 10 },
   "mark-case": { payload: z.object({ caseId: z.uuid() }).strict(), expireSeconds: 180, retries: 5 },
+  "review-case": {
+    payload: z.object({ reviewId: z.uuid(), caseId: z.uuid() }).strict(),
+    expireSeconds: 180,
+    retries: 5,
+  },
+  "mark-again": { payload: z.object({ actId: z.uuid() }).strict(), expireSeconds: 60, retries: 10 },
   "issue-certificate": { payload: z.object({ decisionId: z.uuid() }).strict(), expireSeconds: 60, retries: 10 },
   "sign-verification": {
     payload: z.object({ verificationId: z.uuid() }).strict(),

@@ -28,6 +28,7 @@ export const can = {
     isTheTechnician(actor, sitting) || holds(actor, sitting.employerId, "lead", "assessor", "decider"),
   /** Few sittings are few people: how they did is read by who wrote the checks, as their records are. */
   readStatistics: (actor: Actor, release: Owned) => holds(actor, release.employerId, "lead"),
+  reviewMarkings: (actor: Actor, employer: Owned) => holds(actor, employer.employerId, "lead"),
   readQueue: (actor: Actor, sitting: Owned) => holds(actor, sitting.employerId, "assessor", "decider"),
   /** Whoever sat a case neither judges it nor answers the own question. */
   judge: (actor: Actor, sitting: Persons) =>

@@ -38,6 +38,8 @@ export type DecisionDeskView = {
   /** Why the lead assigned it although this person had opened as many cases of a kind as may be. */
   exposureNote: string | null;
   mayDecide: boolean;
+  /** A record was made after the decision, which stands on the earlier one. */
+  isMarkedAgain: boolean;
   records: (Omit<RecordRow, "handedInAt" | "openedAt" | "endsAt"> & {
     handedInAt: string;
     openedAt: string;
@@ -72,6 +74,7 @@ export async function getDecisionDesk(
     outsideLine: actor.outsideLine,
     exposureNote: assignment.exposureNote,
     mayDecide: can.decide(actor, actor),
+    isMarkedAgain: (await select(MARKED_SINCE, { sittingId })).length > 0,
     records: records.map((record) => ({
       ...record,
       handedInAt: iso(record.handedInAt),
@@ -87,6 +90,9 @@ const RECORDS = `
     k.needs, k.met, h.words, x.handed_in_at AS "handedInAt", x.opened_at AS "openedAt", x.ends_at AS "endsAt", x.by_clock AS "byClock"
   FROM case_states x JOIN marking_records k ON k.id = x.record_id JOIN hand_ins h ON h.case_id = x.id
   WHERE x.sitting_id = :sittingId ORDER BY x.handed_in_at`;
+const MARKED_SINCE = `
+  SELECT 1 FROM case_states x JOIN decisions d ON d.sitting_id = x.sitting_id
+  WHERE x.sitting_id = :sittingId AND x.marked_at > d.decided_at LIMIT 1`;
 const QUESTIONS = `
   SELECT x.id AS "caseId", q.quantity, q.words, q.asked_at AS "askedAt", a.words AS answer
   FROM questions q LEFT JOIN question_answers a ON a.question_id = q.id

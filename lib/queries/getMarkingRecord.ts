@@ -44,6 +44,7 @@ type Row = {
   handedInAt: Date;
   captureSha256: string | null;
 };
+export type RecordLine = { sequence: number; marking: string; met: boolean; markedAt: string };
 type Asked = {
   id: string;
   quantity: string;
@@ -59,22 +60,33 @@ export type MarkingRecordView = Omit<Row, "employerId" | "technicianId" | "marke
   markedAt: string;
   handedInAt: string;
   isMine: boolean;
+  /** All records of the case, the newest first; an earlier one is followed, never changed. */
+  records: RecordLine[];
   mayAnswer: boolean;
   questions: (Omit<Asked, "askedAt" | "answeredAt"> & { askedAt: string; answeredAt: string | null })[];
 };
 
-/** The newest marking record of a case: whole, with reasons and workings. Null until it is marked. */
-export async function getMarkingRecord(actor: Actor, caseId: string): Promise<MarkingRecordView | null> {
+/**
+ * A marking record of a case: whole, with reasons and workings. Null until it is marked.
+ * @param sequence an earlier one; the newest when left out
+ */
+export async function getMarkingRecord(
+  actor: Actor,
+  caseId: string,
+  sequence: number | null = null,
+): Promise<MarkingRecordView | null> {
   if (!isId(caseId)) return null;
-  const [row] = await select<Row>(SQL, { caseId, employerId: actor.employerId });
+  const [row] = await select<Row>(SQL, { caseId, sequence, employerId: actor.employerId });
   if (!row || !can.readRecord(actor, row)) return null;
   const { employerId: _employer, technicianId, checks, ...view } = row;
   const questions = await select<Asked>(QUESTIONS, { caseId });
+  const records = await select<Omit<RecordLine, "markedAt"> & { markedAt: Date }>(RECORDS, { caseId });
   return {
     ...view,
     checkTitle: checks.find((plan) => plan.id === row.checkId)!.title,
     markedAt: iso(row.markedAt),
     handedInAt: iso(row.handedInAt),
+    records: records.map((one) => ({ ...one, markedAt: iso(one.markedAt) })),
     mayAnswer: can.answerQuestion(actor, row),
     isMine: technicianId === actor.personId,
     questions: questions.map((one) => ({ ...one, askedAt: iso(one.askedAt), answeredAt: isoOrNull(one.answeredAt) })),
@@ -89,12 +101,16 @@ const SQL = `
     k.within_count AS "withinCount", k.needs, k.met, k.workings, k.duration_ms AS "durationMs", k.marked_at AS "markedAt",
     k.sequence, k.reason, jp.name AS judge, h.words, h.by_clock AS "byClock", h.handed_in_at AS "handedInAt",
     (SELECT sha256 FROM captures WHERE case_id = x.id AND name LIKE '%-data') AS "captureSha256"
-  FROM case_states x JOIN marking_records k ON k.id = x.record_id JOIN hand_ins h ON h.case_id = x.id
+  FROM case_states x JOIN marking_records k ON k.case_id = x.id
+    AND CASE WHEN :sequence::int IS NULL THEN k.id = x.record_id ELSE k.sequence = :sequence::int END
+  JOIN hand_ins h ON h.case_id = x.id
   JOIN sittings s ON s.id = x.sitting_id JOIN releases r ON r.id = s.release_id JOIN modules m ON m.id = r.module_id
   LEFT JOIN people jp ON jp.id = k.judged_by
   JOIN people p ON p.id = s.technician_id JOIN fees f ON f.assignment_id = s.assignment_id
   LEFT JOIN decisions d ON d.sitting_id = s.id LEFT JOIN certificates c ON c.sitting_id = s.id
   WHERE x.id = :caseId AND s.employer_id = :employerId`;
+const RECORDS = `
+  SELECT sequence, marking, met, marked_at AS "markedAt" FROM marking_records WHERE case_id = :caseId ORDER BY sequence DESC`;
 const QUESTIONS = `
   SELECT q.id, q.quantity, q.words, q.asked_at AS "askedAt", a.words AS answer, ap.name AS "answeredBy", a.answered_at AS "answeredAt"
   FROM questions q LEFT JOIN question_answers a ON a.question_id = q.id LEFT JOIN people ap ON ap.id = a.answered_by

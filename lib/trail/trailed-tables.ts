@@ -11,11 +11,15 @@ export const RECORD_TABLES = [
   "hand_ins",
   "marking_records",
   "questions",
+  "question_answers",
   "decisions",
   "certificates",
   "standings",
   "trainings",
   "closings",
+  "marking_reviews",
+  "review_findings",
+  "review_acts",
 ] as const;
 
 /** Tables whose rows may change, with an entry for every change. */

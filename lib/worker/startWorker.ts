@@ -38,7 +38,9 @@ export async function startWorker(env: ReturnType<typeof workerEnv>): Promise<{ 
   });
   const lanes = [
     new Lane(queue, tasks, ["mark-case", "build-case"], ENGINE_THREADS),
-    new Lane(queue, tasks, ["close-case"], 2),
+    new Lane(queue, tasks, ["close-case", "mark-again"], 2),
+    // Hundreds at a time and nobody waits: a lane of one, beside the cases of technicians who do.
+    new Lane(queue, tasks, ["review-case"], 1),
     new Lane(queue, tasks, ["issue-certificate"], 1),
     // Strangers may ask for these; they hold up nothing of the chain.
     new Lane(queue, tasks, ["sign-verification"], 1),

@@ -2,7 +2,9 @@ import "server-only";
 import { buildCase } from "@/lib/commands/buildCase";
 import { closeCase } from "@/lib/commands/closeCase";
 import { issueCertificate, type IssueTools } from "@/lib/commands/issueCertificate";
+import { markAgain } from "@/lib/commands/markAgain";
 import { markCase } from "@/lib/commands/markCase";
+import { reviewCase } from "@/lib/commands/reviewCase";
 import { sendMail, type Outgoing } from "@/lib/commands/sendMail";
 import { signVerification } from "@/lib/commands/signVerification";
 import type { Storage } from "@/lib/storage/storage";
@@ -24,6 +26,9 @@ export const workerTasks = (tools: WorkTools): Tasks => ({
   "close-case": ({ caseId }) => closeCase(caseId, tools.publicOrigin),
   "mark-case": ({ caseId }, signal) =>
     markCase(caseId, { ...tools, engine: engineFor(tools.threads, caseId, "mark-case", signal) }),
+  "review-case": ({ reviewId, caseId }, signal) =>
+    reviewCase({ reviewId, caseId }, { ...tools, engine: engineFor(tools.threads, caseId, "review-case", signal) }),
+  "mark-again": ({ actId }) => markAgain(actId, tools.publicOrigin),
   "issue-certificate": ({ decisionId }) => issueCertificate(decisionId, tools),
   "sign-verification": ({ verificationId }) => signVerification(verificationId, tools),
   "send-mail": ({ mailId }) => sendMail(mailId, tools.deliver),

@@ -18,10 +18,13 @@ export const RECORDS = [
   "decisions",
   "hand_ins",
   "marking_records",
+  "marking_reviews",
   "question_answers",
   "questions",
   "release_writers",
   "releases",
+  "review_acts",
+  "review_findings",
   "sittings",
   "standings",
   "trail_entries",
@@ -56,6 +59,17 @@ export async function makeEveryRecord(): Promise<void> {
   await insert("trainings", {
     ...{ employerId: firm.employer.id, trainerId: firm.lead.personId, technicianId: askedBy, endedOn: "2026-06-01" },
     recordedBy: firm.lead.personId,
+  });
+  const review = await insert<{ id: string }>("marking_reviews", {
+    ...{ employerId: firm.employer.id, kind: "correlator-reading", kindVersion: 1, marking: "correlator-reading@1.2" },
+    ...{ reason: "It was wrong.", cases: 1, askedBy: firm.lead.personId, askedAt: NOW },
+  });
+  await insert("review_findings", {
+    ...{ reviewId: review.id, caseId, recordId: markingRecordId, metBefore: true, met: true, changedRows: [] },
+    ...{ marking: {}, engineVersion: "1.0.0", durationMs: 40, foundAt: NOW },
+  });
+  await insert("review_acts", {
+    ...{ reviewId: review.id, sittingId: sitting.id, act: "mark again", actedBy: firm.lead.personId, actedAt: NOW },
   });
   await insert("closings", { sittingId: sitting.id, unfinished: true, closedAt: NOW });
   const [entry] = await ownerRows<{ id: string }>("SELECT min(id)::text AS id FROM trail_entries");

@@ -38,6 +38,9 @@ const TABLES: Record<string, { web: Rights; worker: Rights }> = {
   marking_records: EVERY,
   questions: EVERY,
   question_answers: EVERY,
+  marking_reviews: EVERY,
+  review_findings: { ...EVERY, web: rights("read") },
+  review_acts: EVERY,
   closings: { ...EVERY, web: rights("read") },
   progress: {
     web: rights("read"),

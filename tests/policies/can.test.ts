@@ -24,6 +24,7 @@ const ALLOWED: Record<Act, Role[]> = {
   readSitting: ["lead", "assessor", "decider", "administrator"],
   readRecord: ["lead", "assessor", "decider"],
   readStatistics: ["lead"],
+  reviewMarkings: ["lead"],
   readQueue: ["assessor", "decider"],
   judge: ["assessor"],
   answerQuestion: ["assessor"],

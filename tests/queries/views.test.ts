@@ -14,6 +14,8 @@ import { getReleaseStatistics } from "@/lib/queries/getReleaseStatistics";
 import { getSitting } from "@/lib/queries/getSitting";
 import { listCertificates } from "@/lib/queries/listCertificates";
 import { listJudging } from "@/lib/queries/listJudging";
+import { listCertificateReviews } from "@/lib/queries/listCertificateReviews";
+import { listCorrections } from "@/lib/queries/listCorrections";
 import { listModules } from "@/lib/queries/listModules";
 import { listPeople } from "@/lib/queries/listPeople";
 import { listQueue } from "@/lib/queries/listQueue";
@@ -21,8 +23,10 @@ import { listQuestions } from "@/lib/queries/listQuestions";
 import { listRecords } from "@/lib/queries/listRecords";
 import { listSittings } from "@/lib/queries/listSittings";
 import { listTrail } from "@/lib/queries/listTrail";
-import { NOW } from "../support/clock";
+import { makeMarkingRecord } from "../support/chain";
+import { minutesFrom, NOW } from "../support/clock";
 import { makeFirm, type Firm } from "../support/factories";
+import { CORRECTION, makeFinding, makeReview } from "../support/reviews";
 import { expectPlain, shapeOf } from "./shape";
 import { makeWholeChain, type WholeChain } from "./wholeChain";
 
@@ -76,7 +80,7 @@ const VIEWS: Record<string, View> = {
       Promise.all(
         [decider, { ...lead, roles: ["decider" as const] }].map((who) => getDecisionDesk(who, sitting.id, NOW)),
       ),
-    fields: `[].bars[] [].decidability.decidable [].decidability.requirementMet [].exposureNote [].mayDecide [].outsideLine
+    fields: `[].bars[] [].decidability.decidable [].decidability.requirementMet [].exposureNote [].isMarkedAgain [].mayDecide [].outsideLine
       [].questions[].answer [].questions[].askedAt [].questions[].caseId [].questions[].quantity
       [].questions[].words [].records[].byClock
       [].records[].caseId [].records[].caseNumber [].records[].checkId [].records[].endsAt [].records[].handedInAt
@@ -87,7 +91,8 @@ const VIEWS: Record<string, View> = {
     run: ({ technician }, { record }) => getMarkingRecord(technician, record.caseId),
     fields: `byClock captureSha256 caseId caseNumber checkId checkTitle code durationMs engineVersion fingerprint
       freshCases handedInAt id isMine judge markedAt marking mayAnswer met moduleTitle needs quantities*
-      questions[].answer questions[].answeredAt questions[].answeredBy questions[].askedAt questions[].id questions[].quantity questions[].words reason release rows* sequence sittingId sittingNumber
+      questions[].answer questions[].answeredAt questions[].answeredBy questions[].askedAt questions[].id questions[].quantity questions[].words reason records[].markedAt
+      records[].marking records[].met records[].sequence release rows* sequence sittingId sittingNumber
       sittingState technician withinCount words workings*`,
   },
   getModule: {
@@ -142,6 +147,31 @@ const VIEWS: Record<string, View> = {
     run: ({ lead }) => listCertificates(lead, NOW),
     fields:
       "[].code [].daysLeft [].effectiveOn [].holder [].issuer [].lastDay [].number [].release [].standing [].title",
+  },
+  listCorrections: {
+    run: async (firm, { record }) => {
+      const review = await makeReview(firm);
+      await makeFinding({ review, record, met: false });
+      return listCorrections(firm.lead, [CORRECTION]);
+    },
+    fields: `[].marking [].older [].reason [].review.askedAt [].review.askedBy [].review.cases
+      [].review.changed[].act [].review.changed[].actReason [].review.changed[].actedAt [].review.changed[].actedBy
+      [].review.changed[].cases[].caseId [].review.changed[].cases[].changedRows[].before
+      [].review.changed[].cases[].changedRows[].label [].review.changed[].cases[].changedRows[].now
+      [].review.changed[].cases[].checkId [].review.changed[].cases[].checkTitle [].review.changed[].cases[].met
+      [].review.changed[].cases[].metBefore [].review.changed[].cases[].number [].review.changed[].certificate
+      [].review.changed[].code [].review.changed[].number [].review.changed[].outcome
+      [].review.changed[].requirement.before [].review.changed[].requirement.now [].review.changed[].sittingId
+      [].review.changed[].standing [].review.changed[].technician [].review.changed[].title
+      [].review.computed [].review.id [].review.stopped [].review.unchanged [].title`,
+  },
+  listCertificateReviews: {
+    run: async (firm, { record }) => {
+      const again = { sequence: 2, reason: "corrected", met: false, markedAt: minutesFrom(NOW, 5) };
+      await makeMarkingRecord(firm, { case: { id: record.caseId }, ...again });
+      return listCertificateReviews(firm.decider);
+    },
+    fields: "[].code [].markedAt [].number [].sittingNumber [].technician [].title",
   },
   listModules: {
     run: ({ lead }) => listModules(lead),

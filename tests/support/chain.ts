@@ -211,7 +211,10 @@ export async function makeHandIn(
 
 export async function makeMarkingRecord(
   firm: Firm,
-  given: Given<{ case: Case; sitting: Row }, { met: boolean; sequence: number; reason: string; rows: object[] }> = {},
+  given: Given<
+    { case: Row; sitting: Row },
+    { met: boolean; sequence: number; reason: string; rows: object[]; markedAt: Date }
+  > = {},
 ) {
   const { case: asked, sitting, ...columns } = given;
   const handedIn = asked ?? (await makeHandIn(firm, { sitting }));

@@ -69,6 +69,8 @@ const DATA_AND_LOGIC: Row[] = [
       ...["lib/certificates", "lib/mdx", "lib/storage", "lib/trail"],
       // What records come to is counted by the core that marks them.
       "lib/checks/statistics",
+      // Which markings have been corrected, and what the kinds are called.
+      ...["lib/checks/corrections", "lib/checks/registry"],
     ],
     types: ["lib/checks"],
     packages: ["server-only", "sequelize", "node:fs/promises", "jose"],

@@ -35,7 +35,9 @@ export class FakeEngine implements Engine {
   readonly seeds: string[] = [];
   readonly asked: { plan: CheckPlan; answers: object }[] = [];
 
-  constructor(private readonly over: { met?: boolean; truth?: unknown; before?: () => Promise<unknown> } = {}) {}
+  constructor(
+    private readonly over: { met?: boolean; truth?: unknown; name?: string; before?: () => Promise<unknown> } = {},
+  ) {}
 
   async build(seedHex: string): Promise<BuiltCase> {
     this.seeds.push(seedHex);
@@ -47,6 +49,11 @@ export class FakeEngine implements Engine {
     this.seeds.push(seedHex);
     this.asked.push({ plan, answers });
     await this.over.before?.();
-    return { truth: this.over.truth ?? truthOf(seedHex), marking: marking(this.over.met ?? true) };
+    return { truth: this.over.truth ?? truthOf(seedHex), marking: this.#marking() };
+  }
+
+  #marking(): Marking {
+    const { met = true, name } = this.over;
+    return { ...marking(met), ...(name !== undefined && { marking: name }) };
   }
 }

@@ -2,7 +2,8 @@ import { beforeEach, expect, test } from "vitest";
 import { fingerprintOf } from "@/lib/certificates/canonicalJson";
 import { ENGINE_VERSION } from "@/lib/checks/engineVersion";
 import { sealSecret } from "@/lib/commands/caseSecret";
-import { EngineDiffersError, markCase } from "@/lib/commands/markCase";
+import { EngineDiffersError } from "@/lib/commands/computeMarking";
+import { markCase } from "@/lib/commands/markCase";
 import { plainTruth } from "@/lib/commands/plainTruth";
 import { reportProgress } from "@/lib/commands/reportProgress";
 import {

@@ -20,7 +20,14 @@ export default async function ModulesPage({ params }: { params: Promise<{ employ
   const rows = await orNotFound(listModules(actor));
   return (
     <div className="page py-8 desk:py-10">
-      <h1 className="text-h1">Modules</h1>
+      <div className="flex flex-wrap items-center justify-between gap-4">
+        <h1 className="text-h1">Modules</h1>
+        {can.reviewMarkings(actor, actor) && (
+          <LinkKey href={`/${employer}/modules/corrections`} size="small">
+            Corrected markings
+          </LinkKey>
+        )}
+      </div>
       <div className="mt-6 grid gap-x-14 gap-y-10 desk:grid-cols-[2fr_1fr]">
         <div className="min-w-0">
           {rows.length === 0 ? (

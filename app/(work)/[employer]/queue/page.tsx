@@ -7,9 +7,11 @@ import { SectionHead } from "@/components/ui/SectionHead";
 import { RowHead, Table, Td, Th, Tr } from "@/components/ui/Table";
 import { orNotFound } from "@/lib/auth/orNotFound";
 import { requireActor } from "@/lib/auth/requireActor";
+import { listCertificateReviews } from "@/lib/queries/listCertificateReviews";
 import { listJudging } from "@/lib/queries/listJudging";
 import { listQuestions } from "@/lib/queries/listQuestions";
 import { listQueue } from "@/lib/queries/listQueue";
+import { CertificateReviews } from "./_components/CertificateReviews";
 import { JudgingList } from "./_components/JudgingList";
 import { QuestionList } from "./_components/QuestionList";
 
@@ -19,12 +21,14 @@ export default async function QueuePage({ params }: { params: Promise<{ employer
   const { employer } = await params;
   const actor = await requireActor(employer);
   const rows = await orNotFound(listQueue(actor));
+  const certificates = await listCertificateReviews(actor);
   const judging = await listJudging(actor);
   const questions = await listQuestions(actor);
   return (
     <div className="page py-8 desk:py-10">
       <h1 className="text-h1">Queue</h1>
       <p className="mt-2 max-w-measure text-lead text-ink-2">What waits for a person, the longest wait first.</p>
+      <CertificateReviews employer={employer} rows={certificates} />
       <JudgingList employer={employer} rows={judging} />
       <QuestionList employer={employer} rows={questions} />
       <section className="mt-8">

@@ -35,6 +35,11 @@ export default async function DecisionPage({ params }: Props) {
             The lead wrote: {desk.exposureNote}
           </Notice>
         )}
+        {desk.isMarkedAgain && (
+          <Notice tone="caution" fact="Marked again after the decision." className="mt-4">
+            The decision stands on the earlier records; each record below leads to the one before it.
+          </Notice>
+        )}
         <MarkingExhibit employer={employer} desk={desk} />
         <Exhibit number={2} title="The quantities outside" note={outsideNote(desk)}>
           <OutsideRows records={desk.records} checks={sitting.checks} />

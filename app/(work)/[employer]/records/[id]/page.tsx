@@ -4,6 +4,7 @@ import { RecordTable } from "./_components/RecordTable";
 import { QuantityLine } from "@/components/checks/QuantityLine";
 import { SittingStateWord } from "@/components/sittings/SittingStateWord";
 import { LinkKey } from "@/components/ui/LinkKey";
+import { Notice } from "@/components/ui/Notice";
 import { WorkBar } from "@/components/ui/WorkBar";
 import { orNotFound } from "@/lib/auth/orNotFound";
 import { requireActor } from "@/lib/auth/requireActor";
@@ -12,9 +13,13 @@ import { answerQuestionAction, askQuestionAction } from "./actions";
 
 export const metadata: Metadata = { title: "Marking record" };
 
-export default async function RecordPage({ params }: { params: Promise<{ employer: string; id: string }> }) {
+type Props = { params: Promise<{ employer: string; id: string }>; searchParams: Promise<{ of?: string | string[] }> };
+
+export default async function RecordPage({ params, searchParams }: Props) {
   const { employer, id } = await params;
-  const record = await orNotFound(getMarkingRecord(await requireActor(employer), id));
+  const { of } = await searchParams;
+  const sequence = typeof of === "string" && /^[1-9]\d{0,5}$/.test(of) ? Number(of) : null;
+  const record = await orNotFound(getMarkingRecord(await requireActor(employer), id, sequence));
   const { quantities, withinCount, needs } = record;
   const critical = quantities.some((quantity) => quantity.critical);
   return (
@@ -34,6 +39,16 @@ export default async function RecordPage({ params }: { params: Promise<{ employe
       />
       <div className="page grid gap-x-6 gap-y-8 py-5 desk:grid-cols-[1fr_21.5rem]">
         <div className="min-w-0">
+          {record.sequence < record.records[0]!.sequence && (
+            <Notice
+              tone="caution"
+              fact="A later record follows this one."
+              className="mb-5"
+              action={<LinkKey href={`/${employer}/records/${id}`}>Open the newest</LinkKey>}
+            >
+              The case was marked again; what it says now is there.
+            </Notice>
+          )}
           <RecordTable record={record} />
           <div className="flex flex-wrap items-center gap-6 border-t-strong border-ink bg-sheet px-4 py-4">
             <QuantityLine quantities={quantities} />

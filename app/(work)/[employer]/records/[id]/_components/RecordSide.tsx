@@ -46,6 +46,22 @@ export function RecordSide({
           ]}
         />
         {record.sequence > 1 && <p className="mt-3 text-dense">Marked again: {record.reason}</p>}
+        {record.records.length > 1 && (
+          <ul className="mt-3 grid gap-1 text-dense">
+            {record.records.map(({ sequence, marking, met, markedAt }) => (
+              <li key={sequence}>
+                {sequence === record.sequence ? (
+                  <strong className="font-semibold">Record {sequence}</strong>
+                ) : (
+                  <Link className="link" href={`/${employer}/records/${record.caseId}?of=${sequence}`}>
+                    Record {sequence}
+                  </Link>
+                )}
+                : {met ? "met" : "not met"}, {marking}, {formatInstant(markedAt)}
+              </li>
+            ))}
+          </ul>
+        )}
         {!record.judge && <Workings lines={record.workings} />}
       </section>
       {record.words && (
