@@ -1,5 +1,5 @@
 // Fills an empty database with an invented firm, so that the demonstration can be walked from a draft to a certificate.
-// Nothing computed is seeded: sittings, markings and certificates come from using it.
+// Nothing computed is seeded here: sittings, markings and certificates come from using it.
 import { mkdir, readFile, writeFile } from "node:fs/promises";
 import path from "node:path";
 import { transact } from "@/lib/commands/transact";

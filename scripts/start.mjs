@@ -49,7 +49,7 @@ async function start() {
   if (demonstrating) {
     await demonstration.makeIssuerKey(root, settings);
     const mark = path.join(home, "pg", "demo-seeded");
-    await demonstration.seedDemonstration(root, mark, processSettings("web", env), path.join(logs, "seed.log"));
+    await demonstration.seedDemonstration(root, mark, env, path.join(logs, "seed.log"));
     demonstration.startStandIns(processes, home, settings, process.env);
   }
   const watch = developing ? ["--watch"] : [];

@@ -91,7 +91,7 @@ async function browserLane(tally, cluster, note) {
     await prepareDatabase(root, env);
     await demonstration.makeIssuerKey(root, settings);
     const mark = path.join(own, "demo-seeded");
-    await demonstration.seedDemonstration(root, mark, processSettings("web", env), path.join(logs, "seed.log"));
+    await demonstration.seedDemonstration(root, mark, env, path.join(logs, "seed.log"));
     const processes = new Processes(root, logs, note, { onEnd: (reason) => tally.fail("running product", reason) });
     demonstration.startStandIns(processes, own, settings, process.env);
     processes.start("worker", [...demonstration.TYPESCRIPT, "lib/worker/main.ts"], processSettings("worker", env));

@@ -4,10 +4,11 @@ import { Ledger } from "@/components/ui/Ledger";
 import { SectionHead } from "@/components/ui/SectionHead";
 import { wholeNumbers } from "@/components/ui/wholeNumbers";
 import { CAUTIONS } from "@/components/mdx/cautions";
+import type { PublicCase } from "@/lib/checks/kind";
 import type { OpenCaseView } from "@/lib/queries/getCase";
 
 type GivenPaneProps = {
-  open: Omit<OpenCaseView, "brief"> & { view: NonNullable<OpenCaseView["view"]> };
+  open: Pick<OpenCaseView, "files"> & { view: PublicCase };
   filesAddress: string;
   /** What the lead wrote inside the check. */
   brief?: ReactNode;

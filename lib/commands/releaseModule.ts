@@ -2,22 +2,30 @@ import "server-only";
 import { QueryTypes, type Transaction } from "sequelize";
 import { fingerprintOf } from "@/lib/certificates/canonicalJson";
 import { db, select } from "@/lib/db";
-import { ConflictError, InvalidError, NotFoundError } from "@/lib/errors";
+import { ConflictError, InvalidError } from "@/lib/errors";
 import type { CheckedModule } from "@/lib/mdx/moduleReading";
-import { readModule } from "@/lib/mdx/readModule";
 import type { Actor } from "@/lib/policies/actor";
 import { authorize } from "@/lib/policies/authorize";
 import { can } from "@/lib/policies/can";
-import { Draft, Module, Release } from "@/models";
+import { Release } from "@/models";
 import type { ReleaseKind } from "@/models/Release";
-import { lockOwnModule, requireId } from "./lockOwn";
+import { keepReleasedChecks, releasedChecks, type ReleaseReasons } from "./keepReleasedChecks";
+import { lockOwnModule } from "./lockOwn";
+import { readOwnDraft } from "./readOwnDraft";
 import { transact } from "./transact";
 
-type ReleaseOrder = { moduleId: string; revision: number; kind: Exclude<ReleaseKind, "first">; reason: string };
+type ReleaseOrder = {
+  moduleId: string;
+  revision: number;
+  kind: Exclude<ReleaseKind, "first">;
+  reason: string;
+  /** Asked only for what is outside the bounds of the release check. */
+  outside: ReleaseReasons;
+};
 
 /** Freeze the draft as the next numbered release. */
 export async function releaseModule(actor: Actor, order: ReleaseOrder) {
-  const checked = await readDraft(actor, order);
+  const checked = await readOwnDraft(actor, order.moduleId);
   return transact(actor, async (transaction) => {
     const { module, draft } = await lockOwnModule(actor, order.moduleId, transaction);
     authorize(can.releaseModule(actor, module), "release this module");
@@ -29,6 +37,7 @@ export async function releaseModule(actor: Actor, order: ReleaseOrder) {
     }
     const last = await lastRelease(module.id, transaction);
     if (last?.source === draft.source) throw new ConflictError(`Nothing changed since release ${last.number}.`);
+    const kept = await releasedChecks(checked, order.outside, transaction);
     const number = nextNumber(last?.number, order.kind);
     const release = await Release.create(
       {
@@ -47,21 +56,9 @@ export async function releaseModule(actor: Actor, order: ReleaseOrder) {
     );
     const replacements = { releaseId: release.id, moduleId: module.id, personId: actor.personId };
     await db.query(NOTE_HANDS, { replacements, transaction, type: QueryTypes.INSERT });
+    await keepReleasedChecks(release.id, kept, transaction);
     return { id: release.id, number, fingerprint: release.fingerprint };
   });
-}
-
-/** Parsing takes its own thread and time, so it happens before any lock is held. */
-async function readDraft(actor: Actor, { moduleId }: ReleaseOrder): Promise<CheckedModule> {
-  requireId(moduleId, "module");
-  const own = await Module.count({ where: { id: moduleId, employerId: actor.employerId } });
-  const draft = own ? await Draft.findByPk(moduleId) : null;
-  if (!draft) throw new NotFoundError("module");
-  authorize(can.releaseModule(actor, actor), "release this module");
-  const { module, problems } = await readModule(draft.source);
-  if (module) return module;
-  const errors = problems.filter((problem) => problem.severity === "error");
-  throw new ConflictError(`${errors.length === 1 ? "1 error" : `${errors.length} errors`} to fix first.`);
 }
 
 async function lastRelease(moduleId: string, transaction: Transaction) {

@@ -19,7 +19,7 @@ const REPORT = `
   INSERT INTO progress (subject_id, job, step, done, total, fault, updated_at)
   SELECT DISTINCT ON (subject, name) subject, name, 'failed', 0, 1, upper(left(id::text, 8)), completed_on
   FROM (
-    SELECT id, name, completed_on, coalesce(data->>'caseId', data->>'decisionId', data->>'verificationId')::uuid AS subject
+    SELECT id, name, completed_on, coalesce(data->>'caseId', data->>'decisionId', data->>'verificationId', data->>'runId')::uuid AS subject
     FROM ${JOBS_SCHEMA}.job WHERE state = 'failed' AND name <> :deadLetters
   ) failed
   WHERE subject IS NOT NULL ORDER BY subject, name, completed_on DESC

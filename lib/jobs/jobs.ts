@@ -15,6 +15,7 @@ export const JOBS = {
     retries: 5,
   },
   "mark-again": { payload: z.object({ actId: z.uuid() }).strict(), expireSeconds: 60, retries: 10 },
+  "check-release": { payload: z.object({ runId: z.uuid() }).strict(), expireSeconds: 180, retries: 5 },
   "issue-certificate": { payload: z.object({ decisionId: z.uuid() }).strict(), expireSeconds: 60, retries: 10 },
   "sign-verification": {
     payload: z.object({ verificationId: z.uuid() }).strict(),

@@ -10,6 +10,7 @@ import { barsToDeciding } from "@/lib/policies/separation";
 import { Assignment, Employer, Sitting } from "@/models";
 import { iso, isId } from "./findOwn";
 import { getSitting, type SittingView } from "./getSitting";
+import { releasedOutside, type ReleasedOutside } from "./releasedOutside";
 import { separationFacts } from "./separationFacts";
 
 type RecordRow = {
@@ -46,6 +47,8 @@ export type DecisionDeskView = {
     endsAt: string;
   })[];
   questions: (Omit<QuestionRow, "askedAt"> & { askedAt: string })[];
+  /** Released outside a bound of the release check, with the reason given. */
+  releasedOutside: ReleasedOutside[];
 };
 
 /** All that lies before the decider, in the order a decider asks for it. */
@@ -82,6 +85,7 @@ export async function getDecisionDesk(
       endsAt: iso(record.endsAt),
     })),
     questions: questions.map((question) => ({ ...question, askedAt: iso(question.askedAt) })),
+    releasedOutside: await releasedOutside(row.releaseId),
   };
 }
 

@@ -8,6 +8,7 @@ import type { Actor } from "@/lib/policies/actor";
 import { authorize } from "@/lib/policies/authorize";
 import { can } from "@/lib/policies/can";
 import { iso, isId } from "./findOwn";
+import { releasedOutside, type ReleasedOutside } from "./releasedOutside";
 import { SITTING_STATE, type SittingState } from "./sittingState";
 
 type Row = {
@@ -37,6 +38,8 @@ export type AssignedLine = {
 export type ReleaseView = Omit<Row, "releasedAt"> & {
   releasedAt: string;
   checkCards: Record<string, CheckCardView>;
+  /** Released outside a bound of the release check, with the reason given. */
+  outside: ReleasedOutside[];
   assigned: AssignedLine[];
   technicians: { id: string; name: string }[];
 };
@@ -51,6 +54,7 @@ export async function getRelease(actor: Actor, moduleId: string, number: string)
     ...row,
     releasedAt: iso(row.releasedAt),
     checkCards: checkCards(row.checks),
+    outside: await releasedOutside(row.id),
     assigned: await select<AssignedLine>(ASSIGNED, { releaseId: row.id }),
     technicians: await select<{ id: string; name: string }>(TECHNICIANS, { employerId }),
   };

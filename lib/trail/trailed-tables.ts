@@ -20,6 +20,8 @@ export const RECORD_TABLES = [
   "marking_reviews",
   "review_findings",
   "review_acts",
+  "release_checks",
+  "released_checks",
 ] as const;
 
 /** Tables whose rows may change, with an entry for every change. */

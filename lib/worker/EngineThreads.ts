@@ -5,22 +5,35 @@ import { log } from "@/lib/log";
 import type { EngineResult, EngineTask } from "./computeCase";
 import type { EngineMessage } from "./engineThread";
 
+type Waiting = { urgent: boolean; since: number; take: (thread: Worker) => void };
+
+/** So long what is not urgent stands back; without an end it would never come to its turn on a busy day. */
+const PATIENCE_MS = 30_000;
+
 /**
  * Threads that compute, so that this process goes on polling, telling progress and sending mails. Each has loaded the
- * checks once and takes one task after the other. There are as many as tasks at once: the lane sets the bound.
+ * checks once and takes one task after the other; never more than so many compute at once. Who waits for a case goes before
+ * a release check.
  */
 export class EngineThreads {
   #idle: Worker[] = [];
   #all = new Set<Worker>();
+  #waiting: Waiting[] = [];
+
+  constructor(private readonly most: number) {}
 
   /** Loading the checks takes about a second; better before the first technician waits. */
-  warm(threads: number): void {
-    for (let count = 0; count < threads; count += 1) this.#idle.push(this.#start());
+  warm(): void {
+    while (this.#all.size < this.most) this.#idle.push(this.#start());
   }
 
-  /** @param signal ends the computation where it stands; its thread is thrown away */
-  run(task: EngineTask, progress: Progress, signal: AbortSignal): Promise<EngineResult> {
-    const thread = this.#idle.pop() ?? this.#start();
+  /**
+   * @param signal ends the computation where it stands; its thread is thrown away
+   * @param urgent false for what may wait until nobody waits for a case
+   */
+  async run(task: EngineTask, progress: Progress, signal: AbortSignal, urgent = true): Promise<EngineResult> {
+    signal.throwIfAborted();
+    const thread = await this.#free(urgent, signal);
     return new Promise<EngineResult>((resolve, reject) => {
       const settle = (act: () => void) => {
         thread.removeAllListeners("message").removeListener("exit", onExit);
@@ -31,11 +44,10 @@ export class EngineThreads {
       const onExit = () => settle(() => reject(new Error("EngineThreads: the thread died")));
       const onMessage = (message: EngineMessage) => {
         if (message.is === "progress") return progress(message.done, message.total, message.step);
-        settle(() => this.#idle.push(thread));
+        settle(() => this.#release(thread));
         if (message.is === "result") resolve(message.result);
         else reject(message.error as Error);
       };
-      if (signal.aborted) return onAbort();
       signal.addEventListener("abort", onAbort);
       thread.on("message", onMessage).on("exit", onExit);
       thread.postMessage(task);
@@ -43,7 +55,37 @@ export class EngineThreads {
   }
 
   async stop(): Promise<void> {
+    this.#waiting = [];
     await Promise.all([...this.#all].map((thread) => thread.terminate()));
+  }
+
+  #free(urgent: boolean, signal: AbortSignal): Promise<Worker> {
+    const idle = this.#idle.pop() ?? (this.#all.size < this.most ? this.#start() : null);
+    if (idle) return Promise.resolve(idle);
+    return new Promise((resolve, reject) => {
+      const onAbort = () => {
+        this.#waiting = this.#waiting.filter((one) => one !== waiting);
+        reject(signal.reason as Error);
+      };
+      const waiting: Waiting = {
+        urgent,
+        since: performance.now(),
+        take: (thread) => {
+          signal.removeEventListener("abort", onAbort);
+          resolve(thread);
+        },
+      };
+      signal.addEventListener("abort", onAbort);
+      this.#waiting.push(waiting);
+    });
+  }
+
+  #release(thread: Worker): void {
+    const since = performance.now() - PATIENCE_MS;
+    const next = this.#waiting.find((one) => one.urgent || one.since < since) ?? this.#waiting[0];
+    if (!next) return void this.#idle.push(thread);
+    this.#waiting = this.#waiting.filter((one) => one !== next);
+    next.take(thread);
   }
 
   #start(): Worker {
@@ -54,6 +96,8 @@ export class EngineThreads {
     thread.on("exit", () => {
       this.#all.delete(thread);
       this.#idle = this.#idle.filter((idle) => idle !== thread);
+      // Whoever waits gets one in its place.
+      if (this.#waiting.length > 0) this.#release(this.#start());
     });
     return thread;
   }

@@ -11,7 +11,7 @@ export function engineFor(threads: EngineThreads, caseId: string, job: JobName, 
     const writer = new ProgressWriter(caseId, job);
     writer.progress(0, 1, "starting");
     try {
-      return await threads.run(task, writer.progress, signal);
+      return await threads.run(task, writer.progress, signal, job !== "review-case");
     } finally {
       await writer.close();
     }

@@ -28,8 +28,8 @@ const GRACE_MS = 6000;
 /** One worker process; any number of them may run, on any number of machines. */
 export async function startWorker(env: ReturnType<typeof workerEnv>): Promise<{ stop(): Promise<void> }> {
   const issuer = readIssuer(env);
-  const threads = new EngineThreads();
-  threads.warm(ENGINE_THREADS);
+  const threads = new EngineThreads(ENGINE_THREADS);
+  threads.warm();
   const mail = mailDelivery(env);
   const queue = await openQueue(env.WORKER_DATABASE_URL);
   const tasks = workerTasks({
@@ -41,6 +41,8 @@ export async function startWorker(env: ReturnType<typeof workerEnv>): Promise<{ 
     new Lane(queue, tasks, ["close-case", "mark-again"], 2),
     // Hundreds at a time and nobody waits: a lane of one, beside the cases of technicians who do.
     new Lane(queue, tasks, ["review-case"], 1),
+    // One at a time, and of its slices none while a case waits for a thread.
+    new Lane(queue, tasks, ["check-release"], 1),
     new Lane(queue, tasks, ["issue-certificate"], 1),
     // Strangers may ask for these; they hold up nothing of the chain.
     new Lane(queue, tasks, ["sign-verification"], 1),

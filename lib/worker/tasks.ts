@@ -1,5 +1,6 @@
 import "server-only";
 import { buildCase } from "@/lib/commands/buildCase";
+import { checkRelease } from "@/lib/commands/checkRelease";
 import { closeCase } from "@/lib/commands/closeCase";
 import { issueCertificate, type IssueTools } from "@/lib/commands/issueCertificate";
 import { markAgain } from "@/lib/commands/markAgain";
@@ -11,6 +12,7 @@ import type { Storage } from "@/lib/storage/storage";
 import { engineFor } from "./engineFor";
 import type { EngineThreads } from "./EngineThreads";
 import type { Tasks } from "./Lane";
+import { trialEngineFor } from "./trialEngineFor";
 
 export type WorkTools = IssueTools & {
   threads: EngineThreads;
@@ -29,6 +31,7 @@ export const workerTasks = (tools: WorkTools): Tasks => ({
   "review-case": ({ reviewId, caseId }, signal) =>
     reviewCase({ reviewId, caseId }, { ...tools, engine: engineFor(tools.threads, caseId, "review-case", signal) }),
   "mark-again": ({ actId }) => markAgain(actId, tools.publicOrigin),
+  "check-release": ({ runId }, signal) => checkRelease(runId, trialEngineFor(tools.threads, signal)),
   "issue-certificate": ({ decisionId }) => issueCertificate(decisionId, tools),
   "sign-verification": ({ verificationId }) => signVerification(verificationId, tools),
   "send-mail": ({ mailId }) => sendMail(mailId, tools.deliver),

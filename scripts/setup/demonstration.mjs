@@ -3,6 +3,7 @@ import path from "node:path";
 import { pathToFileURL } from "node:url";
 import { freePort } from "./ports.mjs";
 import { keptPorts, keptSecrets } from "./keptSecrets.mjs";
+import { processSettings } from "./processSettings.mjs";
 import { mustRun } from "./run.mjs";
 import { say } from "./say.mjs";
 
@@ -69,10 +70,13 @@ export async function makeIssuerKey(root, settings) {
 }
 
 /** Fills an empty database with the demo firm, once in the life of the database. */
-export async function seedDemonstration(root, mark, env, log) {
+export async function seedDemonstration(root, mark, settings, log) {
   if (fs.existsSync(mark)) return;
   say("Seeding the demo firm ...");
-  await mustRun("Seeding", "node", [...TYPESCRIPT, "scripts/seed.ts"], { cwd: root, env, log });
+  const run = (script, process) =>
+    mustRun("Seeding", "node", [...TYPESCRIPT, script], { cwd: root, env: processSettings(process, settings), log });
+  await run("scripts/seed.ts", "web");
+  await run("scripts/seed-release-checks.ts", "worker");
   fs.writeFileSync(mark, "");
 }
 

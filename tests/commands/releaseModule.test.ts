@@ -4,9 +4,11 @@ import path from "node:path";
 import { beforeEach, describe, expect, test, vi } from "vitest";
 import { nextNumber, releaseModule } from "@/lib/commands/releaseModule";
 import { saveDraft } from "@/lib/commands/saveDraft";
+import { readModule } from "@/lib/mdx/readModule";
 import { makeModule } from "../support/chain";
 import { makeActor, makeFirm, type Firm } from "../support/factories";
 import { owner, ownerRows } from "../support/owner";
+import { makeReleaseChecks } from "../support/releaseChecks";
 import { everythingStored, expectNothingLeft, rowsOf, trailOf, waitForWaiting } from "../support/written";
 import { refusals } from "./refusals";
 
@@ -15,6 +17,7 @@ vi.setConfig({ testTimeout: 90_000 });
 
 const SOURCE = readFileSync(path.resolve(import.meta.dirname, "../../content/modules/sbw-r2.mdx"), "utf8");
 const CODE = "SBW-R2";
+const { checks: plans } = await readModule(SOURCE);
 
 let firm: Firm;
 let other: Firm;
@@ -22,9 +25,12 @@ let moduleId: string;
 beforeEach(async () => {
   [firm, other] = [await makeFirm(), await makeFirm()];
   moduleId = (await makeModule(firm, { code: CODE, source: SOURCE })).id;
+  await makeReleaseChecks(plans);
 });
 type Order = Parameters<typeof releaseModule>[1];
-const order = (revision = 1, kind: Order["kind"] = "minor"): Order => ({ moduleId, revision, kind, reason: "because" });
+const order = (revision = 1, kind: Order["kind"] = "minor"): Order => ({
+  ...{ moduleId, revision, kind, reason: "because", outside: { checks: {}, sitting: "" } },
+});
 const change = (revision: number, more: string, who = firm.lead) =>
   saveDraft(who, { moduleId, title: "Prove it", source: `${SOURCE}\n${more}\n`, revision });
 
@@ -45,7 +51,14 @@ test("freezes text, front matter, checks and tree of the draft under number 1.0"
     released_by: firm.lead.personId,
   });
   expect(stored!.front_matter).toMatchObject({ code: CODE, sitting: { days: 30, freshCases: 1, waitHours: 24 } });
-  expect(stored!.checks.map((check) => check.id)).toEqual(["reading", "plan", "satellites", "false-lock", "side-peak", "cn0"]);
+  expect(stored!.checks.map((check) => check.id)).toEqual([
+    "reading",
+    "plan",
+    "satellites",
+    "false-lock",
+    "side-peak",
+    "cn0",
+  ]);
   expect(stored!.tree.type).toBe("root");
 });
 
@@ -96,11 +109,15 @@ test("stands in the trail with who released it and for which firm", async () => 
   const { id } = await releaseModule(firm.lead, order());
   const employer = firm.employer.id;
   const hand = (part: string) => `${id}/${firm.lead.personId}/${part}`;
-  expect(await trailOf(firm.lead)).toEqual([
+  const relied = await ownerRows<{ id: string }>("SELECT id FROM released_checks ORDER BY check_id NULLS LAST");
+  const entries = await trailOf(firm.lead);
+  expect(entries.filter(({ act }) => act !== "released_checks added")).toEqual([
     { act: "releases added", employer, key: id },
     { act: "release_writers added", employer, key: hand("wrote") },
     { act: "release_writers added", employer, key: hand("released") },
   ]);
+  const kept = entries.filter(({ act }) => act === "released_checks added");
+  expect(kept.map(({ key }) => key).sort()).toEqual(relied.map((row) => row.id).sort());
 });
 
 describe("refuses", () => {

@@ -84,6 +84,14 @@ export const PAGES: Readonly<Record<string, Addressed>> = {
     answers: pageFor("lead", "administrator"),
   },
   "/[employer]/modules/corrections": own("modules/corrections", "lead"),
+  "/[employer]/modules/[id]/release-check": {
+    address: (ids) => `/${ids.employer}/modules/${ids.module}/release-check`,
+    answers: pageFor("lead"),
+  },
+  "/[employer]/modules/[id]/release-check/[check]": {
+    address: (ids) => `/${ids.employer}/modules/${ids.triedModule}/release-check/list?line=read&n=0&hand=0`,
+    answers: pageFor("lead"),
+  },
   "/[employer]/people": own("people", "lead", "administrator"),
   "/[employer]/counter": own("counter", "administrator"),
   "/[employer]/counter/orders/[id]": {
@@ -131,6 +139,10 @@ export const READING_ROUTES: Readonly<Record<string, Addressed>> = {
   "GET /api/employers/[employer]/cases/[id]/progress": firmRoute(
     (ids) => `cases/${ids.openCase}/progress`,
     routeFor(...READERS),
+  ),
+  "GET /api/employers/[employer]/modules/[id]/release-check": firmRoute(
+    (ids) => `modules/${ids.module}/release-check`,
+    routeFor("lead"),
   ),
   "GET /api/employers/[employer]/certificates/[number]/pdf": firmRoute(
     (ids) => `certificates/${ids.certificate}/pdf`,
@@ -180,6 +192,8 @@ export const ACTIONS: Readonly<Record<string, Crossed>> = {
   endRoleAction: crossedIn("commands/people-roles", "endRole"),
   recordTrainingAction: crossedIn("commands/people-trainings", "recordTraining"),
   createModuleAction: crossedIn("commands/createModule", "createModule"),
+  askReleaseCheckAction: crossedIn("commands/askReleaseCheck", "askReleaseCheck"),
+  stopReleaseCheckAction: crossedIn("commands/askReleaseCheck", "stopReleaseCheck"),
   releaseModuleAction: crossedIn("commands/releaseModule", "releaseModule"),
   reviewMarkingAction: crossedIn("commands/reviewMarking", "reviewMarking"),
   actOnReviewAction: crossedIn("commands/actOnReview", "actOnReview"),
@@ -203,6 +217,7 @@ export const JOB_ROWS: Readonly<Record<string, Crossed>> = {
   "mark-case": crossedIn("worker/markCase", "markCase"),
   "review-case": crossedIn("worker/reviewCase", "reviewCase"),
   "mark-again": crossedIn("worker/markAgain", "markAgain"),
+  "check-release": crossedIn("worker/checkRelease", "checkRelease"),
   "issue-certificate": crossedIn("worker/issueCertificate", "issueCertificate"),
   "sign-verification": crossedIn("worker/signVerification", "signVerification"),
   "send-mail": crossedIn("worker/sendMail", "sendMail"),

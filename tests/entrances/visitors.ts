@@ -17,6 +17,7 @@ export type Ids = Readonly<
   Record<
     | "employer"
     | "module"
+    | "triedModule"
     | "release"
     | "assignment"
     | "order"

@@ -17,6 +17,7 @@ import {
 import { makeActor, makeEmployer, makeFirm, makePerson, makeSession } from "@/tests/support/factories";
 import { insert, ownerRows } from "@/tests/support/owner";
 import { checkPlan } from "@/tests/support/samples";
+import { TWO_CHECKS } from "@/tests/support/twoChecks";
 import type { Ids, Visitor } from "./visitors";
 
 /** One firm with every record of the chain; put into the database of the running product. */
@@ -46,6 +47,8 @@ export async function makeWorld() {
   const ids: Ids = {
     employer: firm.employer.slug,
     module: made.id,
+    // Its checks can be tried.
+    triedModule: (await makeModule(firm, { code: "TWO-1", source: TWO_CHECKS })).id,
     release: release.number,
     // Not started yet: once it is, its page leads on to the sitting.
     assignment: (await makeAssignment(firm)).id,

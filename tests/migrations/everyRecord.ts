@@ -21,7 +21,9 @@ export const RECORDS = [
   "marking_reviews",
   "question_answers",
   "questions",
+  "release_checks",
   "release_writers",
+  "released_checks",
   "releases",
   "review_acts",
   "review_findings",
@@ -72,6 +74,10 @@ export async function makeEveryRecord(): Promise<void> {
     ...{ reviewId: review.id, sittingId: sitting.id, act: "mark again", actedBy: firm.lead.personId, actedAt: NOW },
   });
   await insert("closings", { sittingId: sitting.id, unfinished: true, closedAt: NOW });
+  const check = { fingerprint: HASH, plan: {}, engineVersion: "1.0.0", tally: {}, finishedAt: NOW };
+  const { id: releaseCheckId } = await insert<{ id: string }>("release_checks", check);
+  const { releaseId } = sitting;
+  await insert("released_checks", { releaseId, checkId: "reading", releaseCheckId, within: true, reason: "" });
   const [entry] = await ownerRows<{ id: string }>("SELECT min(id)::text AS id FROM trail_entries");
   await insert("trail_links", { sequence: 1, entryId: entry!.id, entrySha256: HASH, linkSha256: HASH });
   await insert("trail_heads", { sequence: 1, linkSha256: HASH, signedAt: NOW, signature: "none" });

@@ -23,6 +23,13 @@ const TABLES: Record<string, { web: Rights; worker: Rights }> = {
   // The right to change an id is the right to lock the row; a trigger refuses the change itself.
   releases: { ...EVERY, web: rights("read add", "id") },
   release_writers: EVERY,
+  // The web process asks (columns of its own) and stops; what was counted comes from the worker alone.
+  release_check_runs: {
+    web: rights("read", "stopped_at"),
+    worker: rights("read remove", "finished_at", "tally", "tried", "whole_tried"),
+  },
+  release_checks: { ...EVERY, web: rights("read") },
+  released_checks: { ...EVERY, worker: rights("read") },
   assignments: EVERY,
   orders: { ...EVERY, web: rights("read add", "checkout_session_id", "checkout_url", "closed_at", "paid_at") },
   fees: { ...EVERY, web: rights("read add", "order_id", "settled_at") },

@@ -11,8 +11,10 @@ import { getDecisionDesk } from "@/lib/queries/getDecisionDesk";
 import { getJudging } from "@/lib/queries/getJudging";
 import { getMarkingRecord } from "@/lib/queries/getMarkingRecord";
 import { getModule } from "@/lib/queries/getModule";
+import { getFailingCase } from "@/lib/queries/getFailingCase";
 import { getRelease } from "@/lib/queries/getRelease";
 import { getReleaseStatistics } from "@/lib/queries/getReleaseStatistics";
+import { getReleaseCheck } from "@/lib/queries/getReleaseCheck";
 import { getSitting } from "@/lib/queries/getSitting";
 import { listCertificates, listOwnCertificates, listRegister } from "@/lib/queries/listCertificates";
 import { listJudging } from "@/lib/queries/listJudging";
@@ -22,17 +24,23 @@ import { listQuestions } from "@/lib/queries/listQuestions";
 import { listRecords } from "@/lib/queries/listRecords";
 import { listOwnSittings, listSittings } from "@/lib/queries/listSittings";
 import { listTrail } from "@/lib/queries/listTrail";
+import { makeModule } from "../support/chain";
 import { NOW } from "../support/clock";
 import { makeActor, makeFirm, type Firm } from "../support/factories";
 import { ownerRows } from "../support/owner";
+import { TWO_CHECKS } from "../support/twoChecks";
 import { makeWholeChain, type WholeChain } from "./wholeChain";
 
 let firm: Firm;
 let other: Firm;
 let chain: WholeChain;
+let tried: string;
+const getFailing = (actor: Actor, id: string) =>
+  getFailingCase(actor, id, { checkId: "list", line: "read", n: 0, hand: 0 });
 beforeEach(async () => {
   [firm, other] = [await makeFirm(), await makeFirm()];
   chain = await makeWholeChain(firm);
+  tried = (await makeModule(firm, { code: "TWO-1", source: TWO_CHECKS })).id;
 });
 
 type Outcome = "given" | "none" | "refused";
@@ -81,6 +89,8 @@ const ONE_ROW: Record<string, OneRow> = {
     else: "none",
   },
   getRegisterEntry: { ask: getRegisterEntry, id: () => chain.certificate.number, to: JUDGES, else: "refused" },
+  getReleaseCheck: { ask: getReleaseCheck, id: () => chain.module.id, to: ["lead"], else: "refused" },
+  getFailingCase: { ask: getFailing, id: () => tried, to: ["lead"], else: "refused" },
   getModule: { ask: getModule, id: () => chain.module.id, to: LEADS, else: "refused" },
   getRelease: {
     ask: (actor, id) => getRelease(actor, id, "1.0"),

@@ -85,7 +85,7 @@ const VIEWS: Record<string, View> = {
       [].questions[].words [].records[].byClock
       [].records[].caseId [].records[].caseNumber [].records[].checkId [].records[].endsAt [].records[].handedInAt
       [].records[].met [].records[].needs [].records[].openedAt [].records[].quantities* [].records[].rows*
-      [].records[].withinCount [].records[].words [].sitting*`,
+      [].records[].withinCount [].records[].words [].releasedOutside[].checkId [].releasedOutside[].reason [].sitting*`,
   },
   getMarkingRecord: {
     run: ({ technician }, { record }) => getMarkingRecord(technician, record.caseId),
@@ -110,7 +110,7 @@ const VIEWS: Record<string, View> = {
   getRelease: {
     run: ({ lead }, { module }) => getRelease(lead, module.id, "1.0"),
     fields: `assigned[].dueOn assigned[].feeSettled assigned[].id assigned[].sittingId assigned[].state
-      assigned[].technician checkCards* checks* code fingerprint frontMatter* id kind moduleId number reason releasedAt
+      assigned[].technician checkCards* checks* code fingerprint frontMatter* id kind moduleId number outside[].checkId outside[].reason reason releasedAt
       releasedBy technicians[].id technicians[].name title tree*`,
   },
   getReleaseStatistics: {

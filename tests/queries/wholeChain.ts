@@ -21,6 +21,8 @@ export async function makeWholeChain(firm: Firm) {
   // One case of the same kind after the other: the usual limit would close the last of them.
   const sat = { days: 30, freshCases: 1, waitHours: 24, exposure: 12 };
   const release = await makeRelease(firm, { module: made, frontMatter: frontMatter({ sitting: sat }) });
+  const outside = { checkId: "reading", within: false, reason: "A first edition, watched for a month." };
+  await insert("released_checks", { releaseId: release.id, ...outside });
   const assignment = await makeAssignment(firm, { release });
   const sitting = await makeSitting(firm, { assignment });
   const record = await makeMarkingRecord(firm, { sitting });

@@ -34,6 +34,8 @@ const DATA_AND_LOGIC: Row[] = [
   // Lists that a schema must not repeat: roles, lengths of passwords.
   { files: "lib/schemas/", may: ["lib/gnss/constants", "lib/policies"], packages: ["zod"] },
   { files: "lib/policies/", may: ["lib/errors", "lib/calendar"], packages: [] },
+  // The fingerprint of a plan of a check, and what a finished table says of it; for commands and queries alike.
+  { files: "lib/release-checks/", may: ["lib/certificates/canonicalJson", "lib/checks"], packages: [] },
   {
     files: "lib/certificates/",
     may: ["lib/errors", "lib/calendar"],
@@ -50,6 +52,7 @@ const DATA_AND_LOGIC: Row[] = [
       "lib/trail",
       // A module is read, and its first text written, by the same rules that the editor shows.
       "lib/mdx",
+      "lib/release-checks",
       // The one read that a decision needs inside its own transaction.
       "lib/queries/separationFacts",
       // How often a kind was met, read inside the transaction that assigns or opens.
@@ -66,7 +69,7 @@ const DATA_AND_LOGIC: Row[] = [
       "lib/policies",
       ...SMALL,
       // A file is held against its own signature, a draft is read, the cards of a module's checks are made.
-      ...["lib/certificates", "lib/mdx", "lib/storage", "lib/trail"],
+      ...["lib/certificates", "lib/mdx", "lib/storage", "lib/trail", "lib/release-checks"],
       // What records come to is counted by the core that marks them.
       "lib/checks/statistics",
       // Which markings have been corrected, and what the kinds are called.
@@ -90,7 +93,16 @@ const DATA_AND_LOGIC: Row[] = [
   { files: "lib/jobs/", may: ["lib/db", "lib/schemas"], packages: ["server-only", "pg-boss", "sequelize", "zod"] },
   {
     files: "lib/worker/",
-    may: ["lib/commands", "lib/queries", "lib/checks", "lib/storage", "lib/jobs", "lib/log", ...SMALL],
+    may: [
+      "lib/commands",
+      "lib/queries",
+      "lib/checks",
+      "lib/release-checks",
+      "lib/storage",
+      "lib/jobs",
+      "lib/log",
+      ...SMALL,
+    ],
     types: ["lib/certificates"],
     packages: ["server-only", "nodemailer", "pg-boss", "node:"],
   },

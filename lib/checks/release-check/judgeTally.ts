@@ -1,5 +1,6 @@
 import { binomialBounds, type RateBounds } from "@/lib/numeric/binomialBounds";
-import type { CheckKind } from "../kind";
+import { wrongMethodsOf } from "../definitionsOf";
+import type { CheckKind, CheckPlan } from "../kind";
 import { CONFIDENCE, LEAST_RIGHT, MOST_GUESSED, MOST_WRONG } from "./rule";
 import type { Count, LineId, Tally } from "./tally";
 
@@ -14,7 +15,7 @@ export type LineVerdict = Count &
   };
 
 /** Every line of the table against its bound. Rates of a line that was never tried are 0. */
-export function judgeTally(kind: Pick<CheckKind, "wrongMethods" | "trial">, { lines }: Tally): LineVerdict[] {
+export function judgeTally(kind: CheckKind, plan: CheckPlan, { lines }: Tally): LineVerdict[] {
   const line = (id: LineId, label: string, asked: string, holds: (counted: Counted) => boolean): LineVerdict => {
     const counted = countedOf(lines[id]);
     return { id, label, asked, ...counted, within: holds(counted) };
@@ -31,7 +32,7 @@ export function judgeTally(kind: Pick<CheckKind, "wrongMethods" | "trial">, { li
       `at least ${percent(LEAST_RIGHT.rate)}, lower bound ${percent(LEAST_RIGHT.lower)}`,
       ({ tried, rate, lower }) => tried > 0 && rate >= LEAST_RIGHT.rate && lower >= LEAST_RIGHT.lower,
     ),
-    ...Object.entries(kind.wrongMethods).map(([name, { label }]) =>
+    ...Object.entries(wrongMethodsOf(kind, plan)).map(([name, { label }]) =>
       line(`wrong/${name}`, label, `at most ${percent(MOST_WRONG)}`, ({ rate }) => rate <= MOST_WRONG),
     ),
     line(

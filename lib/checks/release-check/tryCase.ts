@@ -1,4 +1,5 @@
 import { seededRandom } from "@/lib/numeric/random";
+import { wrongMethodsOf } from "../definitionsOf";
 import { formatUnderstood } from "../formatUnderstood";
 import type { Answers, BuiltCase, CheckKind, CheckPlan, Difficulty, Marking, Trial } from "../kind";
 import { caseSeed } from "./caseSeed";
@@ -26,7 +27,7 @@ export function tryCase(kind: TriedKind, plan: CheckPlan, baseSeedHex: string, n
     trial.judge(built, plan, handInOf(kind, plan, built, seedHex, line, hand));
   const read = tried("read", 0);
   count.add("read", read.met, 0, outside(read));
-  for (const name of Object.keys(kind.wrongMethods)) {
+  for (const name of Object.keys(wrongMethodsOf(kind, plan))) {
     const wrong = tried(`wrong/${name}`, 0);
     if (handedIn(wrong) !== handedIn(right)) count.add(`wrong/${name}`, wrong.met, 0, "met by a wrong method");
     else count.name(`wrong/${name}`);
@@ -51,7 +52,7 @@ export function handInOf(
   if (line === "guess")
     return trial.guess(built.publicCase, plan, seededRandom(seedHex, `release-check/guess-${hand}`));
   if (line === "solvable") return trial.solve ? trial.solve(built, plan) : kind.solve(built, plan);
-  const method = kind.wrongMethods[line.slice("wrong/".length)];
+  const method = wrongMethodsOf(kind, plan)[line.slice("wrong/".length)];
   if (!method) throw new RangeError(`handInOf: ${kind.id} has no line ${line}`);
   return method.solve(built, plan);
 }

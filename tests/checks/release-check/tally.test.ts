@@ -13,7 +13,7 @@ const trials = (faults: Faults, from: number, to: number): Tally => {
   for (let n = from; n < to; n++) sum = addTallies(sum, tryCase(sampleKind(faults), samplePlan, BASE, n));
   return sum;
 };
-const verdict = (tally: Tally, id: string) => judgeTally(sampleKind(), tally).find((line) => line.id === id);
+const verdict = (tally: Tally, id: string) => judgeTally(sampleKind(), samplePlan, tally).find((line) => line.id === id);
 
 describe("seeds", () => {
   test("are 64 figures, each of its own, the same every time", () => {
@@ -101,7 +101,7 @@ describe("the bounds", () => {
   test("whole cases have a line where the trial leaves the samples out", () => {
     const kind = sampleKind();
     const search = { ...kind, trial: { ...kind.trial, whole: false } };
-    const lines = judgeTally(search, counted({ whole: { tried: 25, met: 24 } }));
+    const lines = judgeTally(search, samplePlan, counted({ whole: { tried: 25, met: 24 } }));
     expect(lines.find(({ id }) => id === "whole")).toMatchObject({ tried: 25, met: 24, within: false });
     expect(verdict(counted({ whole: { tried: 25, met: 24 } }), "whole")).toBeUndefined();
   });

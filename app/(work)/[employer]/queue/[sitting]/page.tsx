@@ -9,6 +9,7 @@ import { confirmPasswordAction } from "@/lib/auth/actions";
 import { DecisionForm } from "./_components/DecisionForm";
 import { Exhibit } from "./_components/Exhibit";
 import { OutsideRows } from "./_components/OutsideRows";
+import { ReleasedOutsideList } from "@/components/checks/ReleasedOutsideList";
 import { QuantityLine } from "@/components/checks/QuantityLine";
 import { SittingLog } from "./_components/SittingLog";
 import { decideAction } from "./actions";
@@ -50,6 +51,11 @@ export default async function DecisionPage({ params }: Props) {
         <Exhibit number={4} title="Sitting log" note="identity not confirmed by a person">
           <SittingLog records={desk.records} checks={sitting.checks} />
         </Exhibit>
+        {desk.releasedOutside.length > 0 && (
+          <Exhibit number={5} title="Released outside a bound" note="of the release check, with the lead’s reason">
+            <ReleasedOutsideList outside={desk.releasedOutside} />
+          </Exhibit>
+        )}
       </div>
       <aside className="border-ink bg-sheet px-(--margin) py-7 desk:border-l-strong">
         <Decision employer={employer} desk={desk} />

@@ -1,7 +1,7 @@
 import type { Metadata } from "next";
 import { RecordSide } from "./_components/RecordSide";
-import { RecordTable } from "./_components/RecordTable";
 import { QuantityLine } from "@/components/checks/QuantityLine";
+import { RecordTable } from "@/components/checks/RecordTable";
 import { SittingStateWord } from "@/components/sittings/SittingStateWord";
 import { LinkKey } from "@/components/ui/LinkKey";
 import { Notice } from "@/components/ui/Notice";
@@ -49,7 +49,7 @@ export default async function RecordPage({ params, searchParams }: Props) {
               The case was marked again; what it says now is there.
             </Notice>
           )}
-          <RecordTable record={record} />
+          <RecordTable rows={record.rows} />
           <div className="flex flex-wrap items-center gap-6 border-t-strong border-ink bg-sheet px-4 py-4">
             <QuantityLine quantities={quantities} />
             <p className="font-semibold">

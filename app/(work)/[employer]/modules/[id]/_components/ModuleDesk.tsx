@@ -81,6 +81,9 @@ export function ModuleDesk({ employer, draft, reading: first, release }: ModuleD
           at={saved.state === "saved" ? (saved.at ?? undefined) : undefined}
           where={saved.why ?? "At the server, not released"}
         />
+        <Link className="link text-dense" href={`/${employer}/modules/${draft.id}/release-check`}>
+          Release check
+        </Link>
         {last && (
           <Link className="link text-dense" href={`/${employer}/modules/${draft.id}/releases/${last.number}`}>
             Release {last.number}

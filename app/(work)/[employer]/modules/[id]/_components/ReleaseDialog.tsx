@@ -6,6 +6,8 @@ import { Key } from "@/components/ui/Key";
 import { Notice } from "@/components/ui/Notice";
 import { RadioRows } from "@/components/ui/RadioRows";
 import { TextArea } from "@/components/ui/TextArea";
+import { NO_REASONS, releaseCheckReason, ReleaseReasons, type Reasons } from "./ReleaseReasons";
+import { useReleaseCheck } from "./useReleaseCheck";
 
 type ReleaseDialogProps = {
   open: boolean;
@@ -25,6 +27,8 @@ export function ReleaseDialog({ open, onClose, employer, moduleId, last, save, a
   const [reason, setReason] = useState("");
   const [message, setMessage] = useState<string | null>(null);
   const [pending, start] = useTransition();
+  const [reasons, setReasons] = useState<Reasons>(NO_REASONS);
+  const { data: view } = useReleaseCheck(employer, moduleId, { ask: open });
   const number = last ? numberAfter(last, kind) : "1.0";
 
   const release = () =>
@@ -38,6 +42,7 @@ export function ReleaseDialog({ open, onClose, employer, moduleId, last, save, a
         revision: String(revision),
         kind,
         reason,
+        outside: JSON.stringify(reasons),
       })) {
         form.set(name, value);
       }
@@ -54,7 +59,7 @@ export function ReleaseDialog({ open, onClose, employer, moduleId, last, save, a
         <Key
           variant="filled"
           busy={pending}
-          reason={reason.trim() ? null : "Say what changed and why."}
+          reason={reason.trim() ? releaseCheckReason(view, reasons) : "Say what changed and why."}
           onClick={release}
         >
           Release {number}
@@ -89,6 +94,12 @@ export function ReleaseDialog({ open, onClose, employer, moduleId, last, save, a
         maxLength={2000}
         value={reason}
         onChange={(event) => setReason(event.target.value)}
+      />
+      <ReleaseReasons
+        href={`/${employer}/modules/${moduleId}/release-check`}
+        view={view}
+        reasons={reasons}
+        onChange={setReasons}
       />
       {message && (
         <Notice tone="minus" fact={message} live>

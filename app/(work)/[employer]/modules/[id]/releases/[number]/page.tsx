@@ -1,4 +1,5 @@
 import type { Metadata } from "next";
+import { ReleasedOutsideList } from "@/components/checks/ReleasedOutsideList";
 import { ModuleTree } from "@/components/mdx/ModuleTree";
 import { SittingStateWord } from "@/components/sittings/SittingStateWord";
 import { ChipStrip } from "@/components/ui/ChipStrip";
@@ -45,6 +46,14 @@ export default async function ReleasePage({ params }: Props) {
           )}
           <Assigned employer={employer} release={release} />
           {figures && <CheckFigures figures={figures} />}
+          {release.outside.length > 0 && (
+            <section aria-labelledby="outside">
+              <SectionHead title="Released outside a bound" id="outside" note="of the release check" />
+              <div className="mt-3">
+                <ReleasedOutsideList outside={release.outside} />
+              </div>
+            </section>
+          )}
           <details className="border-t-hair border-rule-strong pt-4" open={release.assigned.length === 0}>
             <summary className="plate cursor-pointer py-1 text-h3 pointer-coarse:py-2.5">The released text</summary>
             <article className="mt-4 bg-sheet px-6 py-6 tablet:px-10">

@@ -3,13 +3,12 @@ import { Glyph } from "@/components/ui/Glyph";
 import { ReasonRow, RowHead, Table, Td, Th, Tr } from "@/components/ui/Table";
 import { wholeNumbers } from "@/components/ui/wholeNumbers";
 import type { MarkedRow } from "@/lib/checks/kind";
-import type { MarkingRecordView } from "@/lib/queries/getMarkingRecord";
 import { Fragment } from "react";
 
 const COLUMNS = 7;
 
 /** A row a line of the hand-in: as it was typed and understood, what was computed, how far apart, within or outside, why. */
-export function RecordTable({ record }: { record: MarkingRecordView }) {
+export function RecordTable({ rows }: { rows: readonly MarkedRow[] }) {
   return (
     <>
       <div className="hidden bg-sheet tablet:block">
@@ -26,7 +25,7 @@ export function RecordTable({ record }: { record: MarkingRecordView }) {
             </tr>
           </thead>
           <tbody>
-            {record.rows.map((row, index) => {
+            {rows.map((row, index) => {
               const wash = row.within ? null : "minus";
               return (
                 <Fragment key={index}>
@@ -72,7 +71,7 @@ export function RecordTable({ record }: { record: MarkingRecordView }) {
         </Table>
       </div>
       <ul className="tablet:hidden">
-        {record.rows.map((row, index) => (
+        {rows.map((row, index) => (
           <PhoneRow key={index} row={row} />
         ))}
       </ul>
