@@ -1,12 +1,12 @@
-// `npm run release-checks [-- KIND]`: computes the release checks of the search kinds in the demonstration's module and keeps them in
-// content/release-checks, so that its first release need not wait minutes for them. To be run again when a test says so.
+// `npm run release-checks [-- KIND]`: computes the release checks of the demonstration's first module and keeps them in
+// content/release-checks, so that its first release need not wait minutes for them; one is left to the worker. To be run again when a test says so.
 import { mkdir, readFile, writeFile } from "node:fs/promises";
 import path from "node:path";
 import { ENGINE_VERSION } from "@/lib/checks/engineVersion";
 import type { CheckPlan } from "@/lib/checks/kind";
 import type { TriedKind } from "@/lib/checks/release-check/tryCase";
 import { readModule } from "@/lib/mdx/readModule";
-import { computePart, partsOf, type ComputedCheck } from "@/lib/release-checks/computedCheck";
+import { computePart, LEFT_TO_THE_WORKER, partsOf, type ComputedCheck } from "@/lib/release-checks/computedCheck";
 import { releaseCheckFingerprint } from "@/lib/release-checks/releaseCheckFingerprint";
 import { triedKind } from "@/lib/release-checks/triedKind";
 
@@ -18,7 +18,7 @@ if (!demonstration) throw new Error("release-checks: the demonstration's module 
 await mkdir(path.join(CONTENT, "release-checks"), { recursive: true });
 for (const plan of demonstration.checks) {
   const kind = triedKind(plan);
-  if (kind?.trial.whole === false && (!only || only === plan.kind)) await compute(plan, kind);
+  if (kind && (only ? only === plan.kind : plan.kind !== LEFT_TO_THE_WORKER)) await compute(plan, kind);
 }
 
 /** Takes up an unfinished file where it ends. */

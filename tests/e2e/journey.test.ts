@@ -63,7 +63,7 @@ describe("from a draft to a stranger's verification", () => {
     expect.soft(await brokenRules(page)).toEqual([]);
     await page.context().close();
     expect(faults).toEqual([]);
-  });
+  }, 900_000);
 
   test("the administrator pays at the card page", async () => {
     const { page, faults } = await signedIn(browser, "administrator");
@@ -241,7 +241,7 @@ async function runsTheReleaseCheck(page: Page) {
   await page.getByRole("heading", { name: "False lock on a blocked satellite" }).waitFor();
   expect.soft(await brokenRules(page)).toEqual([]);
   await page.getByRole("button", { name: "Run the release check" }).click();
-  await page.getByRole("heading", { name: "The whole sitting" }).waitFor({ timeout: 180_000 });
+  await page.getByRole("heading", { name: "The whole sitting" }).waitFor({ timeout: 600_000 });
   expect.soft(await brokenRules(page)).toEqual([]);
   expect.soft(await page.getByText("Outside", { exact: true }).count()).toBe(0);
   await page.getByRole("link", { name: "Back to the draft" }).click();

@@ -162,7 +162,7 @@ const SCREENS_AND_ENTRANCES: Row[] = [
     // The bench's list is made of the calculators' descriptions.
     may: ["app", "components", "lib/auth/actions", "lib/policies", "lib/calculators", "lib/certificates/supervision"],
     types: [...VIEWS, "lib/checks", "lib/mdx"],
-    packages: ["react", "next", "node:crypto", "@codemirror/", "@lezer/highlight", "@uiw/react-codemirror"],
+    packages: ["react", "next", "swr", "node:crypto", "@codemirror/", "@lezer/highlight", "@uiw/react-codemirror"],
   },
   {
     files: "app/(public)/",
