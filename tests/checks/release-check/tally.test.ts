@@ -13,7 +13,8 @@ const trials = (faults: Faults, from: number, to: number): Tally => {
   for (let n = from; n < to; n++) sum = addTallies(sum, tryCase(sampleKind(faults), samplePlan, BASE, n));
   return sum;
 };
-const verdict = (tally: Tally, id: string) => judgeTally(sampleKind(), samplePlan, tally).find((line) => line.id === id);
+const verdict = (tally: Tally, id: string) =>
+  judgeTally(sampleKind(), samplePlan, tally).find((line) => line.id === id);
 
 describe("seeds", () => {
   test("are 64 figures, each of its own, the same every time", () => {
