@@ -11,6 +11,8 @@ const UP = [
 ];
 
 type NudgeKeysProps = {
+  /** The plot they belong to: a page can have several. */
+  label: string;
   /** A line's cursor goes along it, a grid's crosshair in two directions. */
   cursor: "line" | "both";
   onNudge: (across: number, up: number) => void;
@@ -18,10 +20,10 @@ type NudgeKeysProps = {
 };
 
 /** Keys for gloves: one step at a time, and the next peak. */
-export function NudgeKeys({ cursor, onNudge, onNextPeak }: NudgeKeysProps) {
+export function NudgeKeys({ label, cursor, onNudge, onNextPeak }: NudgeKeysProps) {
   const step = cursor === "line" ? "One step" : "One cell";
   return (
-    <div className="nudge-keys no-print" data-cursor={cursor}>
+    <div className="nudge-keys no-print" role="group" aria-label={label} data-cursor={cursor}>
       {(cursor === "line" ? ACROSS : [...ACROSS, ...UP]).map(({ word, across, up, path }) => (
         <Key key={word} size="large" aria-label={`${step} ${word}`} onClick={() => onNudge(across, up)}>
           <svg width="24" height="24" viewBox="0 0 24 24" aria-hidden>

@@ -90,7 +90,7 @@ export function PlotStage({
           </Key>
         </span>
       </div>
-      {cursor && onNudge && <NudgeKeys cursor={cursor} onNudge={onNudge} onNextPeak={onNextPeak} />}
+      {cursor && onNudge && <NudgeKeys label={summary} cursor={cursor} onNudge={onNudge} onNextPeak={onNextPeak} />}
       {open && <PlotTable caption={summary} {...table} />}
     </figure>
   );

@@ -23,7 +23,8 @@ export async function readsASatellite(page: Page, prn: string) {
   await page.getByLabel("Satellite", { exact: true }).selectOption(prn);
   await page.getByRole("button", { name: `Search PRN ${prn}`, exact: true }).tap();
   await page.getByRole("heading", { name: `Search grid, satellite ${prn}` }).waitFor();
-  await page.getByRole("button", { name: "Next peak" }).tap();
+  // Every plot has keys of its own; these are the grid's.
+  await page.locator('.nudge-keys[data-cursor="both"]').getByRole("button", { name: "Next peak" }).tap();
   await page.getByRole("button", { name: /^Take .* for satellite/ }).tap();
   await page.getByText(/^Saved \d\d:\d\d:\d\d/).waitFor();
   await page.getByRole("button", { name: "Answers" }).tap();
