@@ -89,7 +89,7 @@ const ONE_ROW: Record<string, OneRow> = {
     else: "none",
   },
   getRegisterEntry: { ask: getRegisterEntry, id: () => chain.certificate.number, to: JUDGES, else: "refused" },
-  getReleaseCheck: { ask: getReleaseCheck, id: () => chain.module.id, to: ["lead"], else: "refused" },
+  getReleaseCheck: { ask: getReleaseCheck, id: () => chain.module.id, to: ["lead"], else: "none" },
   getFailingCase: { ask: getFailing, id: () => tried, to: ["lead"], else: "refused" },
   getModule: { ask: getModule, id: () => chain.module.id, to: LEADS, else: "refused" },
   getRelease: {
