@@ -20,7 +20,10 @@ export class EngineThreads {
   #all = new Set<Worker>();
   #waiting: Waiting[] = [];
 
-  constructor(private readonly most: number) {}
+  constructor(
+    private readonly most: number,
+    private readonly open = () => new Worker(new URL("./engineThread.ts", import.meta.url)),
+  ) {}
 
   /** Loading the checks takes about a second; better before the first technician waits. */
   warm(): void {
@@ -34,6 +37,8 @@ export class EngineThreads {
   async run(task: EngineTask, progress: Progress, signal: AbortSignal, urgent = true): Promise<EngineResult> {
     signal.throwIfAborted();
     const thread = await this.#free(urgent, signal);
+    if (signal.aborted) this.#release(thread);
+    signal.throwIfAborted();
     return new Promise<EngineResult>((resolve, reject) => {
       const settle = (act: () => void) => {
         thread.removeAllListeners("message").removeListener("exit", onExit);
@@ -89,7 +94,7 @@ export class EngineThreads {
   }
 
   #start(): Worker {
-    const thread = new Worker(new URL("./engineThread.ts", import.meta.url));
+    const thread = this.open();
     this.#all.add(thread);
     // A thread that fails outside a task (out of memory, a file that does not load) ends; its task is told by "exit".
     thread.on("error", (error) => log.error({ error }, "engine thread failed"));
