@@ -8,8 +8,14 @@ const alias = {
 };
 const project = (name: string, folders: string[], more: object = {}) => ({
   resolve: { alias },
-  // A limit against hanging only: on a busy machine the default of five seconds cut off tests that pass.
-  test: { name, include: folders.map((folder) => `tests/${folder}/**/*.test.{ts,tsx}`), testTimeout: 60_000, ...more },
+  // Limits against hanging only: on a busy machine the defaults of five and ten seconds cut off tests that pass.
+  test: {
+    name,
+    include: folders.map((folder) => `tests/${folder}/**/*.test.{ts,tsx}`),
+    testTimeout: 60_000,
+    hookTimeout: 60_000,
+    ...more,
+  },
 });
 
 // All files share the database and, one after the other, one process: half of the time went into loading the same modules.
