@@ -22,6 +22,8 @@ type WithAxe = { axe?: { run(options: RunOptions): Promise<AxeResults> } };
 
 /** What of WCAG 2.2 AA a machine finds broken on the page as it stands, in the light theme and in the dark. */
 export async function brokenRules(page: Page): Promise<string[]> {
+  // The title of a page comes behind its body, late on a busy machine; one that never comes is found below.
+  await page.waitForFunction(() => document.title !== "", null, { timeout: 20_000 }).catch(() => undefined);
   if (!(await page.evaluate(() => "axe" in window))) await page.evaluate(AXE);
   const found: string[] = [];
   for (const { colorScheme, runOnly } of LOOKS) {
