@@ -1,10 +1,9 @@
 "use client";
 import { useState } from "react";
-import { Key } from "@/components/ui/Key";
-import { Notice } from "@/components/ui/Notice";
 import { SectionHead } from "@/components/ui/SectionHead";
 import { Select } from "@/components/ui/Select";
 import { Working } from "@/components/ui/Working";
+import { CaptureFailed } from "./CaptureFailed";
 import { CaptureSpectrogram } from "./CaptureSpectrogram";
 import type { Reading } from "./reading";
 import { PowerInTime, RepetitionReader } from "./RepetitionReader";
@@ -38,16 +37,7 @@ export function CaptureLook({ address, rateHz, onTake }: CaptureLookProps) {
   const samples = load.state === "ready" ? load.samples : null;
   const look = useLook(samples, rateHz, { points: Number(points), stretchS: Number(stretchUs) * 1e-6 });
   if (load.state === "failed") {
-    return (
-      <Notice
-        tone="minus"
-        fact="The capture could not be loaded."
-        live
-        action={<Key onClick={() => setAgain(again + 1)}>Load again</Key>}
-      >
-        Your answers are kept.
-      </Notice>
-    );
+    return <CaptureFailed onAgain={() => setAgain(again + 1)} />;
   }
   if (!look) return <Working label={load.state === "loading" ? "Loading the capture" : "Computing the spectra"} />;
   const choices = (list: typeof POINTS) =>

@@ -4,6 +4,7 @@ import { Key } from "@/components/ui/Key";
 import { Notice } from "@/components/ui/Notice";
 import { Select } from "@/components/ui/Select";
 import { Working } from "@/components/ui/Working";
+import { CaptureFailed } from "./CaptureFailed";
 import { GridReading } from "./GridReading";
 import type { Reading } from "./reading";
 import { SearchSettingsFields, type SettingsText } from "./SearchSettingsFields";
@@ -35,16 +36,7 @@ export function CaptureSearch({ address, rateHz, prns, windowHz, onTake }: Captu
   });
 
   if (load.state === "failed") {
-    return (
-      <Notice
-        tone="minus"
-        fact="The capture could not be loaded."
-        live
-        action={<Key onClick={() => setAgain(again + 1)}>Load again</Key>}
-      >
-        Your answers are kept.
-      </Notice>
-    );
+    return <CaptureFailed onAgain={() => setAgain(again + 1)} />;
   }
   if (load.state === "loading") {
     const mb = (bytes: number) => Math.round(bytes / 1e5) / 10;

@@ -1,4 +1,4 @@
-import type { Answers, CheckPlan, Difficulty, Marking, PublicCase } from "@/lib/checks/kind";
+import type { Answers, BuiltCase, CheckPlan, Difficulty, Marking, PublicCase } from "@/lib/checks/kind";
 import { caseSeed } from "@/lib/checks/release-check/caseSeed";
 import { judgeTally } from "@/lib/checks/release-check/judgeTally";
 import { GUESSES_PER_CASE } from "@/lib/checks/release-check/rule";
@@ -17,8 +17,8 @@ export type FailingCase = {
   /** Null where the builder finds no case: `fault` says why. */
   view: PublicCase | null;
   fault: string;
-  /** It has files, of which nothing is kept. */
-  hasFiles: boolean;
+  /** What a technician works on is a file, and none is made for looking at it. */
+  worksFromFiles: boolean;
   truth: string;
   difficulty: Difficulty[];
   answers: Answers;
@@ -35,17 +35,30 @@ export function showFailing(kind: TriedKind, plan: CheckPlan, { line, n, hand }:
   const seedHex = caseSeed(releaseCheckFingerprint(plan), n, line === "whole" ? "whole" : "case");
   const built = buildOrFault(kind, plan, seedHex);
   if (typeof built === "string") {
-    return { label, view: null, fault: built, hasFiles: false, truth: "", difficulty: [], answers: {}, marking: null };
+    return {
+      label,
+      view: null,
+      fault: built,
+      worksFromFiles: false,
+      truth: "",
+      difficulty: [],
+      answers: {},
+      marking: null,
+    };
   }
   const shown = {
     ...{ label, view: built.publicCase, fault: "", truth: truthText(built.truth) },
-    hasFiles: built.files.length > 0 || !kind.trial.whole,
+    worksFromFiles: worksFromFiles(kind, built),
     difficulty: kind.trial.difficulty(built, plan),
   };
   if (line === "whole") return { ...shown, answers: {}, marking: null };
   const answers = handInOf(kind, plan, built, seedHex, line, hand);
   return { ...shown, answers, marking: kind.trial.judge(built, plan, answers) };
 }
+
+/** The samples are left out, or what is shown names a file. */
+const worksFromFiles = ({ trial }: TriedKind, { files, publicCase }: BuiltCase): boolean =>
+  !trial.whole || Object.values(publicCase.data).some((value) => files.some(({ name }) => name === value));
 
 const inside = (number: number, count: number) => Number.isInteger(number) && number >= 0 && number < count;
 

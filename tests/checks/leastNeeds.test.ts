@@ -1,38 +1,25 @@
 import { expect, test } from "vitest";
 import { falseLock } from "@/lib/checks/false-lock/falseLock";
-import type { BuiltCase, CheckKind, CheckPlan, Marking } from "@/lib/checks/kind";
+import type { CheckKind, CheckPlan, Marking } from "@/lib/checks/kind";
 import { leastNeeds } from "@/lib/checks/leastNeeds";
-import { KINDS } from "@/lib/checks/registry";
 import type { TriedKind } from "@/lib/checks/release-check/tryCase";
 import { planOf, seeds } from "./planOf";
+import { caseOf, KINDS_TRIED, rightAnswers } from "./triedCases";
 
 // The release check tries a thousand; here it is seen that a method misses what it names, by the marking itself.
 const SEEDS = seeds(4);
 const MANY_SEEDS = seeds(12);
 
-/** With nothing there two of the wrong ways come to the right answer, as the kind says. */
+/** With nothing there two of the interferer's wrong ways come to the right answer, as the kind says. */
 const PARAMETERS: Readonly<Record<string, object>> = { interferer: { nothing: 0 } };
 
 /** Every quantity as the kind has it, as a release stores them. */
 const quantitiesOf = (kind: CheckKind): CheckPlan["quantities"] =>
   kind.quantities.map(({ id, tolerance, critical }) => ({ of: id, tolerance, critical }));
 
-const KINDS_TRIED = KINDS.filter((kind): kind is TriedKind => kind.trial !== undefined);
-const planFor = (kind: CheckKind) => planOf(kind, PARAMETERS[kind.id]);
-
-const made = new Map<string, BuiltCase>();
-
-/** A case as the release check makes it, once for all methods. */
-function caseOf(kind: TriedKind, seed: string): BuiltCase {
-  const name = `${kind.id} ${seed}`;
-  const built = made.get(name) ?? kind.trial.build(seed, planFor(kind));
-  made.set(name, built);
-  return built;
-}
-
 function markedOf(kind: TriedKind, method: string, seed: string, needs: number): Marking {
-  const built = caseOf(kind, seed);
-  const plan = { ...planFor(kind), needs };
+  const built = caseOf(kind, seed, PARAMETERS[kind.id]);
+  const plan = { ...planOf(kind, PARAMETERS[kind.id]), needs };
   return kind.trial.judge(built, plan, kind.wrongMethods[method]!.solve(built, plan));
 }
 
@@ -43,9 +30,9 @@ function seedsOf(kind: TriedKind, method: string): string[] {
 }
 
 function saysTheRight(kind: TriedKind, method: string, seed: string): boolean {
-  const [built, plan] = [caseOf(kind, seed), planFor(kind)];
-  const right = kind.trial.solve ? kind.trial.solve(built, plan) : kind.solve(built, plan);
-  return JSON.stringify(kind.wrongMethods[method]!.solve(built, plan)) === JSON.stringify(right);
+  const built = caseOf(kind, seed, PARAMETERS[kind.id]);
+  const answers = kind.wrongMethods[method]!.solve(built, planOf(kind, PARAMETERS[kind.id]));
+  return JSON.stringify(answers) === JSON.stringify(rightAnswers(kind, built, PARAMETERS[kind.id]));
 }
 
 const methods = KINDS_TRIED.flatMap((kind) => Object.keys(kind.wrongMethods).map((method) => [kind, method] as const));

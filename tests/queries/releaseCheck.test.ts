@@ -108,7 +108,7 @@ describe("a case to look at", () => {
 
   test("is made again with its truth and the marking of its hand-in, the same each time", async () => {
     const shown = (await open())!;
-    expect(shown).toMatchObject({ code: "TWO-1", checkId: "list", fault: "", hasFiles: true });
+    expect(shown).toMatchObject({ code: "TWO-1", checkId: "list", fault: "", worksFromFiles: true });
     expect(shown.marking!.rows.length).toBeGreaterThan(4);
     expect(JSON.parse(shown.truth)).toHaveProperty("scene");
     expect(await open()).toEqual(shown);

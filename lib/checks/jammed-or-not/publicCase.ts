@@ -1,9 +1,9 @@
 import { utcOf } from "@/lib/gnss/sky/receiverLog";
 import { ALARM } from "./alarmOf";
 import { askedQuantities } from "../askedQuantities";
-import { formatUnderstood } from "../formatUnderstood";
 import type { CheckPlan, FieldSpec, PublicCase } from "../kind";
 import { publicTolerances } from "../publicTolerances";
+import { logTimes, shownLog } from "../receiver-log/shownLog";
 import type { JammedOrNotTruth } from "./drawCase";
 import type { JammedOrNotParameters } from "./parameters";
 import { INDICATIONS, jammedOrNotCautions, jammedOrNotQuantities, VERDICTS } from "./quantities";
@@ -17,14 +17,6 @@ export function publicCase(
   plan: CheckPlan<JammedOrNotParameters>,
 ): PublicCase {
   const asked = askedQuantities(jammedOrNotQuantities, plan);
-  const { startUnixMs, intervalS, readings, trackEvery } = log;
-  const passes = log.passes.map(({ prn, first, cn0DbHz, azimuthDeg, elevationDeg }) => ({
-    prn,
-    first,
-    cn0DbHz: [...cn0DbHz],
-    azimuthDeg: [...azimuthDeg],
-    elevationDeg: [...elevationDeg],
-  }));
   return {
     kind: "jammed-or-not",
     version: 1,
@@ -33,16 +25,14 @@ export function publicCase(
     given: [
       { label: "Signal", value: "GPS L1 C/A" },
       { label: "Receiver", value: "fixed, gives time to a station" },
-      { label: "First reading", value: `${new Date(startUnixMs).toISOString().slice(0, 10)}, ${utcOf(log, 0)} UTC` },
-      { label: "Last reading", value: `${utcOf(log, readings - 1)} UTC` },
-      { label: "Readings", value: `every ${formatUnderstood(intervalS, "s")}` },
+      ...logTimes(log),
       { label: ALARM, value: `${utcOf(log, alarm)} UTC` },
     ],
     cautions: [...jammedOrNotCautions],
     sections: [{ id: "finding", title: "What happened", fields: FIELDS.filter(({ quantity }) => asked.has(quantity)) }],
     tolerances: publicTolerances(asked, { indications: () => "both seen, from two instruments" }),
     data: {
-      log: { startUnixMs, intervalS, readings, trackEvery, passes },
+      log: shownLog(log),
       gainDb: [...columns.gainDb],
       clockNs: [...columns.clockNs],
       eastM: [...columns.eastM],

@@ -1,8 +1,8 @@
-import { utcOf } from "@/lib/gnss/sky/receiverLog";
 import { askedQuantities } from "../askedQuantities";
 import { formatUnderstood } from "../formatUnderstood";
 import type { CheckPlan, FieldSpec, PublicCase } from "../kind";
 import { publicTolerances } from "../publicTolerances";
+import { logTimes, shownLog } from "../receiver-log/shownLog";
 import type { LostDecibelsTruth } from "./drawCase";
 import type { LostDecibelsParameters } from "./parameters";
 import { ACTS, CAUSES, lostDecibelsCautions, lostDecibelsQuantities } from "./quantities";
@@ -16,14 +16,6 @@ export function publicCase(
   plan: CheckPlan<LostDecibelsParameters>,
 ): PublicCase {
   const asked = askedQuantities(lostDecibelsQuantities, plan);
-  const { startUnixMs, intervalS, readings, trackEvery } = log;
-  const passes = log.passes.map(({ prn, first, cn0DbHz, azimuthDeg, elevationDeg }) => ({
-    prn,
-    first,
-    cn0DbHz: [...cn0DbHz],
-    azimuthDeg: [...azimuthDeg],
-    elevationDeg: [...elevationDeg],
-  }));
   return {
     kind: "lost-decibels",
     version: 1,
@@ -31,9 +23,7 @@ export function publicCase(
     brief: BRIEF,
     given: [
       { label: "Signal", value: "GPS L1 C/A" },
-      { label: "First reading", value: `${new Date(startUnixMs).toISOString().slice(0, 10)}, ${utcOf(log, 0)} UTC` },
-      { label: "Last reading", value: `${utcOf(log, readings - 1)} UTC` },
-      { label: "Readings", value: `every ${formatUnderstood(intervalS, "s")}` },
+      ...logTimes(log),
       { label: "Antenna", value: "fixed, with an amplifier fed through the cable" },
       { label: "C/N0 in the log", value: "whole dB-Hz, empty when not tracked" },
     ],
@@ -51,7 +41,7 @@ export function publicCase(
       azimuths: ({ tolerance }) => `±${formatUnderstood(tolerance, "deg")} at either edge`,
     }),
     data: {
-      log: { startUnixMs, intervalS, readings, trackEvery, passes },
+      log: shownLog(log),
       gainDb: [...gainDb],
       currentMa: [...currentMa],
       logFile: LOG_FILE,

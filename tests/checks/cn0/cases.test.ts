@@ -2,40 +2,12 @@ import { describe, expect, test } from "vitest";
 import { cn0 as kind } from "@/lib/checks/cn0/cn0";
 import { PROMPTS } from "@/lib/checks/cn0/drawPrompts";
 import { PROMPT_S } from "@/lib/checks/cn0/estimates";
-import { markAnswers } from "@/lib/checks/cn0/markAnswers";
 import { momentsCn0DbHz } from "@/lib/gnss/tracking/cn0Estimators";
-import { seededRandom } from "@/lib/numeric/random";
 import { planOf, seeds } from "../planOf";
 
 const plan = planOf(kind);
 const built = seeds(14).map((seed) => ({ seed, built: kind.build(seed, plan) }));
 const trial = kind.trial!;
-
-test("the right method meets its own cases", () => {
-  for (const { seed, built: one } of built) {
-    const marking = markAnswers(one.truth, plan, kind.solve(one, plan));
-    expect(
-      marking.rows.filter(({ within }) => !within),
-      seed,
-    ).toEqual([]);
-    expect(marking.met, seed).toBe(true);
-  }
-});
-
-test.each(Object.entries(kind.wrongMethods))("a wrong method misses what it says: %s", (_id, wrong) => {
-  for (const { seed, built: one } of built) {
-    const marking = markAnswers(one.truth, plan, wrong.solve(one, plan));
-    expect(marking.met, seed).toBe(false);
-    for (const { of, within } of marking.quantities) if (wrong.misses.includes(of)) expect(within, seed).toBe(false);
-  }
-});
-
-test("seed and answers alone make the marking", () => {
-  for (const { seed, built: one } of built.slice(0, 3)) {
-    const answers = kind.solve(one, plan);
-    expect(JSON.stringify(kind.mark(seed, plan, answers))).toBe(JSON.stringify(trial.judge(one, plan, answers)));
-  }
-});
 
 test("levels are in range and at least 4 dB apart, in no fixed order", () => {
   for (const { built: one } of built) {
@@ -72,7 +44,7 @@ describe("the public case", () => {
   });
 
   test("is small enough for a bad link", () => {
-    for (const { built: any } of built) expect(JSON.stringify(any.publicCase).length).toBeLessThan(90_000);
+    for (const { built: one } of built) expect(JSON.stringify(one.publicCase).length).toBeLessThan(90_000);
   });
 
   test("the file holds the same prompts", () => {
@@ -93,17 +65,6 @@ describe("the public case", () => {
     for (const sigma of noisy.flat()) expect(sigma > 18 && sigma < 126).toBe(true);
     expect(new Set(noisy.flat().map((sigma) => sigma.toFixed(0))).size).toBeGreaterThan(20);
   });
-});
-
-test("people measure within the tolerances, guesses do not meet it", () => {
-  let [read, guessed] = [0, 0];
-  for (const { seed, built: one } of built) {
-    const random = seededRandom(seed, "trial");
-    if (trial.judge(one, plan, trial.read(one, plan, random)).met) read++;
-    for (let n = 0; n < 10; n++) if (trial.judge(one, plan, trial.guess(one.publicCase, plan, random)).met) guessed++;
-  }
-  expect(read).toBe(14);
-  expect(guessed).toBe(0);
 });
 
 // The reasons beside the tolerances once named the right method.

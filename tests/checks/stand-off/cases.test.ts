@@ -1,33 +1,10 @@
-import fc from "fast-check";
 import { describe, expect, test } from "vitest";
-import type { Answers } from "@/lib/checks/kind";
-import { markAnswers } from "@/lib/checks/stand-off/markAnswers";
 import { standOff as kind } from "@/lib/checks/stand-off/standOff";
 import { seededRandom } from "@/lib/numeric/random";
-import { planOf, seedOf, seeds } from "../planOf";
+import { planOf, seeds } from "../planOf";
 
 const plan = planOf(kind);
 const built = seeds(60).map((seed) => ({ seed, one: kind.build(seed, plan) }));
-
-test("the right method meets its own cases", () => {
-  for (const { seed, one } of built) {
-    const marking = markAnswers(one.truth, plan, kind.solve(one, plan));
-    expect(
-      marking.rows.filter(({ within }) => !within),
-      seed,
-    ).toEqual([]);
-    expect(marking.met).toBe(true);
-  }
-});
-
-test.each(Object.entries(kind.wrongMethods))("%s misses what it says in every case", (_id, wrong) => {
-  for (const { seed, one } of built) {
-    const { quantities, met } = markAnswers(one.truth, plan, wrong.solve(one, plan));
-    const outside = quantities.filter(({ within }) => !within).map(({ of }) => of);
-    expect(outside, seed).toEqual(expect.arrayContaining([...wrong.misses]));
-    expect(met, seed).toBe(false);
-  }
-});
 
 test("a site is drawn from what the parameters say", () => {
   for (const { one } of built) {
@@ -72,30 +49,4 @@ test("the public case holds what is given and nothing that follows from it", () 
     for (const value of [one.truth.receivedDbm, one.truth.recoveryM, ...one.truth.effectiveDbHz])
       expect(text).not.toContain(value.toPrecision(6));
   }
-});
-
-test("whatever is typed is marked, twice alike", () => {
-  const { one } = built[3];
-  const ids = Object.keys(kind.solve(one, plan));
-  const typed = fc.oneof(
-    fc.string(),
-    fc.double().map(String),
-    fc.constantFrom("", "NaN", "1e400", "-0", "1,5", "\u22125", "5 chip"),
-  );
-  fc.assert(
-    fc.property(fc.array(typed, { minLength: ids.length, maxLength: ids.length }), (texts) => {
-      const answers: Answers = Object.fromEntries(ids.map((id, n) => [id, texts[n]]));
-      const marking = markAnswers(one.truth, plan, answers);
-      for (const row of marking.rows) if (!row.within) expect(row.reason).toMatch(/[.?]$/);
-      expect(JSON.stringify(markAnswers(one.truth, plan, answers))).toBe(JSON.stringify(marking));
-    }),
-    { numRuns: 60, seed: 7 },
-  );
-});
-
-test("marking draws the case again from its seed", () => {
-  const { seed, one } = built[5];
-  const answers = kind.solve(one, plan);
-  expect(kind.mark(seed, plan, answers)).toEqual(markAnswers(one.truth, plan, answers));
-  expect(kind.mark(seedOf(6), plan, answers).met).toBe(false);
 });

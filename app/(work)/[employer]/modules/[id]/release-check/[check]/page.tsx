@@ -38,7 +38,7 @@ export default async function FailingCasePage({ params, searchParams }: Props) {
         title={`Case ${shown.n + 1}: ${shown.label}`}
         keys={<LinkKey href={`/${employer}/modules/${id}/release-check`}>Back to the release check</LinkKey>}
       />
-      <div className="page grid gap-x-14 gap-y-10 py-7 desk:grid-cols-[2fr_1fr]">
+      <div className="page grid gap-x-14 gap-y-10 py-7 desk:grid-cols-[minmax(0,1fr)_21.5rem]">
         <div className="grid min-w-0 content-start gap-10">
           <p className="max-w-measure text-dense">
             This case follows from the text of the check. It is made for looking at and nobody is given it in a sitting.
@@ -49,16 +49,18 @@ export default async function FailingCasePage({ params, searchParams }: Props) {
             </Notice>
           )}
           <Marked shown={shown} />
-          {shown.view && !shown.hasFiles && (
-            <section aria-labelledby="work">
+          {shown.view && !shown.worksFromFiles && (
+            <section aria-labelledby="work" className="min-w-0">
               <SectionHead title="As the technician sees it" id="work" />
               <div className="mt-4">
                 <Workspace view={shown.view} filesAddress="" />
               </div>
             </section>
           )}
-          {shown.hasFiles && (
-            <p className="text-dense text-ink-2">The files of this case are left out here. A sitting has them.</p>
+          {shown.worksFromFiles && (
+            <p className="text-dense text-ink-2">
+              What is worked on here is a file, and none is made for looking at it. A sitting has it.
+            </p>
           )}
         </div>
         <aside className="grid min-w-0 content-start gap-7">
@@ -77,7 +79,7 @@ function Marked({ shown: { marking, view } }: { shown: FailingCaseView }) {
     ) : null;
   }
   return (
-    <section aria-labelledby="marked">
+    <section aria-labelledby="marked" className="min-w-0">
       <SectionHead title="The hand-in that was tried" id="marked" note={marking.met ? "met" : "not met"} />
       <div className="mt-3">
         <RecordTable rows={marking.rows} />
