@@ -11,6 +11,7 @@ export * from "./Draft";
 export * from "./Employer";
 export * from "./Fee";
 export * from "./HandIn";
+export * from "./JobAct";
 export * from "./Mail";
 export * from "./MarkingRecord";
 export * from "./MarkingReview";

@@ -36,7 +36,7 @@ export function CaseWaiting({ employer, open }: { employer: string; open: Omit<O
       <div className="page max-w-[760px] py-10">
         {data?.fault ? (
           <Notice tone="minus" fact={building ? "Not drawn." : "Not computed."} reference={data.fault}>
-            {building ? "No time runs." : "Your answers are kept."} The operator has been told and can start it again.
+            {building ? "No time runs." : "Your answers are kept."} The operator sees it and can start it again.
           </Notice>
         ) : open.plan.kind === "written" && !building ? (
           <Notice tone="plus" fact="Handed in.">

@@ -28,6 +28,8 @@ type Row = {
   standing: StandingWord | null;
   cases: CaseOfReview[];
   act: ReviewActWord | null;
+  /** The records that the act asked for are there. */
+  isMarkedAgain: boolean;
   actReason: string | null;
   actedBy: string | null;
   actedAt: Date | null;
@@ -58,7 +60,9 @@ const CASES = `
 const SQL = `
   SELECT s.id AS "sittingId", s.number::text AS number, p.name AS technician, m.code, r.title, r.front_matter -> 'require' AS require,
     d.outcome, c.number AS certificate, z.standing, (${CASES}) AS cases, a.act, a.reason AS "actReason", ap.name AS "actedBy",
-    a.acted_at AS "actedAt"
+    a.acted_at AS "actedAt", EXISTS (SELECT 1 FROM marking_records k JOIN cases x ON x.id = k.case_id
+      JOIN marking_reviews v ON v.id = :reviewId
+      WHERE x.sitting_id = s.id AND k.sequence > 1 AND k.marking = v.marking) AS "isMarkedAgain"
   FROM sittings s JOIN releases r ON r.id = s.release_id JOIN modules m ON m.id = r.module_id JOIN people p ON p.id = s.technician_id
   LEFT JOIN decisions d ON d.sitting_id = s.id LEFT JOIN certificates c ON c.sitting_id = s.id
   LEFT JOIN certificate_standings z ON z.certificate_id = c.id

@@ -22,6 +22,7 @@ export const RECORD_TABLES = [
   "review_acts",
   "release_checks",
   "released_checks",
+  "job_acts",
 ] as const;
 
 /** Tables whose rows may change, with an entry for every change. */

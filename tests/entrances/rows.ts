@@ -44,6 +44,10 @@ export const PAGES: Readonly<Record<string, Addressed>> = {
   "/sign-in/sent": open("/sign-in/sent"),
   "/sign-in/link": open("/sign-in/link?email=nobody@example.test&token=none"),
   "/account": { address: () => "/account", answers: signedIn(200) },
+  "/operator/stopped-jobs": {
+    address: () => "/operator/stopped-jobs",
+    answers: { ...everybody(404), "signed out": "sign in", operator: 200 },
+  },
   "/[employer]": {
     address: ({ employer }) => `/${employer}`,
     answers: { ...to(307, OF_THE_FIRM), "signed out": "sign in" },
@@ -187,6 +191,7 @@ export const ACTIONS: Readonly<Record<string, Crossed>> = {
   renamePersonAction: crossedIn("commands/people-accounts", "renamePerson"),
   setPasswordAction: crossedIn("commands/people-accounts", "setPassword"),
   endSessionAction: crossedIn("commands/people-accounts", "endSession"),
+  actOnJobAction: crossedIn("commands/actOnJob", "actOnJob"),
   addPersonAction: crossedIn("commands/people-roles", "addPerson"),
   grantRoleAction: crossedIn("commands/people-roles", "grantRole"),
   endRoleAction: crossedIn("commands/people-roles", "endRole"),

@@ -17,6 +17,7 @@ export const RECORDS = [
   "closings",
   "decisions",
   "hand_ins",
+  "job_acts",
   "marking_records",
   "marking_reviews",
   "question_answers",
@@ -72,6 +73,9 @@ export async function makeEveryRecord(): Promise<void> {
   });
   await insert("review_acts", {
     ...{ reviewId: review.id, sittingId: sitting.id, act: "mark again", actedBy: firm.lead.personId, actedAt: NOW },
+  });
+  await insert("job_acts", {
+    ...{ jobId: caseId, job: "mark-case", act: "try again", actedBy: firm.lead.personId, actedAt: NOW },
   });
   await insert("closings", { sittingId: sitting.id, unfinished: true, closedAt: NOW });
   const check = { fingerprint: HASH, plan: {}, engineVersion: "1.0.0", tally: {}, finishedAt: NOW };

@@ -48,6 +48,7 @@ const TABLES: Record<string, { web: Rights; worker: Rights }> = {
   marking_reviews: EVERY,
   review_findings: { ...EVERY, web: rights("read") },
   review_acts: EVERY,
+  job_acts: EVERY,
   closings: { ...EVERY, web: rights("read") },
   progress: {
     web: rights("read"),

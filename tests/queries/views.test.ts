@@ -160,7 +160,7 @@ const VIEWS: Record<string, View> = {
       [].review.changed[].cases[].changedRows[].label [].review.changed[].cases[].changedRows[].now
       [].review.changed[].cases[].checkId [].review.changed[].cases[].checkTitle [].review.changed[].cases[].met
       [].review.changed[].cases[].metBefore [].review.changed[].cases[].number [].review.changed[].certificate
-      [].review.changed[].code [].review.changed[].number [].review.changed[].outcome
+      [].review.changed[].code [].review.changed[].isMarkedAgain [].review.changed[].number [].review.changed[].outcome
       [].review.changed[].requirement.before [].review.changed[].requirement.now [].review.changed[].sittingId
       [].review.changed[].standing [].review.changed[].technician [].review.changed[].title
       [].review.computed [].review.id [].review.stopped [].review.unchanged [].title`,

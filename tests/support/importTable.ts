@@ -74,6 +74,8 @@ const DATA_AND_LOGIC: Row[] = [
       "lib/checks/statistics",
       // Which markings have been corrected, and what the kinds are called.
       ...["lib/checks/corrections", "lib/checks/registry"],
+      // What has stopped is in the queue and in no table of ours.
+      ...["lib/jobs/stoppedJobs", "lib/jobs/jobs"],
     ],
     types: ["lib/checks"],
     packages: ["server-only", "sequelize", "node:fs/promises", "jose"],

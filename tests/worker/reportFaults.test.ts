@@ -2,7 +2,9 @@ import { randomUUID } from "node:crypto";
 import { expect, test } from "vitest";
 import { referenceOf, reportFaults } from "@/lib/commands/reportFaults";
 import { reportProgress } from "@/lib/commands/reportProgress";
-import { ownerRows } from "../support/owner";
+import { NOW } from "../support/clock";
+import { makePerson } from "../support/factories";
+import { insert, ownerRows } from "../support/owner";
 import { rowsOf } from "./tools";
 
 const caseId = randomUUID();
@@ -63,4 +65,12 @@ test("a case that runs again after somebody looked at it is no longer at fault",
   await reportProgress(caseId, "mark-case", { step: "acquiring", done: 1, total: 32 });
   await reportFaults();
   expect(await rowsOf("progress")).toMatchObject([{ step: "acquiring", fault: null }]);
+});
+
+test("a job that the operator has put back is no longer at fault, also once its progress is cleared", async () => {
+  const jobId = await failed();
+  const { id: actedBy } = await makePerson({ isOperator: true });
+  await insert("job_acts", { jobId, job: "mark-case", act: "try again", actedBy, actedAt: NOW });
+  await reportFaults();
+  expect(await rowsOf("progress")).toEqual([]);
 });

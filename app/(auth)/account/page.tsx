@@ -25,6 +25,13 @@ export default async function AccountPage() {
         <div>
           <h1 className="text-h1">{account.name}</h1>
           <p className="mt-1 text-ink-2">{account.email}</p>
+          {person.isOperator && (
+            <p className="mt-2">
+              <Link className="link" href="/operator/stopped-jobs">
+                Stopped jobs
+              </Link>
+            </p>
+          )}
         </div>
         <form action={signOutAction}>
           <SubmitKey variant="plain">Sign out</SubmitKey>

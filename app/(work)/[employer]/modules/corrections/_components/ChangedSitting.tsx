@@ -37,8 +37,7 @@ export function ChangedSitting({ employer, reviewId, sitting, action }: ChangedS
       <p className="mt-2 text-dense font-semibold">{consequence(sitting)}</p>
       {sitting.act ? (
         <p className="mt-2 text-dense text-ink-2">
-          {sitting.act === "leave" ? `Left as it is: ${sitting.actReason}` : "Marked again."} {sitting.actedBy},{" "}
-          {formatInstant(sitting.actedAt!)}
+          {actWords(sitting)} {sitting.actedBy}, {formatInstant(sitting.actedAt!)}
         </p>
       ) : (
         <ActOnReview employer={employer} reviewId={reviewId} sittingId={sitting.sittingId} action={action} />
@@ -56,4 +55,9 @@ function consequence({ requirement, outcome, certificate, standing }: ReviewedSi
   return certificate
     ? `${change} Certificate ${certificate} is ${standing}; whether it stands is for a decider to say.`
     : `${change} Decided ${outcome}; the deciders are told.`;
+}
+
+function actWords({ act, actReason, isMarkedAgain }: ReviewedSitting): string {
+  if (act === "leave") return `Left as it is: ${actReason}`;
+  return isMarkedAgain ? "Marked again." : "Waits to be marked again by the worker.";
 }
