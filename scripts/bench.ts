@@ -24,19 +24,21 @@ if (unknown.length > 0 || !(Number.isInteger(rounds) && rounds >= 1)) {
   say(`bench: ${unknown.join(", ") || values.rounds}? There is ${names.join(", ")}, and --rounds from 1.`);
   process.exit(2);
 }
+const benches: [name: string, bench: Bench | TableBench][] = [];
+for (const name of positionals.length > 0 ? positionals : names) {
+  const file = pathToFileURL(path.join(FOLDER, `${name}.bench.ts`)).href;
+  benches.push([name, ((await import(file)) as { bench: Bench | TableBench }).bench]);
+}
 const python = findPython();
-if (!python) {
+if (!python && benches.some(([, bench]) => !("table" in bench))) {
   say("bench: the reference needs python3 with numpy and scipy, which are not here. On Debian:");
   say("  apt-get install python3-numpy python3-scipy");
   process.exit(2);
 }
-say(`Node ${process.version}, ${python.versions}; medians of ${rounds} rounds, in turns\n`);
+say(`Node ${process.version}${python ? `, ${python.versions}` : ""}; medians of ${rounds} rounds, in turns\n`);
 
 let differing = 0;
-for (const name of positionals.length > 0 ? positionals : names) {
-  const { bench } = (await import(pathToFileURL(path.join(FOLDER, `${name}.bench.ts`)).href)) as {
-    bench: Bench | TableBench;
-  };
+for (const [name, bench] of benches) {
   say(`${name}: ${bench.title}`);
   if ("table" in bench) {
     printTable(await bench.table(), say);
